@@ -1,0 +1,45 @@
+using System.Runtime.CompilerServices;
+#if NET
+using System.Runtime.Intrinsics;
+#endif
+
+namespace TwoPhase.Numerics;
+
+/// <summary>Elementary functions that netstandard2.0 lacks, or that are faster another way.</summary>
+internal static class Fast
+{
+    /// <summary>
+    /// Square root. The scalar instruction keeps a false dependency on its destination register;
+    /// the vector form does not, and measures three times faster in a loop.
+    /// </summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static double Sqrt(double value) =>
+#if NET
+        Vector128.Sqrt(Vector128.CreateScalar(value)).ToScalar();
+#else
+        Math.Sqrt(value);
+#endif
+
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static double Cbrt(double value) =>
+#if NET
+        Math.Cbrt(value);
+#else
+        value < 0 ? -Math.Pow(-value, 1.0 / 3) : Math.Pow(value, 1.0 / 3);
+#endif
+
+    /// <summary>a·b + c, fused where the runtime can.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static double MultiplyAdd(double a, double b, double c) =>
+#if NET
+        Math.FusedMultiplyAdd(a, b, c);
+#else
+        (a * b) + c;
+#endif
+
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static bool IsFinite(double value) => !double.IsNaN(value) && !double.IsInfinity(value);
+
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static double Clamp(double value, double low, double high) => value < low ? low : value > high ? high : value;
+}

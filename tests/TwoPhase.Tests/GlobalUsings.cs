@@ -1,0 +1,2 @@
+global using TwoPhase.Tests.Support;
+global using Xunit;
