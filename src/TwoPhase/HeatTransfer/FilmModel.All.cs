@@ -1,0 +1,13 @@
+namespace TwoPhase.HeatTransfer;
+
+public abstract partial class FilmModel
+{
+    /// <summary>Every model of this class that needs no parameters, for reports that show the spread; see <see cref="IsForDryWall"/>.</summary>
+    public static IReadOnlyList<FilmModel> All => Catalogue.Models;
+
+    // A class of its own: the statics of a partial class over several files are initialised in no stated order.
+    private static class Catalogue
+    {
+        public static readonly IReadOnlyList<FilmModel> Models = [GungorWinterton1986];
+    }
+}

@@ -1,0 +1,38 @@
+using TwoPhase.Flow;
+using TwoPhase.Numerics;
+using TwoPhase.Units;
+
+namespace TwoPhase.HeatTransfer;
+
+// What several flow-boiling correlations share.
+public abstract partial class FilmModel
+{
+    // Water: IAPWS R2-83(1992) and IAPWS R6-95(2018).
+    private const double CriticalPressure = 22.064e6;   // Pa
+    private const double MolarMass = 18.015268;         // kg/kmol
+
+    /// <summary>1 − x, kept a little above zero: at dry steam the correlations read 0 · ∞.</summary>
+    private static double LiquidShare(in FlowState flow) => Math.Max(1 - flow.Quality, 1e-9);
+
+    /// <summary>1/Xtt = (x/(1 − x))^0.9 (ρl/ρg)^0.5 (μg/μl)^0.1 [-].</summary>
+    private static double InverseMartinelli(in FlowState flow, double liquidShare) =>
+        Fast.Sqrt(flow.LiquidDensity / flow.VapourDensity)
+        * Math.Exp((0.9 * Math.Log(flow.Quality / liquidShare)) + (0.1 * Math.Log(flow.VapourViscosity / flow.LiquidViscosity)));
+
+    /// <summary>Fr = G²/(ρl² g D) [-], all the flow as liquid.</summary>
+    private static double LiquidFroude(in FlowState flow)
+    {
+        double velocity = flow.MassFlux / flow.LiquidDensity;
+        return velocity * velocity / (SiDoor.StandardGravity * flow.Bore);
+    }
+
+    /// <summary>Whether Gungor and Winterton's correction for a partly wetted horizontal tube applies.</summary>
+    private static bool StratifiesAt(in FlowState flow, double froude) => froude < 0.05 && Math.Abs(flow.Inclination) < Math.PI / 4;
+
+    /// <summary>Fr^(0.1 − 2 Fr) [-], Gungor and Winterton's factor of the convective term below Fr = 0.05.</summary>
+    private static double HorizontalFactor(double froude) => Math.Pow(froude, 0.1 - (2 * froude));
+
+    /// <summary>The larger of h and Dittus-Boelter for all the flow as vapour, to which a wet-wall formula must hand over at x = 1.</summary>
+    private static double NotBelowDrySteam(in FlowState flow, double h) =>
+        Math.Max(h, SinglePhaseFilm.DittusBoelterCore(SinglePhase.Vapour(flow, flow.MassFlux)));
+}
