@@ -7,11 +7,6 @@ namespace TwoPhase.HeatTransfer;
 public abstract partial class CriticalQualityModel
 {
     /// <summary>Kefer, Köhler and Kastner (1989) about the mean of <see cref="Konkov"/>: top and bottom of a horizontal or inclined tube apart.</summary>
-    /// <remarks><inheritdoc cref="KeferKohlerKastnerAbout" path="/remarks/node()"/></remarks>
-    public static CriticalQualityModel KeferKohlerKastner { get; } = new KeferKohlerKastnerModel(new KonkovModel());
-
-    /// <summary>Kefer, Köhler and Kastner (1989) about the mean of another model: top and bottom of a horizontal or inclined tube apart.</summary>
-    /// <param name="mean">The model for the vertical tube, which gives the mean of the perimeter.</param>
     /// <remarks>
     /// <para>Δx = 16 / (2 + Fr)², Fr = xcr G / √(g D cos θ ρg (ρl − ρg)); top xcr − Δx/2, bottom xcr + Δx/2.</para>
     /// <para>xcr critical quality of the vertical tube [kg/kg], G mass flux [kg/(m²·s)], D bore [m], θ inclination against the
@@ -21,6 +16,11 @@ public abstract partial class CriticalQualityModel
     /// <para>Accuracy: none stated in the sources at hand.</para>
     /// <para>Source: Kefer, Köhler and Kastner, Int. J. Multiphase Flow 15(3), 385-392 (1989); coefficients and range from memory.</para>
     /// </remarks>
+    public static CriticalQualityModel KeferKohlerKastner { get; } = new KeferKohlerKastnerModel(new KonkovModel());
+
+    /// <summary>Kefer, Köhler and Kastner (1989) about the mean of another model: top and bottom of a horizontal or inclined tube apart.</summary>
+    /// <param name="mean">The model for the vertical tube, which gives the mean of the perimeter.</param>
+    /// <remarks><inheritdoc cref="KeferKohlerKastner" path="/remarks/node()"/></remarks>
     /// <exception cref="ArgumentNullException"><paramref name="mean"/> is null.</exception>
     public static CriticalQualityModel KeferKohlerKastnerAbout(CriticalQualityModel mean) =>
         new KeferKohlerKastnerModel(Require.NotNull(mean, nameof(mean)));
