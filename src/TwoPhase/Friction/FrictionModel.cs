@@ -39,6 +39,18 @@ public abstract partial class FrictionModel
     /// <param name="flow">The flow in SI units.</param>
     protected internal virtual Applicability CheckCore(in FlowState flow) => Applicability.Inside;
 
+    /// <summary>Gradient of the whole flow as if it were saturated liquid [Pa/m].</summary>
+    /// <param name="flow">The flow in SI units.</param>
+    /// <param name="roughness">Roughness of the bore [m].</param>
+    protected static double LiquidOnly(in FlowState flow, double roughness) =>
+        FrictionFactor.GradientCore(flow.MassFlux, flow.Bore, flow.LiquidDensity, flow.LiquidViscosity, roughness);
+
+    /// <summary>Gradient of the whole flow as if it were saturated vapour [Pa/m].</summary>
+    /// <param name="flow">The flow in SI units.</param>
+    /// <param name="roughness">Roughness of the bore [m].</param>
+    protected static double VapourOnly(in FlowState flow, double roughness) =>
+        FrictionFactor.GradientCore(flow.MassFlux, flow.Bore, flow.VapourDensity, flow.VapourViscosity, roughness);
+
     /// <summary>The name.</summary>
     public override string ToString() => Name;
 }

@@ -8,6 +8,6 @@ public abstract partial class VoidFractionModel
     // A class of its own: the statics of a partial class over several files are initialised in no stated order.
     private static class Catalogue
     {
-        public static readonly IReadOnlyList<VoidFractionModel> Models = [Homogeneous, Zivi];
+        public static readonly IReadOnlyList<VoidFractionModel> Models = [Homogeneous, RouhaniAxelsson, RouhaniAxelssonMassFlux, RouhaniAxelssonVertical, Smith, Steiner, Zivi];
     }
 }

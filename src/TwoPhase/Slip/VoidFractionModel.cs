@@ -10,6 +10,9 @@ namespace TwoPhase.Slip;
 /// </remarks>
 public abstract partial class VoidFractionModel
 {
+    // How far inside x = 1 the slip ratio is taken for its limit there: half the digits of 1 − α remain.
+    private const double NearEnd = 1e-7;
+
     /// <summary>The name of the model, as the trade cites it.</summary>
     public abstract string Name { get; }
 
@@ -34,8 +37,7 @@ public abstract partial class VoidFractionModel
     protected internal virtual double SlipRatioCore(in FlowState flow)
     {
         // One phase vanishes at the ends and 0/0 with it: evaluate a little inside, where the ratio has its limit.
-        const double nearDry = 1e-9, nearWet = 1e-7;
-        double x = Math.Min(Math.Max(flow.Quality, nearDry), 1 - nearWet);
+        double x = Math.Min(Math.Max(flow.Quality, 1e-9), 1 - NearEnd);
         double alpha = VoidFractionCore(flow with { Quality = x });
         return x / (1 - x) * (flow.LiquidDensity / flow.VapourDensity) * ((1 - alpha) / alpha);
     }

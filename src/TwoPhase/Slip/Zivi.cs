@@ -15,12 +15,8 @@ public abstract partial class VoidFractionModel
     /// </remarks>
     public static VoidFractionModel Zivi { get; } = new ZiviModel();
 
-    private sealed class ZiviModel : VoidFractionModel
+    private sealed class ZiviModel() : SlipCorrelation("Zivi")
     {
-        public override string Name => "Zivi";
-
         protected internal override double SlipRatioCore(in FlowState flow) => Fast.Cbrt(flow.LiquidDensity / flow.VapourDensity);
-
-        protected internal override double VoidFractionCore(in FlowState flow) => VoidFractionFromSlip(flow, SlipRatioCore(flow));
     }
 }
