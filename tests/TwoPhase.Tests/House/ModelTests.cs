@@ -7,7 +7,7 @@ namespace TwoPhase.Tests.House;
 /// <summary>Every published formula is in its index, is documented with its range and source, and has a reference point.</summary>
 public class ModelTests
 {
-    private static readonly Type[] FamilyTypes = [.. typeof(Slip.VoidFractionModel).Assembly.GetExportedTypes().Where(type => type.IsAbstract && type.GetProperty("All", BindingFlags.Public | BindingFlags.Static) is not null)];
+    private static readonly Type[] FamilyTypes = [.. typeof(TwoPhase.Slip.VoidFractionModel).Assembly.GetExportedTypes().Where(type => type.IsAbstract && type.GetProperty("All", BindingFlags.Public | BindingFlags.Static) is not null)];
 
     public static TheoryData<Type> Families => [.. FamilyTypes];
 

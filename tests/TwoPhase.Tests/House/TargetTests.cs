@@ -10,7 +10,7 @@ public class TargetTests
     public void Library_UnderTest_IsTheTargetThatWasAskedFor()
     {
         string wanted = typeof(TargetTests).Assembly.GetCustomAttributes<AssemblyMetadataAttribute>().Single(item => item.Key == "LibraryTarget").Value!;
-        string framework = typeof(Slip.VoidFractionModel).Assembly.GetCustomAttribute<TargetFrameworkAttribute>()!.FrameworkName;
+        string framework = typeof(TwoPhase.Slip.VoidFractionModel).Assembly.GetCustomAttribute<TargetFrameworkAttribute>()!.FrameworkName;
         Assert.StartsWith(wanted == "netstandard2.0" ? ".NETStandard,Version=v2.0" : ".NETCoreApp,Version=v10.0", framework, StringComparison.Ordinal);
     }
 }

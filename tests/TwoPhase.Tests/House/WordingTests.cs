@@ -8,7 +8,7 @@ public class WordingTests
     [Fact]
     public void Methods_NoPublicOne_IsNamedLikeAUnitTypeOrANamespace()
     {
-        Assembly library = typeof(Slip.VoidFractionModel).Assembly;
+        Assembly library = typeof(TwoPhase.Slip.VoidFractionModel).Assembly;
         var taken = typeof(UnitsNet.Pressure).Assembly.GetExportedTypes().Where(type => type.IsValueType && type.Namespace == "UnitsNet").Select(type => type.Name)
             .Concat(library.GetExportedTypes().Select(type => type.Namespace!.Split('.')[^1])).ToHashSet();
         string[] wrong = [.. library.GetExportedTypes().SelectMany(type => type.GetMethods(BindingFlags.Public | BindingFlags.Static | BindingFlags.Instance | BindingFlags.DeclaredOnly))
