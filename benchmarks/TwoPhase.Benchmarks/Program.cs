@@ -1,3 +1,15 @@
 using BenchmarkDotNet.Running;
+using TwoPhase.Benchmarks.Ratios;
 
-BenchmarkSwitcher.FromAssembly(typeof(Program).Assembly).Run(args);
+switch (args)
+{
+    case ["ratios", .. string[] names]:
+        RatioReport.Print(RatioSuites.Named(names));
+        break;
+    case ["cold", string name]:
+        ColdStart.MeasureHere(name);
+        break;
+    default:
+        BenchmarkSwitcher.FromAssembly(typeof(RatioReport).Assembly).Run(args);
+        break;
+}
