@@ -1,0 +1,59 @@
+namespace TwoPhase.Passes;
+
+/// <summary>One section as the solvers see it: SI doubles, everything per length that can be.</summary>
+internal readonly struct Duct
+{
+    public string Name { get; init; }
+
+    /// <summary>Distance of its inlet from the inlet of the pass [m].</summary>
+    public double Start { get; init; }
+
+    /// <summary>Length of one flow path [m].</summary>
+    public double Length { get; init; }
+
+    public double End => Start + Length;
+
+    /// <summary>Water-side volume of the pass before it [m³].</summary>
+    public double VolumeBefore { get; init; }
+
+    /// <summary>Bore, scale deducted [m].</summary>
+    public double Bore { get; init; }
+
+    /// <summary>Flow area of all parallel tubes [m²].</summary>
+    public double Area { get; init; }
+
+    /// <summary>Inside perimeter of all parallel tubes [m].</summary>
+    public double Perimeter { get; init; }
+
+    /// <summary>Share of the feed that runs through it: below 1 only where an interchanger has a by-pass.</summary>
+    public double FlowShare { get; init; }
+
+    /// <summary>ε [m].</summary>
+    public double Roughness { get; init; }
+
+    /// <summary>Factor on friction: ribs, and 0 where a loss coefficient stands for all of it.</summary>
+    public double FrictionMultiplier { get; init; }
+
+    /// <summary>K of return bends per length [1/m].</summary>
+    public double BendLoss { get; init; }
+
+    /// <summary>Radius of the bends over bore [-].</summary>
+    public double BendRatio { get; init; }
+
+    /// <summary>K of everything else per length [1/m].</summary>
+    public double OtherLoss { get; init; }
+
+    /// <summary>Height gained per length [-].</summary>
+    public double Rise { get; init; }
+
+    /// <summary>Inclination of the tubes [rad].</summary>
+    public double Inclination { get; init; }
+
+    /// <summary>Share of the fired heat [-].</summary>
+    public double HeatShare { get; init; }
+
+    public FluxCurve Flux { get; init; }
+
+    /// <summary>Tube metal with fins [J/(K·m)].</summary>
+    public double MetalCapacity { get; init; }
+}
