@@ -9,6 +9,12 @@ namespace TwoPhase.Numerics;
 internal static class Fast
 {
     /// <summary>
+    /// AggressiveOptimization, which netstandard2.0 cannot name: long unrolled kernels otherwise run several times slower
+    /// for the first tenths of a second of a process.
+    /// </summary>
+    public const MethodImplOptions Hot = (MethodImplOptions)512;
+
+    /// <summary>
     /// Square root. The scalar instruction keeps a false dependency on its destination register;
     /// the vector form does not, and measures three times faster in a loop.
     /// </summary>
