@@ -8,6 +8,9 @@ public abstract partial class FrictionModel
     // A class of its own: the statics of a partial class over several files are initialised in no stated order.
     private static class Catalogue
     {
-        public static readonly IReadOnlyList<FrictionModel> Models = [MullerSteinhagenHeck];
+        public static readonly IReadOnlyList<FrictionModel> Models =
+        [
+            MullerSteinhagenHeck, Friedel, ChisholmB, LockhartMartinelli, Gronnerud, HomogeneousMcAdams, HomogeneousCicchitti, HomogeneousDukler,
+        ];
     }
 }

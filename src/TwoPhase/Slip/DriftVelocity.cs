@@ -25,6 +25,28 @@ public abstract class DriftVelocity
     public static DriftVelocity RouhaniAxelssonVertical { get; } =
         new Formula("drift of Rouhani-Axelsson, vertical", static (in FlowState flow) => 1.18 * BubbleVelocity(flow));
 
+    /// <summary>Churn-turbulent bubbly flow, Zuber and Findlay (1965): Vgj = 1.41 u, u = [g σ (ρl − ρg)/ρl²]^(1/4).</summary>
+    public static DriftVelocity Churn { get; } =
+        new Formula("drift of churn flow", static (in FlowState flow) => 1.41 * BubbleVelocity(flow));
+
+    /// <summary>Bubbly flow, Harmathy (1960): Vgj = 1.53 u, u = [g σ (ρl − ρg)/ρl²]^(1/4).</summary>
+    public static DriftVelocity Bubbly { get; } =
+        new Formula("drift of bubbly flow", static (in FlowState flow) => 1.53 * BubbleVelocity(flow));
+
+    /// <summary>Slug flow in vertical tubes, Zuber and Findlay (1965): Vgj = 0.35 [g D (ρl − ρg)/ρl]^(1/2).</summary>
+    public static DriftVelocity Slug { get; } = new Formula(
+        "drift of slug flow",
+        static (in FlowState flow) => 0.35 * Fast.Sqrt(SiDoor.StandardGravity * flow.Bore * (flow.LiquidDensity - flow.VapourDensity) / flow.LiquidDensity));
+
+    /// <summary>Dix (1971): Vgj = 2.9 u, u = [g σ (ρl − ρg)/ρl²]^(1/4).</summary>
+    public static DriftVelocity Dix { get; } =
+        new Formula("drift of Dix", static (in FlowState flow) => 2.9 * BubbleVelocity(flow));
+
+    /// <summary>Bestion (1990): Vgj = 0.188 [g D (ρl − ρg)/ρg]^(1/2).</summary>
+    public static DriftVelocity Bestion { get; } = new Formula(
+        "drift of Bestion",
+        static (in FlowState flow) => 0.188 * Fast.Sqrt(SiDoor.StandardGravity * flow.Bore * (flow.LiquidDensity - flow.VapourDensity) / flow.VapourDensity));
+
     /// <summary>The name of the law.</summary>
     public abstract string Name { get; }
 

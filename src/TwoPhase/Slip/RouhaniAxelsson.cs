@@ -6,7 +6,7 @@ public abstract partial class VoidFractionModel
     /// <remarks>
     /// <para>Drift flux (see <see cref="DriftFlux"/>) with C0 = 1 + 0.2 (1 − x) and Vgj = 1.18 (1 − x) [g σ (ρl − ρg)/ρl²]^(1/4).</para>
     /// <para>x flowing quality [kg/kg], σ surface tension [N/m], ρl and ρg saturated densities [kg/m³], g standard gravity [m/s²].</para>
-    /// <para>Range: 0 ≤ x ≤ 1; boiling water in vertical channels, 1.9 to 13.8 MPa.</para>
+    /// <para>Range: 0 ≤ x ≤ 1; boiling water; meant for α above 0.25.</para>
     /// <para>Accuracy: none stated for this form.</para>
     /// <para>Source: Rouhani and Axelsson, Int. J. Heat Mass Transfer 13(2), 383-393 (1970), as quoted in the review of
     /// Woldesemayat and Ghajar, Int. J. Multiphase Flow 33(4), 347-370 (2007).</para>
@@ -18,7 +18,7 @@ public abstract partial class VoidFractionModel
     /// <remarks>
     /// <para>Drift flux (see <see cref="DriftFlux"/>) with C0 = 1 + 0.2 (1 − x) (g D)^(1/4) (ρl/G)^(1/2) and Vgj = 1.18 (1 − x) [g σ (ρl − ρg)/ρl²]^(1/4).</para>
     /// <para>x flowing quality [kg/kg], D bore [m], G mass flux [kg/(m²·s)], σ surface tension [N/m], ρl and ρg saturated densities [kg/m³], g standard gravity [m/s²].</para>
-    /// <para>Range: 0 ≤ x ≤ 1; meant for low mass flux. One review gives it for α below 0.25 only.</para>
+    /// <para>Range: 0 ≤ x ≤ 1; meant for α below 0.25 or low mass flux.</para>
     /// <para>Accuracy: none stated for this form.</para>
     /// <para>Source: Rouhani and Axelsson, Int. J. Heat Mass Transfer 13(2), 383-393 (1970), as quoted in the review of
     /// Woldesemayat and Ghajar, Int. J. Multiphase Flow 33(4), 347-370 (2007).</para>

@@ -8,6 +8,10 @@ public abstract partial class VoidFractionModel
     // A class of its own: the statics of a partial class over several files are initialised in no stated order.
     private static class Catalogue
     {
-        public static readonly IReadOnlyList<VoidFractionModel> Models = [Homogeneous, RouhaniAxelsson, RouhaniAxelssonMassFlux, RouhaniAxelssonVertical, Smith, Steiner, Zivi];
+        public static readonly IReadOnlyList<VoidFractionModel> Models =
+        [
+            Homogeneous, Zivi, Thom, Baroczy, LockhartMartinelli, TurnerWallis, Smith, Chisholm, ChisholmArmand, Fauske, Premoli,
+            RouhaniAxelsson, RouhaniAxelssonMassFlux, RouhaniAxelssonVertical, Steiner, ZuberFindlay, Dix, Bestion, WoldesemayatGhajar,
+        ];
     }
 }

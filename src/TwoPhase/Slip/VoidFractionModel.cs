@@ -24,6 +24,10 @@ public abstract partial class VoidFractionModel
     /// <param name="flow">The flow.</param>
     public double SlipRatio(in TwoPhaseFlow flow) => SlipRatioCore(flow.State);
 
+    /// <summary>How the phases share the tube: velocities, and static, momentum and homogeneous density.</summary>
+    /// <param name="flow">The flow.</param>
+    public PhaseSplit Split(in TwoPhaseFlow flow) => new(flow.State, VoidFractionCore(flow.State), SlipRatioCore(flow.State));
+
     /// <summary>Whether the flow lies inside the published range of the model.</summary>
     /// <param name="flow">The flow.</param>
     public Applicability Check(in TwoPhaseFlow flow) => CheckCore(flow.State);

@@ -14,6 +14,13 @@ public class FrictionGradientTableTests
     public static TheoryData<string, FrictionModel> Columns => new()
     {
         { "muller_steinhagen_heck", FrictionModel.MullerSteinhagenHeck },
+        { "friedel", FrictionModel.Friedel },
+        { "chisholm_b", FrictionModel.ChisholmB },
+        { "lockhart_martinelli", FrictionModel.LockhartMartinelli },
+        { "gronnerud", FrictionModel.Gronnerud },
+        { "homogeneous_mcadams", FrictionModel.HomogeneousMcAdams },
+        { "homogeneous_cicchitti", FrictionModel.HomogeneousCicchitti },
+        { "homogeneous_dukler", FrictionModel.HomogeneousDukler },
     };
 
     [Theory, MemberData(nameof(Columns), DisableDiscoveryEnumeration = true)]

@@ -17,6 +17,16 @@ public class VoidFractionTableTests
         { "alpha_rouhani_2", VoidFractionModel.RouhaniAxelssonMassFlux },
         { "alpha_rouhani_vertical", VoidFractionModel.RouhaniAxelssonVertical },
         { "alpha_steiner", VoidFractionModel.Steiner },
+        { "alpha_fauske", VoidFractionModel.Fauske },
+        { "alpha_chisholm", VoidFractionModel.Chisholm },
+        { "alpha_chisholm_armand", VoidFractionModel.ChisholmArmand },
+        { "alpha_baroczy", VoidFractionModel.Baroczy },
+        { "alpha_thom", VoidFractionModel.Thom },
+        { "alpha_turner_wallis", VoidFractionModel.TurnerWallis },
+        { "alpha_lockhart_martinelli", VoidFractionModel.LockhartMartinelli },
+        { "alpha_dix", VoidFractionModel.Dix },
+        { "alpha_woldesemayat_ghajar_0", VoidFractionModel.WoldesemayatGhajar },
+        { "alpha_premoli", VoidFractionModel.Premoli },
     };
 
     [Theory, MemberData(nameof(Columns), DisableDiscoveryEnumeration = true)]
@@ -24,6 +34,13 @@ public class VoidFractionTableTests
     {
         foreach (ReferenceTable.Row row in Table.Rows)
             Approx.Relative(row[column], model.VoidFractionCore(row.ToFlowState()), 1e-9, column + " at " + row);
+    }
+
+    [Fact]
+    public void WoldesemayatGhajar_VerticalReferenceRows_MatchesToPrintedDigits()
+    {
+        foreach (ReferenceTable.Row row in Table.Rows)
+            Approx.Relative(row["alpha_woldesemayat_ghajar_90"], VoidFractionModel.WoldesemayatGhajar.VoidFractionCore(row.ToFlowState() with { Inclination = Math.PI / 2 }), 1e-9, row.ToString());
     }
 
     [Theory, MemberData(nameof(Columns), DisableDiscoveryEnumeration = true)]
