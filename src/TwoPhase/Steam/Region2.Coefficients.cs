@@ -4,6 +4,9 @@ namespace TwoPhase.Steam;
 
 internal static partial class Region2
 {
+    // The first two of Table 10, which metastable vapour replaces.
+    private const double StableN1 = -0.96927686500217e1, StableN2 = 0.10086655968018e2;
+
     // Equation (16) of R7-97(2012) with Table 10 as printed, without its ln π: Σ n τ^J.
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     private static PowerRow Ideal(double t)
@@ -11,8 +14,8 @@ internal static partial class Region2
         double t2 = t * t, t3 = t2 * t, tm1 = 1 / t, tm2 = tm1 * tm1, tm3 = tm2 * tm1, tm4 = tm3 * tm1, tm5 = tm4 * tm1;
 
         return PowerRow
-            .Of(-0.96927686500217e1, 0, 1)
-            .And(0.10086655968018e2, 1, t)
+            .Of(StableN1, 0, 1)
+            .And(StableN2, 1, t)
             .And(-0.56087911283020e-2, -5, tm5)
             .And(0.71452738081455e-1, -4, tm4)
             .And(-0.40710498223928, -3, tm3)

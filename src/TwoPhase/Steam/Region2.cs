@@ -10,18 +10,22 @@ internal static partial class Region2
     [MethodImpl(Fast.Hot)]
     public static PhaseCore At(double pressure, double temperature)
     {
-        double pi = pressure * 1e-6, tau = 540 / temperature, b = tau - 0.5;
-        PowerSum sum = Residual(pi, b);
-        PowerRow ideal = Ideal(tau);
-        double byTau = tau / b;
+        double pi = pressure * 1e-6, tau = 540 / temperature;
+        return FromParts(pressure, temperature, Ideal(tau), Residual(pi, tau - 0.5));
+    }
+
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    private static PhaseCore FromParts(double pressure, double temperature, in PowerRow ideal, in PowerSum residual)
+    {
+        double tau = 540 / temperature, byTau = tau / (tau - 0.5);
         return PhaseCore.FromGibbs(
             pressure,
             temperature,
-            Math.Log(pi) + ideal.Value + sum.Value,
-            1 + sum.A,
-            sum.AA - 1,
-            ideal.First + (byTau * sum.B),
-            ideal.Second + (byTau * byTau * sum.BB),
-            byTau * sum.AB);
+            Math.Log(pressure * 1e-6) + ideal.Value + residual.Value,
+            1 + residual.A,
+            residual.AA - 1,
+            ideal.First + (byTau * residual.B),
+            ideal.Second + (byTau * byTau * residual.BB),
+            byTau * residual.AB);
     }
 }

@@ -13,10 +13,8 @@ public readonly partial record struct SteamState
     public static SteamState FromPressureTemperature(Pressure pressure, Temperature temperature)
     {
         double p = Domain.Pressure(pressure, nameof(pressure)), t = Domain.Temperature(temperature, nameof(temperature));
-        WaterCore core = Water.AtPressureTemperature(p, t);
-        return core.Region != 0
-            ? new(core)
-            : throw Require.OutOfRange(p, "Pressure p", Scale.Megapascals, nameof(pressure), $"lies outside the formulation at {Scale.Kelvins.Text(t)}");
+        if (t > Border25Temperature) Domain.Region5Pressure(p, nameof(pressure));
+        return new(Water.AtPressureTemperature(p, t));
     }
 
     /// <summary>The state at a pressure and a specific enthalpy.</summary>
@@ -25,11 +23,59 @@ public readonly partial record struct SteamState
     /// <exception cref="ArgumentOutOfRangeException">The state lies outside the formulation.</exception>
     public static SteamState FromPressureEnthalpy(Pressure pressure, SpecificEnergy enthalpy)
     {
-        double p = Domain.Pressure(pressure, nameof(pressure)), h = Domain.Enthalpy(enthalpy, nameof(enthalpy));
-        WaterCore core = Water.AtPressureEnthalpy(p, h);
-        return core.Region != 0
-            ? new(core)
-            : throw Require.OutOfRange(h, "Specific enthalpy h", Scale.KilojoulesPerKilogram, nameof(enthalpy), $"lies outside the formulation at {Scale.Megapascals.Text(p)}");
+        double p = Domain.Pressure(pressure, nameof(pressure)), h = enthalpy.Si();
+        WaterCore state = Water.AtPressureEnthalpy(p, h);
+        return state.Region != 0 ? new(state) : throw Domain.OutsideIsobar(p, Property.Enthalpy, h, nameof(enthalpy));
+    }
+
+    /// <summary>The state at a pressure and a specific entropy.</summary>
+    /// <param name="pressure">p, absolute pressure, above zero, up to 100 MPa.</param>
+    /// <param name="entropy">s, between its values at the lowest and the highest temperature at this pressure.</param>
+    /// <exception cref="ArgumentOutOfRangeException">The state lies outside the formulation.</exception>
+    public static SteamState FromPressureEntropy(Pressure pressure, SpecificEntropy entropy)
+    {
+        double p = Domain.Pressure(pressure, nameof(pressure)), s = entropy.Si();
+        WaterCore state = Water.AtPressureEntropy(p, s);
+        return state.Region != 0 ? new(state) : throw Domain.OutsideIsobar(p, Property.Entropy, s, nameof(entropy));
+    }
+
+    /// <summary>The state at a pressure and a density.</summary>
+    /// <remarks>Cold water has two temperatures of the same density, at 1 bar between 0 and 8 °C; the warmer one is returned.</remarks>
+    /// <param name="pressure">p, absolute pressure, above zero, up to 100 MPa.</param>
+    /// <param name="density">ρ, between its values at the highest temperature and at the temperature of greatest density at this pressure.</param>
+    /// <exception cref="ArgumentOutOfRangeException">The state lies outside the formulation.</exception>
+    public static SteamState FromPressureDensity(Pressure pressure, Density density)
+    {
+        double p = Domain.Pressure(pressure, nameof(pressure)), rho = Domain.Density(density, nameof(density));
+        WaterCore state = Water.AtPressureDensity(p, rho);
+        return state.Region != 0 ? new(state) : throw Domain.OutsideIsobar(p, Property.Volume, 1 / rho, nameof(density));
+    }
+
+    /// <summary>The state at a temperature and a density.</summary>
+    /// <param name="temperature">T, 273.15 K to 2273.15 K.</param>
+    /// <param name="density">ρ, above zero, up to its value at the highest pressure at this temperature.</param>
+    /// <exception cref="ArgumentOutOfRangeException">The state lies outside the formulation.</exception>
+    public static SteamState FromTemperatureDensity(Temperature temperature, Density density)
+    {
+        double t = Domain.Temperature(temperature, nameof(temperature)), rho = Domain.Density(density, nameof(density));
+        WaterCore state = Water.AtTemperatureDensity(t, rho);
+        return state.Region != 0 ? new(state) : throw Domain.OutsideIsotherm(t, rho, nameof(density));
+    }
+
+    /// <summary>The state at a specific enthalpy and a specific entropy: the end of an isentropic expansion, for example.</summary>
+    /// <param name="enthalpy">h, such that the formulation has a state with this entropy.</param>
+    /// <param name="entropy">s, likewise.</param>
+    /// <exception cref="ArgumentOutOfRangeException">The formulation has no such state.</exception>
+    public static SteamState FromEnthalpyEntropy(SpecificEnergy enthalpy, SpecificEntropy entropy)
+    {
+        double h = enthalpy.Si(), s = entropy.Si();
+        WaterCore state = Water.AtEnthalpyEntropy(h, s);
+        return state.Region != 0 ? new(state) : throw Require.OutOfRange(
+            h,
+            "Specific enthalpy h",
+            Scale.KilojoulesPerKilogram,
+            nameof(enthalpy),
+            $"with specific entropy s = {Scale.KilojoulesPerKilogramKelvin.Text(s)} must be a state between 273.15 K and 1073.15 K up to 100 MPa, or up to 2273.15 K and 50 MPa");
     }
 
     /// <summary>Wet steam at a pressure and a quality.</summary>

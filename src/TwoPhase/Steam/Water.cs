@@ -9,28 +9,31 @@ namespace TwoPhase.Steam;
 internal static partial class Water
 {
     /// <summary>The state at p [Pa] and T [K]; on the saturation line itself, vapour.</summary>
-    public static WaterCore AtPressureTemperature(double pressure, double temperature) => RegionOf(pressure, temperature) switch
+    public static WaterCore AtPressureTemperature(double pressure, double temperature)
     {
-        1 => new(1, Region1.At(pressure, temperature)),
-        2 => new(2, Region2.At(pressure, temperature)),
-        _ => default,
-    };
+        if (!(pressure > 0 && pressure <= HighestPressure && temperature >= LowestTemperature && temperature <= HighestTemperature)) return default;
+        if (temperature > Border25Temperature)
+            return pressure <= HighestPressureOfRegion5 ? new(5, Region5.At(pressure, temperature)) : default;
+
+        bool vapour = temperature >= CriticalTemperature || pressure <= Region4.Pressure(temperature);
+        if (temperature <= Border13Temperature)
+            return vapour ? new(2, Region2.At(pressure, temperature)) : new(1, Region1.At(pressure, temperature));
+
+        bool dense = temperature <= Border23.HighestTemperature && pressure > Border23.Pressure(temperature);
+        return dense
+            ? new(3, Region3.AtPressure(pressure, temperature, vapour))
+            : new(2, Region2.At(pressure, temperature));
+    }
 
     /// <summary>The state at p [Pa] and h [J/kg].</summary>
-    public static WaterCore AtPressureEnthalpy(double pressure, double enthalpy)
-    {
-        if (!(pressure > 0 && pressure <= HighestPressure)) return default;
-        if (pressure >= SaturationLine.LowestPressure && pressure < CriticalPressure)
-        {
-            // The backward equations are good to 25 mK, enough to land on the wrong side: the phase is decided first.
-            SaturationCore saturation = SaturationLine.AtPressure(pressure);
-            double quality = saturation.EquilibriumQuality(enthalpy);
-            if (quality >= 0 && quality <= 1) return new(saturation, quality);
-            if (quality < 0) return Solved1(pressure, enthalpy);
-        }
+    public static WaterCore AtPressureEnthalpy(double pressure, double enthalpy) => OnIsobar(pressure, Property.Enthalpy, enthalpy);
 
-        return Solved2(pressure, enthalpy);
-    }
+    /// <summary>The state at p [Pa] and s [J/(kg·K)].</summary>
+    public static WaterCore AtPressureEntropy(double pressure, double entropy) => OnIsobar(pressure, Property.Entropy, entropy);
+
+    /// <summary>The state at p [Pa] and ρ [kg/m³]; in water colder than its greatest density the warmer one of two.</summary>
+    public static WaterCore AtPressureDensity(double pressure, double density) =>
+        density > 0 ? OnIsobar(pressure, Property.Volume, 1 / density) : default;
 
     /// <summary>Wet steam at p [Pa] and x [kg/kg].</summary>
     public static WaterCore AtPressureQuality(double pressure, double quality) =>
@@ -49,41 +52,4 @@ internal static partial class Water
         : state.Pressure >= SaturationLine.LowestPressure && state.Pressure < CriticalPressure
             ? SaturationLine.AtPressure(state.Pressure).EquilibriumQuality(state.Enthalpy)
             : double.NaN;
-
-    private static int RegionOf(double pressure, double temperature)
-    {
-        if (!(pressure > 0 && pressure <= HighestPressure && temperature >= LowestTemperature)) return 0;
-        if (temperature <= Border13Temperature) return pressure > Region4.Pressure(temperature) ? 1 : 2;
-        return temperature <= Border25Temperature && pressure <= 16.529e6 ? 2 : 0;
-    }
-
-    private static WaterCore Solved1(double pressure, double enthalpy)
-    {
-        double temperature = Region1.BackwardTemperature(pressure, enthalpy);
-        PhaseCore phase = Region1.At(pressure, temperature);
-        for (int i = 0; i < 6; i++)
-        {
-            double step = (enthalpy - phase.Enthalpy) / phase.IsobaricHeatCapacity;
-            temperature += step;
-            phase = Region1.At(pressure, temperature);
-            if (Math.Abs(step) < 1e-9 * temperature) break;
-        }
-
-        return temperature >= LowestTemperature - 1e-6 && temperature <= Border13Temperature + 1e-6 ? new(1, phase) : default;
-    }
-
-    private static WaterCore Solved2(double pressure, double enthalpy)
-    {
-        double temperature = Region2.BackwardTemperature(pressure, enthalpy);
-        PhaseCore phase = Region2.At(pressure, temperature);
-        for (int i = 0; i < 6; i++)
-        {
-            double step = (enthalpy - phase.Enthalpy) / phase.IsobaricHeatCapacity;
-            temperature += step;
-            phase = Region2.At(pressure, temperature);
-            if (Math.Abs(step) < 1e-9 * temperature) break;
-        }
-
-        return temperature >= LowestTemperature - 1e-6 && temperature <= Border25Temperature + 1e-6 && pressure <= 16.529e6 ? new(2, phase) : default;
-    }
 }

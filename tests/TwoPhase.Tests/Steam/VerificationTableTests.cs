@@ -18,12 +18,20 @@ public class VerificationTableTests
         EachRow("r7-97-table33", row => Property(Region3.At(row["rho_kg_m3"], row["T_K"]), row.Text("out")));
 
     [Fact]
-    public void Region1BackwardTemperature_Table7_MatchesPrintedDigits() =>
-        EachRow("r7-97-table07", row => Region1.BackwardTemperature(row["p_MPa"] * 1e6, row["h_kJ_kg"] * 1e3));
+    public void Region5_Table42_MatchesPrintedDigits() =>
+        EachRow("r7-97-table42", row => Property(Region5.At(row["p_MPa"] * 1e6, row["T_K"]), row.Text("out")));
 
     [Fact]
-    public void Region2BackwardTemperature_Table24_MatchesPrintedDigits() =>
-        EachRow("r7-97-table24", row => Region2.BackwardTemperature(row["p_MPa"] * 1e6, row["h_kJ_kg"] * 1e3));
+    public void Metastable_Table18_MatchesPrintedDigits() =>
+        EachRow("r7-97-table18", row => Property(Region2.Metastable(row["p_MPa"] * 1e6, row["T_K"]), row.Text("out")));
+
+    [Fact]
+    public void Border23_PublishedPoint_MatchesPrintedDigits()
+    {
+        // R7-97(2012), section 4: 623.15 K and 16.5291643 MPa.
+        Approx.Absolute(16.5291643e6, Border23.Pressure(623.15), 0.05);
+        Approx.Absolute(623.150000, Border23.Temperature(16.5291643e6), 5e-7);
+    }
 
     [Fact]
     public void SaturationPressure_Table35_MatchesPrintedDigits() =>
@@ -47,7 +55,7 @@ public class VerificationTableTests
 
     [Fact]
     public void Conductivity_Table8_MatchesPrintedDigits() =>
-        EachRow("r15-11-table8", row => Transport.Conductivity(Region2.At(row["p_MPa"] * 1e6, row["T_K"])));
+        EachRow("r15-11-table8", row => Transport.Conductivity(Water.AtPressureTemperature(row["p_MPa"] * 1e6, row["T_K"]).Phase));
 
     [Fact]
     public void Conductivity_Table9_MatchesPrintedDigits() =>

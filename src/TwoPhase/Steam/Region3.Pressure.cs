@@ -1,0 +1,50 @@
+using TwoPhase.Steam.Backward;
+using static TwoPhase.Steam.Water97;
+
+namespace TwoPhase.Steam;
+
+internal static partial class Region3
+{
+    private const double LowestDensity = 20, HighestDensity = 1000;
+
+    /// <summary>The state at p and T, from the backward equation v(p,T) on.</summary>
+    /// <param name="pressure">p [Pa].</param>
+    /// <param name="temperature">T [K].</param>
+    /// <param name="vapour">Which phase, below Tc; idle above.</param>
+    public static PhaseCore AtPressure(double pressure, double temperature, bool vapour) =>
+        AtPressure(pressure, temperature, vapour, 1 / Volume3.At(pressure, temperature, vapour));
+
+    /// <summary>
+    /// The state at p and T: the root ρ of p(ρ,T) = p. Below Tc the equation loops through the dome and has up to three
+    /// roots; the outer one of the phase asked for is taken. Starts from a density [kg/m³] somewhere near.
+    /// </summary>
+    private static PhaseCore AtPressure(double pressure, double temperature, bool vapour, double start)
+    {
+        bool subcritical = temperature < CriticalTemperature;
+        double low = subcritical && !vapour ? CriticalDensity : LowestDensity;
+        double high = subcritical && vapour ? CriticalDensity : HighestDensity;
+        double density = start > low && start < high ? start : (low + high) / 2;
+        PhaseCore phase = At(density, temperature);
+        for (int i = 0; i < 100; i++)
+        {
+            if (phase.BulkModulus <= 0)
+            {
+                // Inside the spinodal, where Newton's direction is of no use: go outwards.
+                density = vapour ? (low + density) / 2 : (density + high) / 2;
+                phase = At(density, temperature);
+                continue;
+            }
+
+            double missing = pressure - phase.Pressure;
+            if (missing > 0) low = Math.Max(low, density);
+            else high = Math.Min(high, density);
+            double next = density + (missing * density / phase.BulkModulus);
+            if (!(next > low && next < high)) next = (low + high) / 2;
+            if (Math.Abs(next - density) <= 4e-16 * density) break;
+            density = next;
+            phase = At(density, temperature);
+        }
+
+        return phase with { Pressure = pressure };
+    }
+}
