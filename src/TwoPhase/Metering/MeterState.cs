@@ -5,7 +5,7 @@ namespace TwoPhase.Metering;
 /// types of the library that are public, so that a model of your own runs in the same loops as the built-in ones.
 /// </summary>
 /// <remarks>
-/// <para>Built by the quality meter for each reading; both phases are saturated at <see cref="Pressure"/>.</para>
+/// <para>Built by <see cref="QualityMeter"/> for each reading; both phases are saturated at <see cref="Pressure"/>.</para>
 /// <para>The values are trusted: whoever builds a state checks them at the public door. What a meter does not have is NaN:
 /// a meter given by its constant alone has no diameters.</para>
 /// </remarks>

@@ -1,0 +1,134 @@
+using TwoPhase.Numerics;
+
+namespace TwoPhase.Metering;
+
+public sealed partial class QualityMeter
+{
+    /// <summary>Steps in which the quality of a model of unknown trend is searched for every crossing.</summary>
+    private const int SearchSteps = 64;
+
+    /// <summary>Solves 1/(ρe C²) = 2 Δp (ε E A/ṁ)², whose right side the reading gives, for the quality.</summary>
+    private QualitySolution SolveQuality(in MeterGeometry geometry, in MeterState state)
+    {
+        double perFlow = state.Expansibility * geometry.FlowArea / state.TotalMassFlow;
+        double target = 2 * state.Differential * perFlow * perFlow;
+        if (Model.HasClosedInverse && !Meter.CoefficientDependsOnReynolds)
+        {
+            double c = state.DischargeCoefficient;
+            return new QualitySolution(Model.QualityFromVolume(state, target * c * c));
+        }
+
+        var reduced = new ReducedVolume(this, geometry, state, target);
+        double low = Model.LowestQuality, atLow = reduced.Value(low), atDry = reduced.Value(1);
+        return Model.Trend == DifferentialTrend.Unknown ? SearchEverywhere(reduced, low, atLow, atDry)
+            : atLow >= 0 ? Continued(geometry, state, target, low)
+            : atDry > 0 ? Between(reduced, low, atLow, 1, atDry)
+            : Model.Trend == DifferentialTrend.RisingThenFalling ? SearchBelowPeak(geometry, state, target, reduced, low, atLow, atDry)
+            : Continued(geometry, state, target, 1);
+    }
+
+    /// <summary>Outside the range of the formula: the homogeneous slope from its nearer end, with C as at that end.</summary>
+    private QualitySolution Continued(in MeterGeometry geometry, in MeterState state, double target, double end)
+    {
+        MeterState atEnd = WithCoefficient(geometry, state, end);
+        double c = Model.DischargeCoefficientCore(atEnd, end);
+        double volume = Model.EffectiveVolume(atEnd, end), slope = (1 / state.VapourDensity) - (1 / state.LiquidDensity);
+        return new QualitySolution(end + (((target * c * c) - volume) / slope));
+    }
+
+    private static QualitySolution Between(in ReducedVolume reduced, double low, double atLow, double high, double atHigh, double other = double.NaN)
+    {
+        RootResult result = BracketedRoot.TryFind(reduced, low, atLow, high, atHigh, 1e-16);
+        return Accepted(result) ? new QualitySolution(result.X, other) : new QualitySolution(double.NaN);
+    }
+
+    /// <summary>A reading at or above that of dry steam, by a model that peaks before: below the peak, beyond it too, or above every quality.</summary>
+    private QualitySolution SearchBelowPeak(in MeterGeometry geometry, in MeterState state, double target, in ReducedVolume reduced, double low, double atLow, double atDry)
+    {
+        double peak = Peak(reduced, low, 1), atPeak = reduced.Value(peak);
+        if (!(atPeak > 0)) return Continued(geometry, state, target, 1);
+        double other = atDry < 0 ? BracketedRoot.TryFind(reduced, peak, atPeak, 1, atDry, 1e-15).X : 1;
+        return Between(reduced, low, atLow, peak, atPeak, other);
+    }
+
+    /// <summary>Every crossing on a grid, for a model that does not state its trend: the lowest is the answer, the next is told.</summary>
+    private QualitySolution SearchEverywhere(in ReducedVolume reduced, double low, double atLow, double atDry)
+    {
+        double first = double.NaN, second = double.NaN, left = low, atLeft = atLow;
+        for (int step = 1; step <= SearchSteps && double.IsNaN(second); step++)
+        {
+            double right = low + ((1 - low) * step / SearchSteps), atRight = reduced.Value(right);
+            if (atLeft == 0 || atLeft * atRight < 0)
+            {
+                double crossing = Between(reduced, left, atLeft, right, atRight).Quality;
+                if (double.IsNaN(first)) first = crossing;
+                else second = crossing;
+            }
+
+            (left, atLeft) = (right, atRight);
+        }
+
+        if (!double.IsNaN(first)) return new QualitySolution(first, second);
+        return atLow > 0 ? Continued(reduced.Geometry, reduced.State, reduced.Target, low)
+            : atDry <= 0 ? Continued(reduced.Geometry, reduced.State, reduced.Target, 1)
+            : new QualitySolution(double.NaN);
+    }
+
+    /// <summary>Golden-section search for the highest value of a function with one peak, to half the digits, which is all that its flat top gives.</summary>
+    private static double Peak(in ReducedVolume reduced, double low, double high)
+    {
+        const double golden = 0.6180339887498949;
+        double a = high - (golden * (high - low)), b = low + (golden * (high - low));
+        double atA = reduced.Value(a), atB = reduced.Value(b);
+        while (high - low > 1e-9)
+        {
+            if (atA > atB)
+            {
+                (high, b, atB) = (b, a, atA);
+                a = high - (golden * (high - low));
+                atA = reduced.Value(a);
+            }
+            else
+            {
+                (low, a, atA) = (a, b, atB);
+                b = low + (golden * (high - low));
+                atB = reduced.Value(b);
+            }
+        }
+
+        return (low + high) / 2;
+    }
+
+    private readonly struct QualitySolution(double quality, double other = double.NaN)
+    {
+        public double Quality { get; } = quality;
+
+        /// <summary>A second quality that fits, above the first; NaN where there is none.</summary>
+        public double Other { get; } = other;
+
+        public ReadingStatus Status => StatusOf(Quality);
+    }
+
+    /// <summary>1/(ρe C²) over its target, less one: zero at the quality sought.</summary>
+    private readonly struct ReducedVolume(QualityMeter owner, in MeterGeometry geometry, in MeterState state, double target) : IScalarFunction
+    {
+        private readonly MeterGeometry _geometry = geometry;
+        private readonly MeterState _state = state;
+
+        public MeterGeometry Geometry => _geometry;
+
+        public MeterState State => _state;
+
+        public double Target { get; } = target;
+
+        public double Value(double x) => owner.Meter.CoefficientDependsOnReynolds
+            ? Value(owner.WithCoefficient(_geometry, _state, x), x)
+            : Value(_state, x);
+
+        private double Value(in MeterState at, double x)
+        {
+            double c = owner.Model.DischargeCoefficientCore(at, x);
+            return (1 / (owner.Model.EffectiveDensityCore(at, x) * c * c * Target)) - 1;
+        }
+    }
+}
