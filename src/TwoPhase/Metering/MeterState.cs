@@ -26,13 +26,13 @@ public readonly record struct MeterState
     /// <summary>κ, isentropic exponent of the saturated vapour, w²/(p v) with w speed of sound and v specific volume [-]. Never cp/cv, which is 2.3 at 10 MPa where κ is 1.24.</summary>
     public double IsentropicExponent { get; init; }
 
-    /// <summary>μl, dynamic viscosity of the saturated liquid [Pa·s]; NaN when the model does not ask for transport properties and the meter does not need them.</summary>
+    /// <summary>μl, dynamic viscosity of the saturated liquid [Pa·s]; NaN over a meter without geometry when the model does not ask for transport properties.</summary>
     public double LiquidViscosity { get; init; }
 
     /// <summary>μg, dynamic viscosity of the saturated vapour [Pa·s]; NaN as for <see cref="LiquidViscosity"/>.</summary>
     public double VapourViscosity { get; init; }
 
-    /// <summary>σ, surface tension [N/m]; NaN when the model does not ask for transport properties.</summary>
+    /// <summary>σ, surface tension [N/m]; NaN as for <see cref="LiquidViscosity"/>.</summary>
     public double SurfaceTension { get; init; }
 
     /// <summary>ṁ, total mass flow, liquid and vapour together [kg/s].</summary>

@@ -19,21 +19,23 @@ internal readonly struct MeterSteam
 
     public double SurfaceTension { get; private init; }
 
+    /// <summary>Steam at a pressure, from the saturation table: within 1e-9 of the formulation, several times faster.</summary>
     /// <param name="pressure">p [Pa], on the saturation line; trusted.</param>
+    /// <param name="expansion">Whether temperature and isentropic exponent are wanted, for a meter with a geometry; else they are NaN.</param>
     /// <param name="transport">Whether viscosities and surface tension are wanted; else they are NaN.</param>
-    public static MeterSteam At(double pressure, bool transport)
+    public static MeterSteam At(double pressure, bool expansion, bool transport)
     {
-        SaturationCore steam = SaturationLine.AtPressure(pressure);
-        double liquid = steam.Liquid.Density, vapour = steam.Vapour.Density, temperature = steam.Temperature;
+        SaturatedPhases phases = SaturationTable.Phases(pressure);
+        SaturatedFluid fluid = expansion || transport ? SaturationTable.Fluid(pressure) : new(Numerics.Four.NaN);
         return new MeterSteam
         {
-            Temperature = temperature,
-            LiquidDensity = liquid,
-            VapourDensity = vapour,
-            IsentropicExponent = steam.Vapour.IsentropicExponent,
-            LiquidViscosity = transport ? Transport.Viscosity(liquid, temperature) : double.NaN,
-            VapourViscosity = transport ? Transport.Viscosity(vapour, temperature) : double.NaN,
-            SurfaceTension = transport ? Transport.SurfaceTension(temperature) : double.NaN,
+            Temperature = fluid.Temperature,
+            LiquidDensity = 1 / phases.LiquidVolume,
+            VapourDensity = 1 / phases.VapourVolume,
+            IsentropicExponent = expansion ? SaturationTable.Expansion(pressure).VapourIsentropicExponent : double.NaN,
+            LiquidViscosity = fluid.LiquidViscosity,
+            VapourViscosity = fluid.VapourViscosity,
+            SurfaceTension = fluid.SurfaceTension,
         };
     }
 }

@@ -53,7 +53,7 @@ public sealed partial class QualityMeter
     {
         status = StatusOf(flow, pressure, differential);
         if (status != ReadingStatus.None) return double.NaN;
-        MeterSteam steam = MeterSteam.At(pressure, SolvesWithTransport);
+        MeterSteam steam = MeterSteam.At(pressure, Meter.HasGeometry, Model.NeedsTransport);
         MeterGeometry geometry = Meter.GeometryAt(steam.Temperature);
         QualitySolution solution = SolveQuality(geometry, State(geometry, steam, flow, pressure, differential));
         status = solution.Status;

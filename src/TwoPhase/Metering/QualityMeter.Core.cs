@@ -9,13 +9,10 @@ public sealed partial class QualityMeter
     /// <summary>Highest relative residual of the flow equation at an accepted root.</summary>
     private const double Residual = 1e-12;
 
-    /// <summary>C of the meter needs the viscosities for its Reynolds number, or the model asks for them.</summary>
-    private bool SolvesWithTransport => Meter.CoefficientDependsOnReynolds || Model.NeedsTransport;
-
     /// <summary>A reading with its applicability; <see cref="ReadingStatus.NotSolved"/> in place of an exception. SI, arguments checked.</summary>
     private QualityReading ReadCore(double flow, double pressure, double differential)
     {
-        MeterSteam steam = MeterSteam.At(pressure, SolvesWithTransport || Meter.HasGeometry);
+        MeterSteam steam = MeterSteam.At(pressure, Meter.HasGeometry, Model.NeedsTransport);
         MeterGeometry geometry = Meter.GeometryAt(steam.Temperature);
         MeterState state = State(geometry, steam, flow, pressure, differential);
         QualitySolution solution = SolveQuality(geometry, state);
@@ -41,7 +38,7 @@ public sealed partial class QualityMeter
 
     private double DifferentialCore(double flow, double pressure, double quality)
     {
-        MeterSteam steam = MeterSteam.At(pressure, SolvesWithTransport);
+        MeterSteam steam = MeterSteam.At(pressure, Meter.HasGeometry, Model.NeedsTransport);
         MeterGeometry geometry = Meter.GeometryAt(steam.Temperature);
         MeterState state = WithCoefficient(geometry, State(geometry, steam, flow, pressure, 0), quality);
         double volume = CheckedVolume(state, quality);
@@ -61,7 +58,7 @@ public sealed partial class QualityMeter
 
     private double TotalFlowCore(double pressure, double quality, double differential)
     {
-        MeterSteam steam = MeterSteam.At(pressure, SolvesWithTransport);
+        MeterSteam steam = MeterSteam.At(pressure, Meter.HasGeometry, Model.NeedsTransport);
         MeterGeometry geometry = Meter.GeometryAt(steam.Temperature);
         MeterState state = State(geometry, steam, 0, pressure, differential);
         double root = Fast.Sqrt(2 * differential) * state.Expansibility * geometry.FlowArea;
