@@ -10,18 +10,18 @@ internal static class QuantityText
     public static double Parse(string text, UnitKind kind, UnitBasis basis)
     {
         (double number, string unit) = SplitNumber(text);
-        return UnitText.Map(unit, kind, basis).Si(number);
+        return UnitText.Map(unit, kind, basis).Map(number);
     }
 
     /// <summary>The quantity in a unit, with the fewest digits that read back as the same double; in the plain SI unit where none do.</summary>
     public static string Write(double si, string unit, UnitKind kind, string siUnit)
     {
-        UnitMap map = UnitText.Map(unit, kind, UnitBasis.None);
-        double raw = map.Raw(si);
+        LinearMap map = UnitText.Map(unit, kind, UnitBasis.None);
+        double raw = map.Inverse.Map(si);
         foreach (string format in new[] { "G6", "G10", "G15", "G16", "G17" })
         {
             string number = raw.ToString(format, CultureInfo.InvariantCulture);
-            if (map.Si(double.Parse(number, CultureInfo.InvariantCulture)) == si) return $"{number} {unit}";
+            if (map.Map(double.Parse(number, CultureInfo.InvariantCulture)) == si) return $"{number} {unit}";
         }
 
         return $"{si.ToString("R", CultureInfo.InvariantCulture)} {siUnit}";

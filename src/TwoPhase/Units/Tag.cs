@@ -51,7 +51,7 @@ public sealed class Tag : IEquatable<Tag>
     public override string ToString() => Unit.Length == 0 ? Name : $"{Name} [{Unit}]";
 
     /// <summary>Factor and offset to SI; a fault names the tag.</summary>
-    internal UnitMap Map(UnitKind kind, UnitBasis basis)
+    internal LinearMap Map(UnitKind kind, UnitBasis basis)
     {
         try
         {

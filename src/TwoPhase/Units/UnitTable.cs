@@ -70,14 +70,14 @@ internal static class UnitTable
     /// <summary>The size of a unit, whatever its basis; null when the table does not know the text as this kind.</summary>
     /// <param name="text">The unit's spelling, without spaces and with plain digits.</param>
     /// <param name="kind">The kind that is wanted.</param>
-    public static UnitMap? Find(string text, UnitKind kind)
+    public static LinearMap? Find(string text, UnitKind kind)
     {
         if (kind == UnitKind.Temperature && Direct.TryGetValue(Key(UnitKind.TemperatureDifference, text), out Entry degree) && degree.Spelling != "K")
         {
-            return new UnitMap(degree.Size, degree.Size == 1 ? 273.15 : 459.67 / 1.8);
+            return new LinearMap(degree.Size, degree.Size == 1 ? 273.15 : 459.67 / 1.8);
         }
 
-        if (Direct.TryGetValue(Key(kind, text), out Entry entry)) return new UnitMap(entry.Size);
+        if (Direct.TryGetValue(Key(kind, text), out Entry entry)) return new LinearMap(entry.Size);
         if (Millions(text, kind) is { } millions) return millions;
         int slash = text.LastIndexOf('/');
         if (slash <= 0 || Numerator(kind) is not { } numerator) return null;
@@ -103,12 +103,12 @@ internal static class UnitTable
             : null;
     }
 
-    private static UnitMap? Millions(string text, UnitKind kind)
+    private static LinearMap? Millions(string text, UnitKind kind)
     {
         if (!Spelling.Starts(text, "MM") || text.Length < 4) return null;
         string stem = text[2..];
         bool imperial = Array.Exists(ThousandOrMillion, name => Spelling.Same(name, stem));
-        return imperial && Direct.TryGetValue(Key(kind, stem), out Entry entry) ? new UnitMap(1e6 * entry.Size) : null;
+        return imperial && Direct.TryGetValue(Key(kind, stem), out Entry entry) ? new LinearMap(1e6 * entry.Size) : null;
     }
 
     private static UnitKind? Numerator(UnitKind rate) => rate switch

@@ -16,7 +16,7 @@ internal static class UnitText
     /// <param name="kind">What it must be a unit of.</param>
     /// <param name="basis">What the site agreed; the text wins over it.</param>
     /// <exception cref="FormatException">The text is no unit of this kind, has two meanings, or its basis is nowhere given.</exception>
-    public static UnitMap Map(string text, UnitKind kind, UnitBasis basis)
+    public static LinearMap Map(string text, UnitKind kind, UnitBasis basis)
     {
         string trimmed = Spelling.Plain(text);
         if (trimmed.Length == 0) throw new FormatException("has no unit");
@@ -39,14 +39,14 @@ internal static class UnitText
         };
     }
 
-    private static UnitMap Size(string unit, string text, UnitKind kind) =>
+    private static LinearMap Size(string unit, string text, UnitKind kind) =>
         UnitTable.Find(unit, kind) ?? UnitsNetFallback.Find(unit, kind) ?? throw Unknown(text, kind);
 
-    private static UnitMap AbsolutePressure(string unit, string text, UnitBasis basis)
+    private static LinearMap AbsolutePressure(string unit, string text, UnitBasis basis)
     {
         if (PressureSize(unit, basis) is not null) throw new FormatException($"unit '{text}' does not say whether it is gauge or absolute: write {unit}(g) or {unit}(a)");
         (string stem, char suffix) = Suffix(unit);
-        UnitMap size = PressureSize(stem, basis) ?? UnitsNetFallback.Find(stem, UnitKind.PressureDifference) ?? throw Unknown(text, UnitKind.AbsolutePressure);
+        LinearMap size = PressureSize(stem, basis) ?? UnitsNetFallback.Find(stem, UnitKind.PressureDifference) ?? throw Unknown(text, UnitKind.AbsolutePressure);
         return suffix switch
         {
             'a' => size,
@@ -56,7 +56,7 @@ internal static class UnitText
         };
     }
 
-    private static UnitMap Difference(string unit, string text, UnitBasis basis)
+    private static LinearMap Difference(string unit, string text, UnitBasis basis)
     {
         if (PressureSize(unit, basis) is { } size) return size;
         (string stem, char suffix) = Suffix(unit);
@@ -64,7 +64,7 @@ internal static class UnitText
         return suffix == 'd' ? difference : throw new FormatException($"unit '{text}' has a basis, but a differential has none: is the tag a static pressure?");
     }
 
-    private static UnitMap Flow(string unit, string text, UnitBasis basis)
+    private static LinearMap Flow(string unit, string text, UnitBasis basis)
     {
         if (UnitTable.Find(unit, UnitKind.MassFlow) is { } mass) return mass;
         if (UnitTable.Find(unit, UnitKind.VolumeFlow) is { } volume)
@@ -76,13 +76,13 @@ internal static class UnitText
         return UnitsNetFallback.Find(unit, UnitKind.MassFlow) ?? throw Unknown(text, UnitKind.MassFlow);
     }
 
-    private static UnitMap? PressureSize(string unit, UnitBasis basis) =>
-        UnitTable.WaterColumnMetres(unit) is { } metres ? new UnitMap(metres * UnitTable.PascalsPerMetreOfWater(basis.ColumnTemperature)) : UnitTable.Find(unit, UnitKind.PressureDifference);
+    private static LinearMap? PressureSize(string unit, UnitBasis basis) =>
+        UnitTable.WaterColumnMetres(unit) is { } metres ? new LinearMap(metres * UnitTable.PascalsPerMetreOfWater(basis.ColumnTemperature)) : UnitTable.Find(unit, UnitKind.PressureDifference);
 
-    private static UnitMap OfSpan(string span, UnitKind kind, UnitBasis basis)
+    private static LinearMap OfSpan(string span, UnitKind kind, UnitBasis basis)
     {
         (double low, double high, string unit) = Range(span);
-        UnitMap map = Map(unit, kind, basis);
+        LinearMap map = Map(unit, kind, basis);
         return high > low ? map.PerCentOf(low, high) : throw new FormatException($"span '{span}' ends below its start");
     }
 
@@ -136,7 +136,7 @@ internal static class UnitText
     }
 
     /// <summary>Gas counted at a base state of its own, brought to 15 °C and 101.325 kPa as an ideal gas.</summary>
-    private static UnitMap GasAt(string unit, string text, string[] statements)
+    private static LinearMap GasAt(string unit, string text, string[] statements)
     {
         int slash = Math.Max(unit.LastIndexOf('/'), 0);
         string plain = unit[..slash] switch { "Sm3" or "Nm3" or "stdm3" => "m3", "scf" => "ft3", string other => other };
@@ -152,16 +152,16 @@ internal static class UnitText
         string plain = WithoutSpaces(unit);
         try
         {
-            if (UnitTable.Find(plain, UnitKind.Density) is { } density) return basis.WithBaseDensity(UnitsNet.Density.FromKilogramsPerCubicMeter(density.Si(value)));
+            if (UnitTable.Find(plain, UnitKind.Density) is { } density) return basis.WithBaseDensity(UnitsNet.Density.FromKilogramsPerCubicMeter(density.Map(value)));
             if (UnitTable.Find(plain, UnitKind.Temperature) is { } temperature)
             {
-                var kelvins = UnitsNet.Temperature.FromKelvins(temperature.Si(value));
+                var kelvins = UnitsNet.Temperature.FromKelvins(temperature.Map(value));
                 return basis.WithBaseTemperature(kelvins).WithWaterColumnTemperature(kelvins);
             }
 
             (string stem, char suffix) = Suffix(plain);
-            UnitMap? atmosphere = UnitTable.Find(plain, UnitKind.PressureDifference) ?? (suffix == 'a' ? UnitTable.Find(stem, UnitKind.PressureDifference) : null);
-            if (atmosphere is { } pressure) return basis.WithAtmosphericPressure(UnitsNet.Pressure.FromPascals(pressure.Si(value)));
+            LinearMap? atmosphere = UnitTable.Find(plain, UnitKind.PressureDifference) ?? (suffix == 'a' ? UnitTable.Find(stem, UnitKind.PressureDifference) : null);
+            if (atmosphere is { } pressure) return basis.WithAtmosphericPressure(UnitsNet.Pressure.FromPascals(pressure.Map(value)));
         }
         catch (ArgumentException error)
         {

@@ -7,7 +7,7 @@ namespace TwoPhase.Units;
 /// <summary>Units that our own table does not spell: asked of UnitsNet, in invariant culture, and taken at their size there.</summary>
 internal static class UnitsNetFallback
 {
-    public static UnitMap? Find(string text, UnitKind kind) => kind switch
+    public static LinearMap? Find(string text, UnitKind kind) => kind switch
     {
         UnitKind.PressureDifference => Size<PressureUnit>(text, unit => new Pressure(1, unit).Si()),
         UnitKind.MassFlow => Size<MassFlowUnit>(text, unit => new MassFlow(1, unit).Si()),
@@ -23,7 +23,7 @@ internal static class UnitsNetFallback
         _ => null,
     };
 
-    private static UnitMap? Size<TUnit>(string text, Func<TUnit, double> si)
+    private static LinearMap? Size<TUnit>(string text, Func<TUnit, double> si)
         where TUnit : struct, Enum =>
-        UnitsNet.UnitParser.Default.TryParse(text, CultureInfo.InvariantCulture, out TUnit unit) ? new UnitMap(si(unit)) : null;
+        UnitsNet.UnitParser.Default.TryParse(text, CultureInfo.InvariantCulture, out TUnit unit) ? new LinearMap(si(unit)) : null;
 }

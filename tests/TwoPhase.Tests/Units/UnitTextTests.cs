@@ -19,7 +19,7 @@ public class UnitTextTests
     [InlineData("mbar", 100, 0)]
     [InlineData("mmH2O", 9.80665, 1e-12)]
     public void Map_Differential_MatchesPrintedFactor(string text, double pascals, double tolerance) =>
-        Approx.Relative(pascals, UnitText.Map(text, UnitKind.PressureDifference, UnitBasis.None).Si(1), tolerance);
+        Approx.Relative(pascals, UnitText.Map(text, UnitKind.PressureDifference, UnitBasis.None).Map(1), tolerance);
 
     [Theory]
     [InlineData("kPa(a)", 100, 100e3)]
@@ -38,7 +38,7 @@ public class UnitTextTests
     [InlineData("% of 0 to 16 MPa(g)", 50, 8.093e6)]
     [InlineData("% of 16 MPa(a)", 25, 4e6)]
     public void Map_PressureWithBasis_IsAbsolute(string text, double raw, double pascals) =>
-        Approx.Relative(pascals, UnitText.Map(text, UnitKind.AbsolutePressure, Site).Si(raw), 1e-12);
+        Approx.Relative(pascals, UnitText.Map(text, UnitKind.AbsolutePressure, Site).Map(raw), 1e-12);
 
     [Theory]
     [InlineData("kg/s", 1)]
@@ -55,7 +55,7 @@ public class UnitTextTests
     [InlineData("% of 6 kg/s", 0.06)]
     [InlineData("% of 20 m3/h at 1000 kg/m3", 0.2 * 1000 / 3600.0)]
     public void Map_WaterFlow_IsMassFlow(string text, double kilogramsPerSecond) =>
-        Approx.Relative(kilogramsPerSecond, UnitText.Map(text, UnitKind.MassFlow, UnitBasis.None).Si(1), 1e-12);
+        Approx.Relative(kilogramsPerSecond, UnitText.Map(text, UnitKind.MassFlow, UnitBasis.None).Map(1), 1e-12);
 
     // Density of air-free water at 101.325 kPa: 999.1026 kg/m³ at 15 °C, 998.2067 at 20 °C, 999.975 at 4 °C (Tanaka et al. 2001, table; to 0.001).
     [Theory]
@@ -63,7 +63,7 @@ public class UnitTextTests
     [InlineData("m3/d at 20 degC", 998.2067)]
     [InlineData("m3/d(4C)", 999.9750)]
     public void Map_ColdWater_TakesDensityOfItsTemperature(string text, double density) =>
-        Approx.Relative(density / 86400, UnitText.Map(text, UnitKind.MassFlow, UnitBasis.None).Si(1), 1e-6);
+        Approx.Relative(density / 86400, UnitText.Map(text, UnitKind.MassFlow, UnitBasis.None).Map(1), 1e-6);
 
     [Theory]
     [InlineData("C", 100, 373.15)]
@@ -73,7 +73,7 @@ public class UnitTextTests
     [InlineData("degF", 32, 273.15)]
     [InlineData("K", 300, 300)]
     public void Map_Temperature_IsKelvin(string text, double raw, double kelvins) =>
-        Approx.Absolute(kelvins, UnitText.Map(text, UnitKind.Temperature, UnitBasis.None).Si(raw), 1e-10);
+        Approx.Absolute(kelvins, UnitText.Map(text, UnitKind.Temperature, UnitBasis.None).Map(raw), 1e-10);
 
     // ISO 13443: 15 °C, 101.325 kPa. DIN 1343: 0 °C. 1 scf (60 °F, 101.325 kPa) is 0.3048³ m³ · 288.15 / 288.70556.
     [Theory]
@@ -83,7 +83,7 @@ public class UnitTextTests
     [InlineData("m3/h at 0 degC and 101.325 kPa(a)", 1.0549149)]
     [InlineData("scf/h at 60 degF and 14.73 psia", 0.02832784)]
     public void Map_StandardGas_IsCountedAtFifteenDegrees(string text, double cubicMetresPerHour) =>
-        Approx.Relative(cubicMetresPerHour / 3600, UnitText.Map(text, UnitKind.StandardGasFlow, UnitBasis.None).Si(1), 2e-6);
+        Approx.Relative(cubicMetresPerHour / 3600, UnitText.Map(text, UnitKind.StandardGasFlow, UnitBasis.None).Map(1), 2e-6);
 
     [Theory]
     [InlineData("MMBtu/h", UnitKind.Power, 293071.07)]   // 1 Btu(IT)/h = 0.29307107 W, NIST SP 811 B.8
@@ -98,7 +98,7 @@ public class UnitTextTests
     [InlineData("W/(m·K)", UnitKind.ThermalConductivity, 1)]
     [InlineData("yd", UnitKind.Length, 0.9144)]          // UnitsNet's own spelling
     internal void Map_OtherKinds_HaveTheirSize(string text, UnitKind kind, double si) =>
-        Approx.Relative(si, UnitText.Map(text, kind, UnitBasis.None).Si(1), 1e-8);
+        Approx.Relative(si, UnitText.Map(text, kind, UnitBasis.None).Map(1), 1e-8);
 
     [Theory]
     [InlineData("Mlb/h", UnitKind.MassFlow, "klb", "MMlb")]
@@ -148,8 +148,8 @@ public class UnitTextTests
     public void Map_SiteBasis_CompletesTexts()
     {
         UnitBasis basis = Site.WithBaseDensity(Density.FromKilogramsPerCubicMeter(998)).WithWaterColumnTemperature(Temperature.FromDegreesCelsius(20));
-        Approx.Relative(998.0 / 3600, UnitText.Map("m3/h", UnitKind.MassFlow, basis).Si(1), 1e-15);
-        Approx.Relative(998.2067 * 9.80665 * 0.0254, UnitText.Map("inH2O", UnitKind.PressureDifference, basis).Si(1), 1e-6);
-        Approx.Relative(999.1026 / 3600, UnitText.Map("m3/h at 15 degC", UnitKind.MassFlow, basis).Si(1), 1e-6);
+        Approx.Relative(998.0 / 3600, UnitText.Map("m3/h", UnitKind.MassFlow, basis).Map(1), 1e-15);
+        Approx.Relative(998.2067 * 9.80665 * 0.0254, UnitText.Map("inH2O", UnitKind.PressureDifference, basis).Map(1), 1e-6);
+        Approx.Relative(999.1026 / 3600, UnitText.Map("m3/h at 15 degC", UnitKind.MassFlow, basis).Map(1), 1e-6);
     }
 }
