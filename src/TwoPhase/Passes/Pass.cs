@@ -11,15 +11,14 @@ public sealed partial class Pass
 
     /// <summary>A pass from its sections.</summary>
     /// <param name="name">Name of the pass.</param>
-    /// <param name="sections">The sections from inlet to outlet, at least one, each with its own name.</param>
+    /// <param name="sections">The sections from inlet to outlet, each with its own name; none when only the readings of the pass are wanted.</param>
     /// <param name="heatAtFullFiring">Heat absorbed at 100 % firing, where it is known.</param>
-    /// <exception cref="ArgumentException">There is no section, or two share a name.</exception>
+    /// <exception cref="ArgumentException">Two sections share a name.</exception>
     /// <exception cref="ArgumentOutOfRangeException">The heat is not greater than zero.</exception>
     public Pass(string name, IEnumerable<TubeSection> sections, Power? heatAtFullFiring = null)
     {
         Name = string.IsNullOrWhiteSpace(name) ? throw new ArgumentException("A pass needs a name.", nameof(name)) : name;
         _sections = [.. Require.NotNull(sections, nameof(sections))];
-        if (_sections.Length == 0) throw new ArgumentException($"Pass '{name}' has no section.", nameof(sections));
         if (_sections.GroupBy(section => section.Name).FirstOrDefault(group => group.Count() > 1) is { } twice) throw new ArgumentException($"Pass '{name}' has two sections named '{twice.Key}'.", nameof(sections));
         if (heatAtFullFiring is { } heat) Require.Positive(heat.Si(), $"Heat at full firing of pass '{name}'", Scale.Megawatts, nameof(heatAtFullFiring));
         HeatAtFullFiring = heatAtFullFiring;
@@ -46,7 +45,7 @@ public sealed partial class Pass
     public FeedInterchanger? Interchanger { get; private set; }
 
     /// <summary>Length of the flow path, outlet line included.</summary>
-    public Length FlowLength => Length.FromMeters(Ducts[^1].End);
+    public Length FlowLength => Length.FromMeters(Ducts.Length == 0 ? 0 : Ducts[^1].End);
 
     /// <summary>Water-side volume, outlet line included.</summary>
     public Volume WaterVolume => Volume.FromCubicMeters(Ducts.Sum(duct => duct.Area * duct.Length));

@@ -3,7 +3,7 @@ using TwoPhase.Units;
 namespace TwoPhase.Passes;
 
 /// <summary>A once-through steam generator: parallel passes in one fire.</summary>
-public sealed class SteamGenerator
+public sealed partial class SteamGenerator
 {
     private readonly Pass[] _passes;
 
