@@ -24,7 +24,7 @@ public abstract partial class CriticalQualityModel
     public CriticalQuality Critical(in TwoPhaseFlow flow, HeatFlux heatFlux)
     {
         FlowState state = flow.State;
-        double q = Checked(heatFlux);
+        double q = CheckedFlux(heatFlux);
         double mean = MeanCore(state, q);
         return new(mean, SpreadCore(state, mean), CheckCore(state, q));
     }
@@ -33,7 +33,7 @@ public abstract partial class CriticalQualityModel
     /// <param name="flow">The flow.</param>
     /// <param name="heatFlux">Heat flux q at the inside surface, into the flow; greater than zero.</param>
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="heatFlux"/> is not greater than zero.</exception>
-    public Applicability Check(in TwoPhaseFlow flow, HeatFlux heatFlux) => CheckCore(flow.State, Checked(heatFlux));
+    public Applicability Check(in TwoPhaseFlow flow, HeatFlux heatFlux) => CheckCore(flow.State, CheckedFlux(heatFlux));
 
     /// <summary>
     /// Mean critical quality [kg/kg] of the perimeter for a raw flow; SI in, arguments trusted, no allocation. Above 1 when the
@@ -56,6 +56,5 @@ public abstract partial class CriticalQualityModel
     /// <summary>The name.</summary>
     public override string ToString() => Name;
 
-    private static double Checked(HeatFlux heatFlux) =>
-        Require.Positive(heatFlux.Si(), "Heat flux q", Scale.KilowattsPerSquareMetre, nameof(heatFlux));
+    private static double CheckedFlux(HeatFlux heatFlux) => InsideHeatFlux.Positive(heatFlux, nameof(heatFlux));
 }

@@ -8,6 +8,6 @@ public abstract partial class FilmModel
     // A class of its own: the statics of a partial class over several files are initialised in no stated order.
     private static class Catalogue
     {
-        public static readonly IReadOnlyList<FilmModel> Models = [GungorWinterton1986];
+        public static readonly IReadOnlyList<FilmModel> Models = [Chen, GungorWinterton1986, GungorWinterton1987, SteinerTaborek, DougallRohsenow];
     }
 }

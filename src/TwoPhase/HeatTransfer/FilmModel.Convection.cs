@@ -11,8 +11,11 @@ public abstract partial class FilmModel
     private const double CriticalPressure = 22.064e6;   // Pa
     private const double MolarMass = 18.015268;         // kg/kmol
 
-    /// <summary>1 − x, kept a little above zero: at dry steam the correlations read 0 · ∞.</summary>
-    private static double LiquidShare(in FlowState flow) => Math.Max(1 - flow.Quality, 1e-9);
+    /// <summary>1 − x, kept above zero, where the correlations read 0 · ∞; so small that the limit is reached.</summary>
+    private static double LiquidShare(in FlowState flow) => Math.Max(1 - flow.Quality, 1e-100);
+
+    /// <summary>x + (1 − x) ρg/ρl: homogeneous volume flow over that of the vapour density [-].</summary>
+    private static double VapourShare(in FlowState flow) => flow.Quality + ((1 - flow.Quality) * (flow.VapourDensity / flow.LiquidDensity));
 
     /// <summary>1/Xtt = (x/(1 − x))^0.9 (ρl/ρg)^0.5 (μg/μl)^0.1 [-].</summary>
     private static double InverseMartinelli(in FlowState flow, double liquidShare) =>
@@ -31,6 +34,13 @@ public abstract partial class FilmModel
 
     /// <summary>Fr^(0.1 − 2 Fr) [-], Gungor and Winterton's factor of the convective term below Fr = 0.05.</summary>
     private static double HorizontalFactor(double froude) => Math.Pow(froude, 0.1 - (2 * froude));
+
+    /// <summary>The range of Gungor and Winterton's data bank.</summary>
+    private static Applicability GungorWintertonRange(in FlowState flow, double heatFlux) => Applicability.Inside
+        .Check(ApplicabilityLimits.Bore, flow.Bore, 0.00295, 0.032)
+        .Check(ApplicabilityLimits.Pressure, flow.Pressure, 0.08e6, 20.3e6)
+        .Check(ApplicabilityLimits.MassFlux, flow.MassFlux, 12.4, 61518)
+        .Check(ApplicabilityLimits.HeatFlux, heatFlux, 350, 9.534e6);
 
     /// <summary>The larger of h and Dittus-Boelter for all the flow as vapour, to which a wet-wall formula must hand over at x = 1.</summary>
     private static double NotBelowDrySteam(in FlowState flow, double h) =>

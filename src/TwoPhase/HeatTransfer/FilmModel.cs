@@ -23,7 +23,7 @@ public abstract partial class FilmModel
     /// <param name="heatFlux">Heat flux q at the inside surface, into the flow; zero or more.</param>
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="heatFlux"/> is negative.</exception>
     public HeatTransferCoefficient Coefficient(in TwoPhaseFlow flow, HeatFlux heatFlux) =>
-        HeatTransferCoefficient.FromWattsPerSquareMeterKelvin(CoefficientCore(flow.State, Checked(heatFlux)));
+        HeatTransferCoefficient.FromWattsPerSquareMeterKelvin(CoefficientCore(flow.State, CheckedFlux(heatFlux)));
 
     /// <summary>Tw, temperature of the wetted inside surface: Ts + q/h.</summary>
     /// <param name="flow">The flow.</param>
@@ -32,7 +32,7 @@ public abstract partial class FilmModel
     public Temperature SurfaceTemperature(in TwoPhaseFlow flow, HeatFlux heatFlux)
     {
         FlowState state = flow.State;
-        double q = Checked(heatFlux);
+        double q = CheckedFlux(heatFlux);
         return Temperature.FromKelvins(state.SaturationTemperature + (q / CoefficientCore(state, q)));
     }
 
@@ -40,7 +40,7 @@ public abstract partial class FilmModel
     /// <param name="flow">The flow.</param>
     /// <param name="heatFlux">Heat flux q at the inside surface, into the flow; zero or more.</param>
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="heatFlux"/> is negative.</exception>
-    public Applicability Check(in TwoPhaseFlow flow, HeatFlux heatFlux) => CheckCore(flow.State, Checked(heatFlux));
+    public Applicability Check(in TwoPhaseFlow flow, HeatFlux heatFlux) => CheckCore(flow.State, CheckedFlux(heatFlux));
 
     /// <summary>h [W/(m²·K)] for a raw flow; SI in, arguments trusted, no allocation, greater than zero.</summary>
     /// <param name="flow">The flow in SI units.</param>
@@ -55,6 +55,5 @@ public abstract partial class FilmModel
     /// <summary>The name.</summary>
     public override string ToString() => Name;
 
-    private static double Checked(HeatFlux heatFlux) =>
-        Require.NotNegative(heatFlux.Si(), "Heat flux q", Scale.KilowattsPerSquareMetre, nameof(heatFlux));
+    private static double CheckedFlux(HeatFlux heatFlux) => InsideHeatFlux.NotNegative(heatFlux, nameof(heatFlux));
 }

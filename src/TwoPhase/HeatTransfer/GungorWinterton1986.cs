@@ -39,16 +39,13 @@ public abstract partial class FilmModel
             return NotBelowDrySteam(flow, h);
         }
 
-        protected internal override Applicability CheckCore(in FlowState flow, double heatFlux) => Applicability.Inside
-            .Check(ApplicabilityLimits.Bore, flow.Bore, 0.00295, 0.032)
-            .Check(ApplicabilityLimits.Pressure, flow.Pressure, 0.08e6, 20.3e6)
-            .Check(ApplicabilityLimits.MassFlux, flow.MassFlux, 12.4, 61518)
-            .Check(ApplicabilityLimits.HeatFlux, heatFlux, 350, 9.534e6);
+        protected internal override Applicability CheckCore(in FlowState flow, double heatFlux) => GungorWintertonRange(flow, heatFlux);
+    }
 
-        private static double CooperPoolBoiling(double pressure, double heatFlux)
-        {
-            double reduced = pressure / CriticalPressure;
-            return 55 / Math.Sqrt(MolarMass) * Math.Exp((0.12 * Math.Log(reduced)) - (0.55 * Math.Log(-Math.Log10(reduced)))) * Math.Pow(heatFlux, 0.67);
-        }
+    /// <summary>Cooper's pool boiling of water at 1 µm roughness [W/(m²·K)].</summary>
+    internal static double CooperPoolBoiling(double pressure, double heatFlux)
+    {
+        double reduced = pressure / CriticalPressure;
+        return 55 / Math.Sqrt(MolarMass) * Math.Exp((0.12 * Math.Log(reduced)) - (0.55 * Math.Log(-Math.Log10(reduced)))) * Math.Pow(heatFlux, 0.67);
     }
 }

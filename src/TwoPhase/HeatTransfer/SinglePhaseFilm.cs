@@ -11,11 +11,7 @@ public static partial class SinglePhaseFilm
         MassFlux massFlux, Length bore, DynamicViscosity viscosity, ThermalConductivity conductivity, SpecificEntropy heatCapacity) => new(
         Require.Positive(massFlux.Si(), "Mass flux G", Scale.KilogramsPerSquareMetreSecond, nameof(massFlux)),
         Require.Positive(bore.Si(), "Bore D", Scale.Millimetres, nameof(bore)),
-        Require.Positive(viscosity.Si(), "Viscosity μ", PascalSeconds, nameof(viscosity)),
-        Require.Positive(conductivity.Si(), "Conductivity k", WattsPerMetreKelvin, nameof(conductivity)),
+        Require.Positive(viscosity.Si(), "Viscosity μ", Scale.PascalSeconds, nameof(viscosity)),
+        Require.Positive(conductivity.Si(), "Conductivity k", Scale.WattsPerMetreKelvin, nameof(conductivity)),
         Require.Positive(heatCapacity.Si(), "Heat capacity cp", Scale.KilojoulesPerKilogramKelvin, nameof(heatCapacity)));
-
-    private static Scale PascalSeconds => new("Pa·s", 1);
-
-    private static Scale WattsPerMetreKelvin => new("W/(m·K)", 1);
 }

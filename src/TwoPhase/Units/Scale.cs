@@ -21,6 +21,9 @@ internal readonly struct Scale
     public static readonly Scale SquareMillimetres = new("mm²", 1e6);
     public static readonly Scale Megawatts = new("MW", 1e-6);
     public static readonly Scale KilowattsPerSquareMetre = new("kW/m²", 1e-3);
+    public static readonly Scale WattsPerSquareMetreKelvin = new("W/(m²·K)", 1);
+    public static readonly Scale WattsPerMetreKelvin = new("W/(m·K)", 1);
+    public static readonly Scale PascalSeconds = new("Pa·s", 1);
     public static readonly Scale Seconds = new("s", 1);
     public static readonly Scale Degrees = new("°", 180 / Math.PI);
 
