@@ -32,13 +32,15 @@ public abstract partial class VoidFractionModel
         protected internal override double VoidFractionCore(in FlowState flow)
         {
             double vapour = flow.Quality / flow.VapourDensity, liquid = (1 - flow.Quality) / flow.LiquidDensity;
-            return vapour / ((distribution.Core(flow) * (vapour + liquid)) + (drift.Core(flow) / flow.MassFlux));
+
+            // Without vapour C0 and Vgj may both be 0 (Dix at the critical point).
+            return vapour > 0 ? vapour / ((distribution.Core(flow) * (vapour + liquid)) + (drift.Core(flow) / flow.MassFlux)) : 0;
         }
 
+        // S = [(C0 − 1) jg + C0 jl + Vgj] / jl: the same as from α, but without 1 − α.
         protected internal override double SlipRatioCore(in FlowState flow)
         {
-            // S = [(C0 − 1) jg + C0 jl + Vgj] / jl, the same as from α but without 1 − α; a little inside where jl vanishes.
-            FlowState inside = flow with { Quality = Math.Min(flow.Quality, 1 - NearEnd) };
+            FlowState inside = InsideTheEnds(flow, 0);
             double vapour = inside.Quality / flow.VapourDensity, liquid = (1 - inside.Quality) / flow.LiquidDensity;
             double c0 = distribution.Core(inside);
             return c0 + ((((c0 - 1) * vapour) + (drift.Core(inside) / flow.MassFlux)) / liquid);

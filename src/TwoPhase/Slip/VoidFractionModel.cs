@@ -10,9 +10,6 @@ namespace TwoPhase.Slip;
 /// </remarks>
 public abstract partial class VoidFractionModel
 {
-    // How far inside x = 1 the slip ratio is taken for its limit there: half the digits of 1 − α remain.
-    private const double NearEnd = 1e-7;
-
     /// <summary>The name of the model, as the trade cites it.</summary>
     public abstract string Name { get; }
 
@@ -40,9 +37,8 @@ public abstract partial class VoidFractionModel
     /// <param name="flow">The flow in SI units.</param>
     protected internal virtual double SlipRatioCore(in FlowState flow)
     {
-        // One phase vanishes at the ends and 0/0 with it: evaluate a little inside, where the ratio has its limit.
-        double x = Math.Min(Math.Max(flow.Quality, 1e-9), 1 - NearEnd);
-        double alpha = VoidFractionCore(flow with { Quality = x });
+        FlowState inside = InsideTheEnds(flow, 1e-9);
+        double x = inside.Quality, alpha = VoidFractionCore(inside);
         return x / (1 - x) * (flow.LiquidDensity / flow.VapourDensity) * ((1 - alpha) / alpha);
     }
 
@@ -55,6 +51,15 @@ public abstract partial class VoidFractionModel
     /// <param name="slip">S, slip ratio [-].</param>
     protected static double VoidFractionFromSlip(in FlowState flow, double slip) =>
         flow.Quality / (flow.Quality + (slip * (1 - flow.Quality) * (flow.VapourDensity / flow.LiquidDensity)));
+
+    // At an end one phase vanishes and the slip ratio is 0/0: a little inside it has its limit. Not at x = 1 where the model leaves
+    // liquid standing: that liquid does not move, and the ratio is infinite. Half the digits of 1 − α remain at 1e-7.
+    private FlowState InsideTheEnds(in FlowState flow, double nearLiquid)
+    {
+        const double nearVapour = 1e-7;
+        if (flow.Quality < nearLiquid) return flow with { Quality = nearLiquid };
+        return flow.Quality > 1 - nearVapour && VoidFractionCore(flow with { Quality = 1 }) >= 1 ? flow with { Quality = 1 - nearVapour } : flow;
+    }
 
     /// <summary>The name.</summary>
     public override string ToString() => Name;
