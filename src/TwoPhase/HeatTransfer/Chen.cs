@@ -26,7 +26,7 @@ public abstract partial class FilmModel
         {
             double wet = LiquidShare(flow);
             SinglePhase liquid = SinglePhase.Liquid(flow, flow.MassFlux * wet);
-            double enhancement = ChenEnhancement(InverseMartinelli(flow, wet));
+            double enhancement = ChenEnhancement(Math.Exp(LogInverseMartinelli(flow, wet)));
             double suppression = ChenSuppression(liquid.Reynolds * Math.Pow(enhancement, 1.25));
             double convective = enhancement * SinglePhaseFilm.DittusBoelterCore(liquid);
             double h = heatFlux > 0
@@ -45,21 +45,22 @@ public abstract partial class FilmModel
         {
             double saturation = flow.SaturationTemperature;
             double slope = flow.LatentHeat / (saturation * ((1 / flow.VapourDensity) - (1 / flow.LiquidDensity)));   // dp/dT [Pa/K]
-            double scale = saturation * saturation * slope / flow.Pressure;   // ln(psat/p) = scale (1/Ts − 1/Tw)
+            double scale = saturation * slope / flow.Pressure;   // ln(psat/p) = scale ΔT/Tw
 
-            // Each term alone, with Δp linear, needs more superheat than both: the smaller of the two is close above the root.
-            double superheat = Math.Min(heatFlux / b, Math.Pow(heatFlux / (a * Math.Pow(slope, 0.75)), 1 / 1.99));
+            // With Δp linear and ΔT^1.99 taken as ΔT², a quadratic: within a per cent or so of the root.
+            double square = a * Math.Exp(0.75 * Math.Log(slope));
+            double superheat = 2 * heatFlux / (b + Math.Sqrt((b * b) + (4 * square * heatFlux)));
             for (int i = 0; i < 20; i++)
             {
                 double wall = saturation + superheat;
-                double half = Math.Tanh(scale * superheat / (saturation * wall) / 2);   // exp(u) − 1 = 2 tanh(u/2) / (1 − tanh(u/2)), good at small u
+                double half = Math.Tanh(0.5 * scale * superheat / wall);   // exp(u) − 1 = 2 tanh(u/2) / (1 − tanh(u/2)), good at small u
                 double rise = flow.Pressure * 2 * half / (1 - half);
-                double nucleate = a * Math.Pow(superheat, 1.24) * Math.Pow(rise, 0.75);
+                double nucleate = a * Math.Exp((1.24 * Math.Log(superheat)) + (0.75 * Math.Log(rise)));
                 double total = nucleate + (b * superheat);
-                double riseSlope = (flow.Pressure + rise) * scale / (wall * wall) * superheat / rise;   // dlnΔp/dlnΔT
+                double riseSlope = (flow.Pressure + rise) * scale * saturation / (wall * wall) * superheat / rise;   // dlnΔp/dlnΔT
                 double step = Math.Log(heatFlux / total) * total / ((nucleate * (1.24 + (0.75 * riseSlope))) + (b * superheat));
                 superheat *= Math.Exp(step);
-                if (Math.Abs(step) < 1e-7) break;   // quadratic: the next step would be 1e-14
+                if (Math.Abs(step) < 1e-6) break;   // quadratic, and nearly straight: the next step would be 1e-13 or less
             }
 
             return superheat;

@@ -1,4 +1,5 @@
 using TwoPhase.Flow;
+using TwoPhase.Steam;
 using UnitsNet;
 
 namespace TwoPhase.HeatTransfer;
@@ -13,23 +14,23 @@ public static partial class SinglePhaseFilm
     /// <para>Accuracy: about 25 %.</para>
     /// <para>Source: Dittus and Boelter, Univ. Calif. Publ. Eng. 2, 443-461 (1930); Incropera and DeWitt, Fundamentals of Heat and Mass Transfer, section 8.5.</para>
     /// </remarks>
+    /// <param name="state">Water or steam in the bulk, outside the dome.</param>
     /// <param name="massFlux">Mass flux G, greater than zero.</param>
     /// <param name="bore">Bore D, greater than zero.</param>
-    /// <param name="viscosity">Dynamic viscosity μ of the fluid in the bulk.</param>
-    /// <param name="conductivity">Thermal conductivity k of the fluid in the bulk.</param>
-    /// <param name="heatCapacity">Isobaric heat capacity cp of the fluid in the bulk.</param>
-    /// <exception cref="ArgumentOutOfRangeException">An argument is not greater than zero.</exception>
-    public static HeatTransferCoefficient DittusBoelter(
-        MassFlux massFlux, Length bore, DynamicViscosity viscosity, ThermalConductivity conductivity, SpecificEntropy heatCapacity) =>
-        HeatTransferCoefficient.FromWattsPerSquareMeterKelvin(DittusBoelterCore(Checked(massFlux, bore, viscosity, conductivity, heatCapacity)));
+    /// <exception cref="ArgumentException"><paramref name="state"/> is wet steam.</exception>
+    /// <exception cref="ArgumentOutOfRangeException"><paramref name="massFlux"/> or <paramref name="bore"/> is not greater than zero.</exception>
+    public static HeatTransferCoefficient DittusBoelter(in SteamState state, MassFlux massFlux, Length bore) =>
+        HeatTransferCoefficient.FromWattsPerSquareMeterKelvin(DittusBoelterCore(Alone(state, massFlux, bore)));
 
     /// <summary>Whether Reynolds and Prandtl number lie inside the published range of <see cref="DittusBoelter"/>.</summary>
-    /// <inheritdoc cref="DittusBoelter" path="/param"/>
-    /// <inheritdoc cref="DittusBoelter" path="/exception"/>
-    public static Applicability CheckDittusBoelter(
-        MassFlux massFlux, Length bore, DynamicViscosity viscosity, ThermalConductivity conductivity, SpecificEntropy heatCapacity)
+    /// <param name="state">Water or steam in the bulk, outside the dome.</param>
+    /// <param name="massFlux">Mass flux G, greater than zero.</param>
+    /// <param name="bore">Bore D, greater than zero.</param>
+    /// <exception cref="ArgumentException"><paramref name="state"/> is wet steam.</exception>
+    /// <exception cref="ArgumentOutOfRangeException"><paramref name="massFlux"/> or <paramref name="bore"/> is not greater than zero.</exception>
+    public static Applicability CheckDittusBoelter(in SteamState state, MassFlux massFlux, Length bore)
     {
-        SinglePhase phase = Checked(massFlux, bore, viscosity, conductivity, heatCapacity);
+        SinglePhase phase = Alone(state, massFlux, bore);
         return Applicability.Inside
             .Check(ApplicabilityLimits.Reynolds, phase.Reynolds, 1e4, double.PositiveInfinity)
             .Check(ApplicabilityLimits.Prandtl, phase.Prandtl, 0.7, 160);

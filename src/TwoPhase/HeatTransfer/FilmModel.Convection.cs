@@ -1,5 +1,5 @@
 using TwoPhase.Flow;
-using TwoPhase.Numerics;
+using TwoPhase.Steam;
 using TwoPhase.Units;
 
 namespace TwoPhase.HeatTransfer;
@@ -7,9 +7,8 @@ namespace TwoPhase.HeatTransfer;
 // What several flow-boiling correlations share.
 public abstract partial class FilmModel
 {
-    // Water: IAPWS R2-83(1992) and IAPWS R6-95(2018).
-    private const double CriticalPressure = 22.064e6;   // Pa
-    private const double MolarMass = 18.015268;         // kg/kmol
+    // M of water: IAPWS R6-95(2018).
+    private const double MolarMass = 18.015268;   // kg/kmol
 
     /// <summary>1 − x, kept above zero, where the correlations read 0 · ∞; so small that the limit is reached.</summary>
     private static double LiquidShare(in FlowState flow) => Math.Max(1 - flow.Quality, 1e-100);
@@ -17,10 +16,12 @@ public abstract partial class FilmModel
     /// <summary>x + (1 − x) ρg/ρl: homogeneous volume flow over that of the vapour density [-].</summary>
     private static double VapourShare(in FlowState flow) => flow.Quality + ((1 - flow.Quality) * (flow.VapourDensity / flow.LiquidDensity));
 
-    /// <summary>1/Xtt = (x/(1 − x))^0.9 (ρl/ρg)^0.5 (μg/μl)^0.1 [-].</summary>
-    private static double InverseMartinelli(in FlowState flow, double liquidShare) =>
-        Fast.Sqrt(flow.LiquidDensity / flow.VapourDensity)
-        * Math.Exp((0.9 * Math.Log(flow.Quality / liquidShare)) + (0.1 * Math.Log(flow.VapourViscosity / flow.LiquidViscosity)));
+    /// <summary>ln(1/Xtt), 1/Xtt = (x/(1 − x))^0.9 (ρl/ρg)^0.5 (μg/μl)^0.1; minus infinity at x = 0.</summary>
+    private static double LogInverseMartinelli(in FlowState flow, double liquidShare)
+    {
+        double ratio = flow.LiquidDensity / flow.VapourDensity, square = ratio * ratio;
+        return (0.9 * Math.Log(flow.Quality / liquidShare)) + (0.1 * Math.Log(square * square * ratio * flow.VapourViscosity / flow.LiquidViscosity));
+    }
 
     /// <summary>Fr = G²/(ρl² g D) [-], all the flow as liquid.</summary>
     private static double LiquidFroude(in FlowState flow)

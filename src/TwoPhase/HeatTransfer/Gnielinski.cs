@@ -1,5 +1,6 @@
 using TwoPhase.Flow;
 using TwoPhase.Numerics;
+using TwoPhase.Steam;
 using UnitsNet;
 
 namespace TwoPhase.HeatTransfer;
@@ -16,23 +17,23 @@ public static partial class SinglePhaseFilm
     /// <para>Accuracy: about 10 % for Re ≥ 10⁴.</para>
     /// <para>Source: Gnielinski, Int. Chem. Eng. 16(2), 359-368 (1976); transition: Gnielinski, Int. J. Heat Mass Transfer 63, 134-140 (2013).</para>
     /// </remarks>
+    /// <param name="state">Water or steam in the bulk, outside the dome.</param>
     /// <param name="massFlux">Mass flux G, greater than zero.</param>
     /// <param name="bore">Bore D, greater than zero.</param>
-    /// <param name="viscosity">Dynamic viscosity μ of the fluid in the bulk.</param>
-    /// <param name="conductivity">Thermal conductivity k of the fluid in the bulk.</param>
-    /// <param name="heatCapacity">Isobaric heat capacity cp of the fluid in the bulk.</param>
-    /// <exception cref="ArgumentOutOfRangeException">An argument is not greater than zero.</exception>
-    public static HeatTransferCoefficient Gnielinski(
-        MassFlux massFlux, Length bore, DynamicViscosity viscosity, ThermalConductivity conductivity, SpecificEntropy heatCapacity) =>
-        HeatTransferCoefficient.FromWattsPerSquareMeterKelvin(GnielinskiCore(Checked(massFlux, bore, viscosity, conductivity, heatCapacity)));
+    /// <exception cref="ArgumentException"><paramref name="state"/> is wet steam.</exception>
+    /// <exception cref="ArgumentOutOfRangeException"><paramref name="massFlux"/> or <paramref name="bore"/> is not greater than zero.</exception>
+    public static HeatTransferCoefficient Gnielinski(in SteamState state, MassFlux massFlux, Length bore) =>
+        HeatTransferCoefficient.FromWattsPerSquareMeterKelvin(GnielinskiCore(Alone(state, massFlux, bore)));
 
     /// <summary>Whether Reynolds and Prandtl number lie inside the published range of <see cref="Gnielinski"/>.</summary>
-    /// <inheritdoc cref="Gnielinski" path="/param"/>
-    /// <inheritdoc cref="Gnielinski" path="/exception"/>
-    public static Applicability CheckGnielinski(
-        MassFlux massFlux, Length bore, DynamicViscosity viscosity, ThermalConductivity conductivity, SpecificEntropy heatCapacity)
+    /// <param name="state">Water or steam in the bulk, outside the dome.</param>
+    /// <param name="massFlux">Mass flux G, greater than zero.</param>
+    /// <param name="bore">Bore D, greater than zero.</param>
+    /// <exception cref="ArgumentException"><paramref name="state"/> is wet steam.</exception>
+    /// <exception cref="ArgumentOutOfRangeException"><paramref name="massFlux"/> or <paramref name="bore"/> is not greater than zero.</exception>
+    public static Applicability CheckGnielinski(in SteamState state, MassFlux massFlux, Length bore)
     {
-        SinglePhase phase = Checked(massFlux, bore, viscosity, conductivity, heatCapacity);
+        SinglePhase phase = Alone(state, massFlux, bore);
         return Applicability.Inside
             .Check(ApplicabilityLimits.Reynolds, phase.Reynolds, TurbulentFrom, 5e6)
             .Check(ApplicabilityLimits.Prandtl, phase.Prandtl, 0.5, 2000);
@@ -52,7 +53,7 @@ public static partial class SinglePhaseFilm
     private static double TurbulentNusselt(double reynolds, double prandtl)
     {
         double root = Math.Sqrt(1.0 / 8) / ((1.82 * Math.Log10(reynolds)) - 1.64);   // √(f/8)
-        double prandtlThird = Fast.Cbrt(prandtl);
-        return root * root * (reynolds - 1000) * prandtl / (1 + (12.7 * root * ((prandtlThird * prandtlThird) - 1)));
+        double prandtlTwoThirds = Math.Exp(2.0 / 3 * Math.Log(prandtl));
+        return root * root * (reynolds - 1000) * prandtl / (1 + (12.7 * root * (prandtlTwoThirds - 1)));
     }
 }

@@ -1,4 +1,5 @@
 using TwoPhase.Flow;
+using TwoPhase.Steam;
 
 namespace TwoPhase.HeatTransfer;
 
@@ -26,8 +27,10 @@ public abstract partial class FilmModel
         {
             double wet = LiquidShare(flow);
             SinglePhase liquid = SinglePhase.Liquid(flow, flow.MassFlux * wet);
-            double enhancement = 1 + (24000 * Math.Pow(heatFlux / (flow.MassFlux * flow.LatentHeat), 1.16)) + (1.37 * Math.Pow(InverseMartinelli(flow, wet), 0.86));
-            double suppression = 1 / (1 + (1.15e-6 * enhancement * enhancement * Math.Pow(liquid.Reynolds, 1.17)));
+            double enhancement = 1
+                + (24000 * Math.Exp(1.16 * Math.Log(heatFlux / (flow.MassFlux * flow.LatentHeat))))
+                + (1.37 * Math.Exp(0.86 * LogInverseMartinelli(flow, wet)));
+            double suppression = 1 / (1 + (1.15e-6 * enhancement * enhancement * Math.Exp(1.17 * Math.Log(liquid.Reynolds))));
             double froude = LiquidFroude(flow);
             if (StratifiesAt(flow, froude))
             {
@@ -45,7 +48,7 @@ public abstract partial class FilmModel
     /// <summary>Cooper's pool boiling of water at 1 µm roughness [W/(m²·K)].</summary>
     internal static double CooperPoolBoiling(double pressure, double heatFlux)
     {
-        double reduced = pressure / CriticalPressure;
-        return 55 / Math.Sqrt(MolarMass) * Math.Exp((0.12 * Math.Log(reduced)) - (0.55 * Math.Log(-Math.Log10(reduced)))) * Math.Pow(heatFlux, 0.67);
+        double reduced = pressure / Water97.CriticalPressure;
+        return 55 / Math.Sqrt(MolarMass) * Math.Exp((0.12 * Math.Log(reduced)) - (0.55 * Math.Log(-Math.Log10(reduced))) + (0.67 * Math.Log(heatFlux)));
     }
 }

@@ -1,5 +1,6 @@
 using TwoPhase.Flow;
 using TwoPhase.Numerics;
+using TwoPhase.Steam;
 
 namespace TwoPhase.HeatTransfer;
 
@@ -37,7 +38,7 @@ public abstract partial class FilmModel
         protected internal override Applicability CheckCore(in FlowState flow, double heatFlux) => Applicability.Inside
             .Check(ApplicabilityLimits.Bore, flow.Bore, 0.001, 0.032)
             .Check(ApplicabilityLimits.Inclination, Math.Abs(flow.Inclination), 1.5, Math.PI / 2)
-            .Check(ApplicabilityLimits.Pressure, flow.Pressure, 0.001 * CriticalPressure, 0.8 * CriticalPressure)
+            .Check(ApplicabilityLimits.Pressure, flow.Pressure, 0.001 * Water97.CriticalPressure, 0.8 * Water97.CriticalPressure)
             .Check(ApplicabilityLimits.DensityRatio, flow.VapourDensity / flow.LiquidDensity, 1 / 5000.0, 1 / 3.5);
 
         private static double ConvectiveBoiling(in FlowState flow)
@@ -54,9 +55,9 @@ public abstract partial class FilmModel
 
         private static double NucleateBoiling(in FlowState flow, double heatFlux)
         {
-            double reduced = flow.Pressure / CriticalPressure, cube = reduced * reduced * reduced;
-            double lnReduced = Math.Log(reduced);
-            double pressure = (2.816 * Math.Exp(0.45 * lnReduced)) + ((3.4 + (1.7 / (1 - (cube * cube * reduced)))) * Math.Exp(3.7 * lnReduced));
+            double reduced = flow.Pressure / Water97.CriticalPressure, cube = reduced * reduced * reduced;
+            double root = Math.Exp(0.15 * Math.Log(reduced));   // pr^0.45 = root³, pr^3.7 = pr⁴/root²
+            double pressure = (2.816 * root * root * root) + ((3.4 + (1.7 / (1 - (cube * cube * reduced)))) * cube * reduced / (root * root));
             double exponent = 0.8 - (0.1 * Math.Exp(1.75 * reduced));
             return ReferenceCoefficient * WaterFactor * pressure * Math.Exp(
                 (exponent * (Math.Log(heatFlux) - LogReferenceFlux)) - (0.4 * (Math.Log(flow.Bore) - LogReferenceBore)));

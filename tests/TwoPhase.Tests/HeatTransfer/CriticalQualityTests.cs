@@ -89,7 +89,7 @@ public class CriticalQualityTests
     [Property]
     public bool Spread_SteeperOrFasterTube_IsLess(byte angle, ushort flux)
     {
-        double inclination = angle * Math.PI / 2 / 256;
+        double inclination = angle * 1.55 / 255;
         FlowState flow = FlowStates.At(10e6, 0.5, 200 + (flux / 20.0), 0.0243, inclination), steeper = flow with { Inclination = inclination + 0.01 }, down = flow with { Inclination = -inclination };
         CriticalQualityModel model = CriticalQualityModel.KeferKohlerKastner;
         double spread = model.SpreadCore(flow, 0.6);
