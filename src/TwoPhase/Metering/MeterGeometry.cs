@@ -13,9 +13,11 @@ internal readonly struct MeterGeometry
         FlowArea = Math.PI / 4 * throatDiameter * throatDiameter / Numerics.Fast.Sqrt(1 - (beta * beta * beta * beta));
     }
 
-    private MeterGeometry(double flowArea)
+    private MeterGeometry(double pipeDiameter, double throatDiameter, double diameterRatio, double flowArea)
     {
-        PipeDiameter = ThroatDiameter = DiameterRatio = double.NaN;
+        PipeDiameter = pipeDiameter;
+        ThroatDiameter = throatDiameter;
+        DiameterRatio = diameterRatio;
         FlowArea = flowArea;
     }
 
@@ -25,9 +27,12 @@ internal readonly struct MeterGeometry
 
     public double DiameterRatio { get; }
 
-    /// <summary>E·A: throat area times the velocity-of-approach factor 1/√(1 − β⁴) [m²].</summary>
+    /// <summary>E·A: throat area times the velocity-of-approach factor 1/√(1 − β⁴), times the calibration factor [m²].</summary>
     public double FlowArea { get; }
 
     /// <summary>A meter of which only the constant is known.</summary>
-    public static MeterGeometry FromFlowArea(double flowArea) => new(flowArea);
+    public static MeterGeometry FromFlowArea(double flowArea) => new(double.NaN, double.NaN, double.NaN, flowArea);
+
+    /// <summary>The same shape passing more or less flow, as a calibration has found.</summary>
+    public MeterGeometry WithFlowFactor(double factor) => new(PipeDiameter, ThroatDiameter, DiameterRatio, FlowArea * factor);
 }

@@ -7,6 +7,7 @@ namespace TwoPhase.Metering;
 public abstract partial class PrimaryElement
 {
     private ThermalGrowth? _growth;
+    private double _calibration = 1;
 
     /// <summary>Whether the diameters are those of the cold element, to be corrected to the working temperature.</summary>
     public bool IsMeasuredCold => _growth is not null;
@@ -35,7 +36,7 @@ public abstract partial class PrimaryElement
     public PrimaryElement HotAt(Temperature temperature)
     {
         var changed = (PrimaryElement)MemberwiseClone();
-        changed._geometry = GeometryAt(Require.Positive(temperature.Si(), "Temperature", Scale.Kelvins, nameof(temperature)));
+        changed._geometry = Grown(Require.Positive(temperature.Si(), "Temperature", Scale.Kelvins, nameof(temperature)));
         changed._growth = null;
         return changed;
     }
@@ -50,6 +51,19 @@ public abstract partial class PrimaryElement
         return WithThroat(d);
     }
 
+    /// <summary>C in place over C of the standard, as a calibration or a fit has found it; 1 unless <see cref="Calibrated"/>.</summary>
+    public double CalibrationFactor => _calibration;
+
+    /// <summary>The same element with its discharge coefficient scaled at every Reynolds number, also that which a wet-steam model brings.</summary>
+    /// <param name="factor">C in place over C of the standard, greater than zero.</param>
+    /// <exception cref="ArgumentOutOfRangeException"><paramref name="factor"/> is not greater than zero.</exception>
+    public PrimaryElement Calibrated(double factor)
+    {
+        var changed = (PrimaryElement)MemberwiseClone();
+        changed._calibration = Require.Positive(factor, "Calibration factor", Scale.None, nameof(factor));
+        return changed;
+    }
+
     internal PrimaryElement WithThroat(double throat)
     {
         var changed = (PrimaryElement)MemberwiseClone();
@@ -59,8 +73,10 @@ public abstract partial class PrimaryElement
 
     internal override MeterGeometry SinglePhaseGeometry(Temperature? temperature) =>
         temperature is { } given ? GeometryAt(Require.Positive(given.Si(), "Temperature", Scale.Kelvins, nameof(temperature)))
-        : _growth is null ? _geometry
+        : _growth is null ? _geometry.WithFlowFactor(_calibration)
         : throw new ArgumentException($"The {Name} was measured cold: give the working temperature.", nameof(temperature));
+
+    private MeterGeometry Grown(double temperature) => _growth is { } growth ? growth.Apply(_geometry, temperature) : _geometry;
 
     private static double Coefficient(CoefficientOfThermalExpansion value, string parameter) =>
         Require.Within(value.As(CoefficientOfThermalExpansionUnit.PerKelvin), 0, 1e-4, "Coefficient of thermal expansion", new Scale("1/K", 1), parameter);

@@ -39,7 +39,7 @@ public abstract partial class PrimaryElement : DifferentialPressureMeter
     /// <summary>C, discharge coefficient in single-phase flow [-].</summary>
     /// <param name="reynolds">Re, Reynolds number of the pipe 4 ṁ/(π D μ), greater than zero; infinity is the limit.</param>
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="reynolds"/> is not greater than zero.</exception>
-    public double DischargeCoefficient(double reynolds) => CoefficientCore(_geometry, MeterArguments.Reynolds(reynolds, nameof(reynolds)));
+    public double DischargeCoefficient(double reynolds) => _calibration * CoefficientCore(_geometry, MeterArguments.Reynolds(reynolds, nameof(reynolds)));
 
     /// <summary>Relative expanded uncertainty (k = 2) of <see cref="DischargeCoefficient"/>.</summary>
     /// <param name="reynolds">Re, Reynolds number of the pipe, greater than zero.</param>
@@ -84,7 +84,7 @@ public abstract partial class PrimaryElement : DifferentialPressureMeter
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="reynolds"/> is not greater than zero.</exception>
     public Applicability Check(double reynolds) => LimitsCore(_geometry, MeterArguments.Reynolds(reynolds, nameof(reynolds)));
 
-    internal override MeterGeometry GeometryAt(double temperature) => _growth is { } growth ? growth.Apply(_geometry, temperature) : _geometry;
+    internal override MeterGeometry GeometryAt(double temperature) => Grown(temperature).WithFlowFactor(_calibration);
 
     internal sealed override Applicability CheckCore(in MeterGeometry geometry, double reynolds, double pressureRatio) =>
         LimitsCore(geometry, reynolds).Check(ApplicabilityLimits.PressureRatio, pressureRatio, 0.75, 1);

@@ -90,10 +90,10 @@ public sealed partial class QualityMeter
         MeterSteam steam = MeterSteam.At(pressure, Meter.HasGeometry, Model.NeedsTransport);
         MeterGeometry geometry = Meter.GeometryAt(steam.Temperature);
         double factor;   // on the root of the differential: C, ε and constant act together on flow
-        if (Meter is PrimaryElement)
+        if (Meter is PrimaryElement element)
         {
             geometry = new(geometry.PipeDiameter * values[nameof(MeteringInput.PipeDiameter)], geometry.ThroatDiameter * values[nameof(MeteringInput.ThroatDiameter)]);
-            factor = values[nameof(MeteringInput.DischargeCoefficient)] * values[nameof(MeteringInput.Expansibility)];
+            factor = element.CalibrationFactor * values[nameof(MeteringInput.DischargeCoefficient)] * values[nameof(MeteringInput.Expansibility)];
         }
         else
         {
