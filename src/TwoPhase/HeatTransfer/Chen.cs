@@ -28,11 +28,11 @@ public abstract partial class FilmModel
             SinglePhase liquid = SinglePhase.Liquid(flow, flow.MassFlux * wet);
             double enhancement = ChenEnhancement(Math.Exp(LogInverseMartinelli(flow, wet)));
             double suppression = ChenSuppression(liquid.Reynolds * Math.Pow(enhancement, 1.25));
-            double convective = enhancement * SinglePhaseFilm.DittusBoelterCore(liquid);
+            double single = SinglePhaseFilm.DittusBoelterCore(liquid), convective = enhancement * single;
             double h = heatFlux > 0
                 ? heatFlux / Superheat(flow, heatFlux, convective, suppression * ForsterZuber(flow))
                 : convective;
-            return NotBelowDrySteam(flow, h);
+            return NotBelowDrySteam(flow, wet, single, h);
         }
 
         protected internal override Applicability CheckCore(in FlowState flow, double heatFlux) => Applicability.Inside

@@ -1,4 +1,5 @@
 using TwoPhase.Flow;
+using TwoPhase.Numerics;
 using TwoPhase.Steam;
 using TwoPhase.Units;
 
@@ -24,14 +25,13 @@ public abstract partial class FilmModel
     }
 
     /// <summary>Fr = G²/(ρl² g D) [-], all the flow as liquid.</summary>
-    private static double LiquidFroude(in FlowState flow)
-    {
-        double velocity = flow.MassFlux / flow.LiquidDensity;
-        return velocity * velocity / (SiDoor.StandardGravity * flow.Bore);
-    }
+    private static double LiquidFroude(in FlowState flow) => flow.MassFlux * flow.MassFlux / FroudeScale(flow);
 
-    /// <summary>Whether Gungor and Winterton's correction for a partly wetted horizontal tube applies.</summary>
-    private static bool StratifiesAt(in FlowState flow, double froude) => froude < 0.05 && Math.Abs(flow.Inclination) < Math.PI / 4;
+    /// <summary>Whether Gungor and Winterton's correction for a partly wetted tube applies: near the horizontal and Fr below 0.05.</summary>
+    private static bool IsPartlyWetted(in FlowState flow) =>
+        flow.MassFlux * flow.MassFlux < 0.05 * FroudeScale(flow) && Math.Abs(flow.Inclination) < Math.PI / 4;
+
+    private static double FroudeScale(in FlowState flow) => flow.LiquidDensity * flow.LiquidDensity * SiDoor.StandardGravity * flow.Bore;
 
     /// <summary>Fr^(0.1 − 2 Fr) [-], Gungor and Winterton's factor of the convective term below Fr = 0.05.</summary>
     private static double HorizontalFactor(double froude) => Math.Pow(froude, 0.1 - (2 * froude));
@@ -43,7 +43,15 @@ public abstract partial class FilmModel
         .Check(ApplicabilityLimits.MassFlux, flow.MassFlux, 12.4, 61518)
         .Check(ApplicabilityLimits.HeatFlux, heatFlux, 350, 9.534e6);
 
-    /// <summary>The larger of h and Dittus-Boelter for all the flow as vapour, to which a wet-wall formula must hand over at x = 1.</summary>
-    private static double NotBelowDrySteam(in FlowState flow, double h) =>
-        Math.Max(h, SinglePhaseFilm.DittusBoelterCore(SinglePhase.Vapour(flow, flow.MassFlux)));
+    /// <summary>
+    /// The larger of h and Dittus-Boelter for all the flow as vapour, to which a wet-wall formula must hand over at x = 1. The latter
+    /// over the liquid share's coefficient is (kg/kl)^0.6 (μl cpg / (μg cpl))^0.4 (1 − x)^−0.8: one power.
+    /// </summary>
+    private static double NotBelowDrySteam(in FlowState flow, double liquidShare, double liquidCoefficient, double h)
+    {
+        double conductivity = flow.VapourConductivity / flow.LiquidConductivity;
+        double capacity = flow.LiquidViscosity * flow.VapourHeatCapacity / (flow.VapourViscosity * flow.LiquidHeatCapacity);
+        double power = conductivity * Fast.Sqrt(conductivity) * capacity / (liquidShare * liquidShare);
+        return Math.Max(h, liquidCoefficient * Math.Exp(0.4 * Math.Log(power)));
+    }
 }

@@ -31,15 +31,15 @@ public abstract partial class FilmModel
                 + (24000 * Math.Exp(1.16 * Math.Log(heatFlux / (flow.MassFlux * flow.LatentHeat))))
                 + (1.37 * Math.Exp(0.86 * LogInverseMartinelli(flow, wet)));
             double suppression = 1 / (1 + (1.15e-6 * enhancement * enhancement * Math.Exp(1.17 * Math.Log(liquid.Reynolds))));
-            double froude = LiquidFroude(flow);
-            if (StratifiesAt(flow, froude))
+            if (IsPartlyWetted(flow))
             {
+                double froude = LiquidFroude(flow);
                 enhancement *= HorizontalFactor(froude);
                 suppression *= Math.Sqrt(froude);
             }
 
-            double h = (enhancement * SinglePhaseFilm.DittusBoelterCore(liquid)) + (suppression * CooperPoolBoiling(flow.Pressure, heatFlux));
-            return NotBelowDrySteam(flow, h);
+            double convective = SinglePhaseFilm.DittusBoelterCore(liquid);
+            return NotBelowDrySteam(flow, wet, convective, (enhancement * convective) + (suppression * CooperPoolBoiling(flow.Pressure, heatFlux)));
         }
 
         protected internal override Applicability CheckCore(in FlowState flow, double heatFlux) => GungorWintertonRange(flow, heatFlux);
@@ -48,7 +48,8 @@ public abstract partial class FilmModel
     /// <summary>Cooper's pool boiling of water at 1 µm roughness [W/(m²·K)].</summary>
     internal static double CooperPoolBoiling(double pressure, double heatFlux)
     {
-        double reduced = pressure / Water97.CriticalPressure;
-        return 55 / Math.Sqrt(MolarMass) * Math.Exp((0.12 * Math.Log(reduced)) - (0.55 * Math.Log(-Math.Log10(reduced))) + (0.67 * Math.Log(heatFlux)));
+        const double ln10 = 2.302585092994046;
+        double lnReduced = Math.Log(pressure / Water97.CriticalPressure);
+        return 55 / Math.Sqrt(MolarMass) * Math.Exp((0.12 * lnReduced) - (0.55 * Math.Log(-lnReduced / ln10)) + (0.67 * Math.Log(heatFlux)));
     }
 }

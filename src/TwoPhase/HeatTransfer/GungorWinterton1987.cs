@@ -26,9 +26,9 @@ public abstract partial class FilmModel
             double enhancement = 1
                 + (3000 * Math.Pow(heatFlux / (flow.MassFlux * flow.LatentHeat), 0.86))
                 + (1.12 * Math.Pow(flow.Quality / wet, 0.75) * Math.Pow(flow.LiquidDensity / flow.VapourDensity, 0.41));
-            double froude = LiquidFroude(flow);
-            if (StratifiesAt(flow, froude)) enhancement *= HorizontalFactor(froude);
-            return NotBelowDrySteam(flow, enhancement * SinglePhaseFilm.DittusBoelterCore(SinglePhase.Liquid(flow, flow.MassFlux * wet)));
+            if (IsPartlyWetted(flow)) enhancement *= HorizontalFactor(LiquidFroude(flow));
+            double convective = SinglePhaseFilm.DittusBoelterCore(SinglePhase.Liquid(flow, flow.MassFlux * wet));
+            return NotBelowDrySteam(flow, wet, convective, enhancement * convective);
         }
 
         protected internal override Applicability CheckCore(in FlowState flow, double heatFlux) => GungorWintertonRange(flow, heatFlux);
