@@ -12,7 +12,7 @@ public abstract partial class FilmModel
     /// superheat [K], Δp rise of saturation pressure over ΔT [Pa], by Clausius-Clapeyron from the properties at Ts. ΔT is solved from
     /// h ΔT = q. Towards dry steam the result is never less than Dittus-Boelter for all the flow as vapour.</para>
     /// <para>Range: 0.055 to 3.5 MPa for water, x 0.01 to 0.71, q 6 to 2400 kW/m², vertical; range of the paper's data, from memory.</para>
-    /// <para>Accuracy: mean deviation 11 % on the paper's own data.</para>
+    /// <para>Accuracy: mean deviation 11 % on the paper's own data; from memory.</para>
     /// <para>Source: Chen, Ind. Eng. Chem. Process Des. Dev. 5(3), 322-329 (1966); F and S in the forms fitted to its curves that
     /// Collier and Thome, Convective Boiling and Condensation, 3rd ed. (1994), section 7.4, give.</para>
     /// </remarks>

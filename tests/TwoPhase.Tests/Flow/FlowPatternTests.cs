@@ -14,18 +14,8 @@ public class FlowPatternTests
         ["bubbly"] = FlowRegime.DispersedBubble,
     };
 
-    // 10 MPa, rounded IAPWS-IF97 values; only what the map uses.
-    private static FlowState TenMegapascals(double quality, double massFlux, double inclination = 0) => new()
-    {
-        LiquidDensity = 688.4,
-        VapourDensity = 55.45,
-        LiquidViscosity = 8.172e-5,
-        VapourViscosity = 2.019e-5,
-        Quality = quality,
-        MassFlux = massFlux,
-        Bore = 0.0779,
-        Inclination = inclination,
-    };
+    private static FlowState TenMegapascals(double quality, double massFlux, double inclination = 0) =>
+        ReferencePoint.At(quality) with { MassFlux = massFlux, Inclination = inclination };
 
     [Fact]
     public void Of_SaturatedSteamGrid_MatchesIndependentProgram()

@@ -22,7 +22,7 @@ public class SinglePhaseFilmTests
 
     [Fact]
     public void DittusBoelter_Heating_MatchesHt() =>
-        // Tests of python library ht 1.0: turbulent_Dittus_Boelter(Re=1E5, Pr=1.2) = 247.40036409449127.
+        // Tests of the python library ht: turbulent_Dittus_Boelter(Re=1E5, Pr=1.2) = 247.40036409449127.
         Approx.Relative(247.40036409449127, SinglePhaseFilm.DittusBoelterCore(new(1e5, 1, 1, 1, 1.2)), 1e-13);
 
     [Theory]
