@@ -16,6 +16,8 @@ internal readonly struct Duct
     /// <summary>Water-side volume of the pass before it [m³].</summary>
     public double VolumeBefore { get; init; }
 
+    public double VolumeAfter => VolumeBefore + (Area * Length);
+
     /// <summary>Bore, scale deducted [m].</summary>
     public double Bore { get; init; }
 
@@ -52,8 +54,18 @@ internal readonly struct Duct
     /// <summary>Share of the fired heat [-].</summary>
     public double HeatShare { get; init; }
 
+    /// <summary>+1 on the cold side of the interchanger, −1 on its hot side, 0 elsewhere.</summary>
+    public double ExchangeSign { get; init; }
+
     public FluxCurve Flux { get; init; }
 
     /// <summary>Tube metal with fins [J/(K·m)].</summary>
     public double MetalCapacity { get; init; }
+
+    /// <summary>Heat taken up [W], of what the fire gives the pass and the interchanger moves.</summary>
+    public double HeatOf(double fired, double exchanged) => (HeatShare * fired) + (ExchangeSign * exchanged);
+
+    /// <summary>Heat per length [W/m] at a corner of the flux.</summary>
+    public double LinearHeat(double fired, double exchanged, int corner) =>
+        ((HeatShare * fired * Flux.Flux[corner]) + (ExchangeSign * exchanged)) / Length;
 }

@@ -43,6 +43,7 @@ public sealed partial class Pass
             OtherLoss = section.LossCoefficient / section.RawLength,
             Rise = section.RawRise / section.RawLength,
             Inclination = section.RawInclination,
+            ExchangeSign = Interchanger?.ColdSection == section.Name ? 1 : Interchanger?.HotSection == section.Name ? -1 : 0,
             HeatShare = heat?.RawShare ?? 0,
             Flux = heat?.Curve ?? FluxCurve.Uniform,
             MetalCapacity = section.RawMetalMass * section.Metal.RawHeatCapacity / section.RawLength,

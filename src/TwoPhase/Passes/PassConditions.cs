@@ -26,10 +26,10 @@ public readonly record struct PassConditions
     public MassFlow FeedFlow => MassFlow.FromKilogramsPerSecond(RawFeedFlow);
 
     /// <summary>Feed temperature; null when the feed is given by its enthalpy.</summary>
-    public Temperature? FeedTemperature => double.IsNaN(RawFeedTemperature) ? null : Temperature.FromKelvins(RawFeedTemperature);
+    public Temperature? FeedTemperature => IsFeedByEnthalpy ? null : Temperature.FromKelvins(RawFeedTemperature);
 
     /// <summary>Feed enthalpy; null when the feed is given by its temperature.</summary>
-    public SpecificEnergy? FeedEnthalpy => double.IsNaN(RawFeedEnthalpy) ? null : SpecificEnergy.FromJoulesPerKilogram(RawFeedEnthalpy);
+    public SpecificEnergy? FeedEnthalpy => !IsFeedByEnthalpy ? null : SpecificEnergy.FromJoulesPerKilogram(RawFeedEnthalpy);
 
     /// <summary>Absolute outlet pressure.</summary>
     public Pressure OutletPressure => Pressure.FromPascals(RawOutletPressure);
@@ -42,6 +42,8 @@ public readonly record struct PassConditions
     internal double RawFeedTemperature { get; init; }
 
     internal double RawFeedEnthalpy { get; init; }
+
+    internal bool IsFeedByEnthalpy => !double.IsNaN(RawFeedEnthalpy);
 
     internal double RawOutletPressure { get; init; }
 
@@ -70,5 +72,5 @@ public readonly record struct PassConditions
     public PassConditions WithAbsorbedHeat(Power absorbedHeat) => this with { RawAbsorbedHeat = Require.NotNegative(absorbedHeat.Si(), "Absorbed heat", Scale.Megawatts, nameof(absorbedHeat)) };
 
     /// <summary>The conditions in engineering units, invariant culture.</summary>
-    public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0:G5} kg/s feed at {1}, outlet at {2:G5} MPa, {3:G5} MW", RawFeedFlow, double.IsNaN(RawFeedTemperature) ? Scale.KilojoulesPerKilogram.Text(RawFeedEnthalpy, "G5") : Scale.Celsius.Text(RawFeedTemperature, "G5"), RawOutletPressure * 1e-6, RawAbsorbedHeat * 1e-6);
+    public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0:G5} kg/s feed at {1}, outlet at {2:G5} MPa, {3:G5} MW", RawFeedFlow, IsFeedByEnthalpy ? Scale.KilojoulesPerKilogram.Text(RawFeedEnthalpy, "G5") : Scale.Celsius.Text(RawFeedTemperature, "G5"), RawOutletPressure * 1e-6, RawAbsorbedHeat * 1e-6);
 }

@@ -20,7 +20,8 @@ internal static partial class Transport
     }
 
     // H(i,j), Table 2: a row for each power i of (Tc/T − 1), a column for each power j of (ρ/ρc − 1).
-    private static ReadOnlySpan<double> ViscosityTable =>
+    // An array: a span over static data costs an allocation a call in unoptimised code.
+    private static readonly double[] ViscosityTable =
     [
         5.20094e-1, 2.22531e-1, -2.81378e-1, 1.61913e-1, -3.25372e-2, 0, 0,
         8.50895e-2, 9.99115e-1, -9.06851e-1, 2.57399e-1, 0, 0, 0,

@@ -1,0 +1,67 @@
+using TwoPhase.Flow;
+
+namespace TwoPhase.Passes;
+
+/// <summary>One node of a pass as the solvers keep it, SI doubles.</summary>
+internal readonly record struct PassNode
+{
+    /// <summary>Index of the section.</summary>
+    public int Duct { get; init; }
+
+    /// <summary>Distance from the inlet of the pass along the flow path [m].</summary>
+    public double Position { get; init; }
+
+    /// <summary>Water-side volume of the pass up to here [m³].</summary>
+    public double Volume { get; init; }
+
+    /// <summary>h of the flow [J/kg].</summary>
+    public double Enthalpy { get; init; }
+
+    /// <summary>T [K].</summary>
+    public double Temperature { get; init; }
+
+    /// <summary>xe [-], any value.</summary>
+    public double EquilibriumQuality { get; init; }
+
+    /// <summary>α [-].</summary>
+    public double VoidFraction { get; init; }
+
+    /// <summary>Heat per length, all parallel tubes, from fire and interchanger together [W/m].</summary>
+    public double LinearHeat { get; init; }
+
+    /// <summary>Pressure lost to friction per length [Pa/m].</summary>
+    public double Friction { get; init; }
+
+    /// <summary>Pressure lost in bends and fittings per length [Pa/m].</summary>
+    public double Fittings { get; init; }
+
+    /// <summary>Pressure lost to height per length [Pa/m].</summary>
+    public double Gravity { get; init; }
+
+    /// <summary>
+    /// The flow here. Where one phase is absent the other's density and viscosity are its own, not the saturated ones.
+    /// Conductivities and heat capacities are not carried along: no slip or friction model uses them.
+    /// </summary>
+    public FlowState Flow { get; init; }
+
+    public double Pressure => Flow.Pressure;
+
+    public double Density => (VoidFraction * Flow.VapourDensity) + ((1 - VoidFraction) * Flow.LiquidDensity);
+
+    public double Loss => Friction + Fittings + Gravity;
+
+    /// <summary>v of both phases moving at one velocity [m³/kg].</summary>
+    public double HomogeneousVolume => (Flow.Quality / Flow.VapourDensity) + ((1 - Flow.Quality) / Flow.LiquidDensity);
+
+    /// <summary>x²/(α ρg) + (1 − x)²/((1 − α) ρl): what G² times it is the momentum flux [m³/kg].</summary>
+    public double MomentumVolume
+    {
+        get
+        {
+            double x = Flow.Quality;
+            double vapour = VoidFraction > 0 ? x * x / (VoidFraction * Flow.VapourDensity) : 0;
+            double liquid = VoidFraction < 1 ? (1 - x) * (1 - x) / ((1 - VoidFraction) * Flow.LiquidDensity) : 0;
+            return vapour + liquid;
+        }
+    }
+}

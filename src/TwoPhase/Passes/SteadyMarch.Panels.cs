@@ -1,0 +1,134 @@
+namespace TwoPhase.Passes;
+
+// One panel: iterate its pressures, judge its error, find where a phase ends in it.
+internal partial struct SteadyMarch<TFluid>
+{
+    private const int GreatestSweeps = 16, GreatestAims = 24;
+    private const double SweepTolerance = 1e-10, BoundaryTolerance = 1e-11;
+
+    /// <summary>Fills the four nodes above the last one.</summary>
+    private Attempt Try(in Piece piece, double done, double length)
+    {
+        Reserve();
+        double spacing = length / Panel.Intervals;
+        PassNode[] nodes = Nodes;
+        int first = Count - 1;
+        double p1 = Guess(spacing), p2 = Guess(2 * spacing), p3 = Guess(3 * spacing), p4 = Guess(4 * spacing);
+        for (int sweep = 0; sweep < GreatestSweeps; sweep++)
+        {
+            if ((Outside(p1) ?? Outside(p2) ?? Outside(p3) ?? Outside(p4)) is { } outside) return new(length, outside);
+            Place(piece, first + 1, done + spacing, p1);
+            Place(piece, first + 2, done + (2 * spacing), p2);
+            Place(piece, first + 3, done + (3 * spacing), p3);
+            Place(piece, first + 4, done + (4 * spacing), p4);
+            double f0 = nodes[first].Loss, f1 = nodes[first + 1].Loss, f2 = nodes[first + 2].Loss, f3 = nodes[first + 3].Loss, f4 = nodes[first + 4].Loss;
+            double worst = 0, sum = _momentumSum + Panel.Boole(spacing, f0, f1, f2, f3, f4);
+            p1 = Next(nodes[first + 1], _momentumSum + Panel.Integral(1, spacing, f0, f1, f2, f3, f4), ref worst);
+            p2 = Next(nodes[first + 2], _momentumSum + Panel.Integral(2, spacing, f0, f1, f2, f3, f4), ref worst);
+            p3 = Next(nodes[first + 3], _momentumSum + Panel.Integral(3, spacing, f0, f1, f2, f3, f4), ref worst);
+            p4 = Next(nodes[first + 4], sum, ref worst);
+            if (double.IsNaN(worst)) return new(length, Trouble(nodes[first + 1]) ?? Trouble(nodes[first + 4]) ?? Choked);
+            if (worst > SweepTolerance) continue;
+            for (int j = 1; j <= Panel.Intervals; j++)
+            {
+                if (Trouble(nodes[first + j]) is { } trouble) return new(length, trouble);
+            }
+
+            return Judge(piece, length, sum, f0, f1, f2, f3, f4);
+        }
+
+        return new(length, Choked);
+    }
+
+    private readonly Attempt Judge(in Piece piece, double length, double sum, double f0, double f1, double f2, double f3, double f4)
+    {
+        int first = Count - 1;
+        double spacing = length / Panel.Intervals, area = _ducts[piece.Duct].Area;
+        double d0 = Nodes[first].Density, d1 = Nodes[first + 1].Density, d2 = Nodes[first + 2].Density, d3 = Nodes[first + 3].Density, d4 = Nodes[first + 4].Density;
+        double pressureError = Math.Abs(Panel.Boole(spacing, f0, f1, f2, f3, f4) - Panel.Simpson(spacing, f0, f1, f2, f3, f4));
+        double massError = area * Math.Abs(Panel.Boole(spacing, d0, d1, d2, d3, d4) - Panel.Simpson(spacing, d0, d1, d2, d3, d4));
+
+        // By length, and a little for the short panels near a phase boundary.
+        double allowed = _tolerance * ((length / TotalLength) + 0.002);
+        double quality = Math.Min(allowed * OutletPressure / (pressureError + double.Epsilon), allowed * _massScale / (massError + double.Epsilon));
+        return new(length, null) { MomentumSum = sum, PressureError = pressureError, MassError = massError, Quality = quality };
+    }
+
+    // The quadratic through the last three nodes, or the slope where there are none of this kind.
+    private readonly double Guess(double distance)
+    {
+        ref readonly PassNode node = ref Last;
+        if (_spacing == 0) return node.Pressure + (distance * node.Loss);
+        double before = Nodes[Count - 2].Pressure, earlier = Nodes[Count - 3].Pressure;
+        double slope = (node.Pressure - before) / _spacing, bend = (node.Pressure - (2 * before) + earlier) / (2 * _spacing * _spacing);
+        return node.Pressure + (distance * (slope + ((distance + _spacing) * bend)));
+    }
+
+    private readonly void Place(in Piece piece, int index, double done, double pressure) =>
+        Nodes[index] = At(piece.Duct, piece.End - done, pressure, piece.EnthalpyAt(done), piece.LinearHeatAt(done));
+
+    // Newton for p + G² vM(p) = sum, with vM ~ 1/p.
+    private readonly double Next(in PassNode node, double sum, ref double worst)
+    {
+        double momentum = Momentum(node), pressure = node.Pressure;
+        double change = (sum - momentum - pressure) / (1 - (momentum / pressure));
+        double relative = momentum < 0.9 * pressure ? Math.Abs(change) / pressure : double.NaN;
+        worst = double.IsNaN(worst) || relative <= worst ? worst : relative;
+        return pressure + change;
+    }
+
+    /// <summary>Distance up the piece at which a phase ends inside the panel just tried; null if none does.</summary>
+    private readonly Crossing? CrossingIn(in Attempt attempt, in Piece piece)
+    {
+        int first = Count - 1;
+        double start = Nodes[first].EquilibriumQuality;
+        double reference = Math.Abs(start) < 1e-9 || Math.Abs(start - 1) < 1e-9 ? Nodes[first + 1].EquilibriumQuality : start;
+        for (int j = 1; j <= Panel.Intervals; j++)
+        {
+            double quality = Nodes[first + j].EquilibriumQuality;
+            double? boundary = reference <= 0 ? (quality > 0 ? 0 : null) : reference >= 1 ? (quality < 1 ? 1 : null) : quality < 0 ? 0 : quality > 1 ? 1 : null;
+            if (boundary is not { } phaseEnd || Math.Abs(quality - phaseEnd) <= BoundaryTolerance) continue;
+            double before = Nodes[first + j - 1].EquilibriumQuality - phaseEnd, after = quality - phaseEnd, spacing = attempt.Length / Panel.Intervals;
+            double distance = spacing * (j - 1 + (before / (before - after)));
+            return distance > 1e-12 * piece.Length ? new(distance, phaseEnd) : null;
+        }
+
+        return null;
+    }
+
+    /// <summary>The panel that ends exactly where the phase does, by the secant method.</summary>
+    private Attempt Aim(in Piece piece, double done, Crossing crossing, in Attempt tried)
+    {
+        double length = Math.Min(crossing.Distance, piece.Length - done);
+        for (int i = 0; i < GreatestAims; i++)
+        {
+            Attempt attempt = Try(piece, done, length);
+            if (attempt.Trouble is not null) return attempt;
+            double end = Nodes[Count - 1 + Panel.Intervals].EquilibriumQuality - crossing.Boundary;
+            double before = Nodes[Count - 2 + Panel.Intervals].EquilibriumQuality - crossing.Boundary;
+            double change = end * (length / Panel.Intervals) / (before - end);
+            if (Math.Abs(end) <= BoundaryTolerance || double.IsNaN(change) || Math.Abs(change) < 1e-14 * piece.Length) return attempt with { AtBoundary = true };
+            length = Math.Min(Math.Max(length + change, length / 4), piece.Length - done);
+        }
+
+        return tried;
+    }
+
+    private readonly record struct Crossing(double Distance, double Boundary);
+
+    /// <summary>A panel tried: what is wrong with it, or how good it is.</summary>
+    private readonly record struct Attempt(double Length, string? Trouble)
+    {
+        public double MomentumSum { get; init; }
+
+        public double PressureError { get; init; }
+
+        public double MassError { get; init; }
+
+        /// <summary>Allowed error over error found.</summary>
+        public double Quality { get; init; }
+
+        /// <summary>It ends where a phase does.</summary>
+        public bool AtBoundary { get; init; }
+    }
+}

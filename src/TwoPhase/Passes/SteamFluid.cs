@@ -1,0 +1,79 @@
+using TwoPhase.Steam;
+using TwoPhase.Steam.Backward;
+
+namespace TwoPhase.Passes;
+
+/// <summary>Water and steam by IAPWS-IF97.</summary>
+internal readonly struct SteamFluid : IPassFluid
+{
+    public double HighestPressure => Water97.CriticalPressure;
+
+    public SaturatedPair Saturated(double pressure)
+    {
+        SaturatedPhases phases = SaturationTable.Phases(pressure);
+        SaturatedFluid fluid = SaturationTable.Fluid(pressure);
+        return new()
+        {
+            Pressure = pressure,
+            Temperature = fluid.Temperature,
+            LiquidEnthalpy = phases.LiquidEnthalpy,
+            VapourEnthalpy = phases.VapourEnthalpy,
+            LiquidVolume = phases.LiquidVolume,
+            VapourVolume = phases.VapourVolume,
+            LiquidViscosity = fluid.LiquidViscosity,
+            VapourViscosity = fluid.VapourViscosity,
+            SurfaceTension = fluid.SurfaceTension,
+        };
+    }
+
+    public SaturatedPair SaturatedSlopes(double pressure)
+    {
+        SaturationCore steam = SaturationLine.AtPressure(pressure);
+        double slope = steam.TemperatureByPressure;
+        return new()
+        {
+            Pressure = 1,
+            Temperature = slope,
+            LiquidEnthalpy = steam.Liquid.EnthalpyAlong(slope),
+            VapourEnthalpy = steam.Vapour.EnthalpyAlong(slope),
+            LiquidVolume = steam.Liquid.VolumeAlong(slope),
+            VapourVolume = steam.Vapour.VolumeAlong(slope),
+        };
+    }
+
+    public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated) =>
+        enthalpy < saturated.LiquidEnthalpy && saturated.Temperature <= Water97.Border13Temperature
+            ? Liquid(pressure, enthalpy)
+            : Point(Water.AtPressureEnthalpy(pressure, enthalpy));
+
+    // The phase is known: region 1, whose backward equation is good to 25 mK, one Newton step, and the rest by the slopes.
+    private static FluidPoint Liquid(double pressure, double enthalpy)
+    {
+        double guess = Backward1.TemperatureFromEnthalpy(pressure, enthalpy);
+        PhaseCore phase = Region1.At(pressure, guess);
+        phase = Region1.At(pressure, guess + ((enthalpy - phase.Enthalpy) / phase.IsobaricHeatCapacity));
+        double rest = enthalpy - phase.Enthalpy, temperature = phase.Temperature + (rest * phase.TemperatureByEnthalpy);
+        return temperature < Water97.LowestTemperature - 1e-6 ? default : new()
+        {
+            Temperature = temperature,
+            SpecificVolume = phase.SpecificVolume + (rest * phase.VolumeByEnthalpy),
+            VolumeByEnthalpy = phase.VolumeByEnthalpy,
+            VolumeByPressure = phase.VolumeByPressure,
+        };
+    }
+
+    private static FluidPoint Point(in WaterCore water) => new()
+    {
+        Temperature = water.Temperature,
+        SpecificVolume = water.SpecificVolume,
+        VolumeByEnthalpy = water.VolumeByEnthalpy,
+        VolumeByPressure = water.VolumeByPressure,
+    };
+
+    public double Viscosity(double density, double temperature) => Transport.Viscosity(density, temperature);
+
+    public double LiquidEnthalpy(double pressure, double temperature) =>
+        temperature >= Water97.LowestTemperature && temperature <= Water97.Border13Temperature
+            ? Region1.At(pressure, temperature).Enthalpy
+            : double.NaN;
+}
