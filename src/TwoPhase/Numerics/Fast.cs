@@ -43,6 +43,15 @@ internal static class Fast
         (a * b) + c;
 #endif
 
+    /// <summary>The integer part of a number that is known to fit, without the checks of a cast.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static int Truncate(double value) =>
+#if NET
+        double.ConvertToIntegerNative<int>(value);
+#else
+        (int)value;
+#endif
+
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static bool IsFinite(double value) => !double.IsNaN(value) && !double.IsInfinity(value);
 

@@ -14,4 +14,13 @@ internal readonly struct Four(double a, double b, double c, double d)
     public readonly double B = b;
     public readonly double C = c;
     public readonly double D = d;
+
+    /// <summary>Adds the four, times a weight, to four numbers.</summary>
+    public void AddTo(Span<double> sums, double weight)
+    {
+        sums[0] += weight * A;
+        sums[1] += weight * B;
+        sums[2] += weight * C;
+        sums[3] += weight * D;
+    }
 }

@@ -2,7 +2,7 @@ using TwoPhase.Numerics;
 
 namespace TwoPhase.Steam;
 
-/// <summary>v′, v″ and h′, h″ at one pressure, raw SI; or their slopes along the saturation line.</summary>
+/// <summary>v′, v″ and h′, h″ at one pressure, raw SI.</summary>
 internal readonly struct SaturatedPhases(Four values)
 {
     public double LiquidVolume => values.A;
@@ -12,6 +12,18 @@ internal readonly struct SaturatedPhases(Four values)
     public double LiquidEnthalpy => values.C;
 
     public double VapourEnthalpy => values.D;
+}
+
+/// <summary>Ts and the slopes of wet steam at one pressure, raw SI.</summary>
+internal readonly struct SaturatedSlopes(Four values)
+{
+    public double Temperature => values.A;
+
+    /// <summary>(∂v/∂h)p = (v″ − v′) / (h″ − h′) [m³/J], the same at every quality.</summary>
+    public double VolumeByEnthalpy => values.B;
+
+    /// <summary>(∂v/∂p)h [m³/(kg·Pa)], linear in quality.</summary>
+    public double VolumeByPressure(double quality) => ((1 - quality) * values.C) + (quality * values.D);
 }
 
 /// <summary>Ts, σ, μ′ and μ″ at one pressure, raw SI.</summary>

@@ -18,13 +18,8 @@ internal static class SaturationTable
     /// <summary>Lowest pressure of the table [Pa], 2^16.</summary>
     public const double LowestPressure = 65536;
 
-    private const int CellsPerOctave = 16;
-
     /// <summary>Highest pressure of the table [Pa], ps(623.15 K): above it the saturated states are those of region 3.</summary>
     public static readonly double HighestPressure = Region4.Pressure(Water97.Border13Temperature);
-
-    private static readonly OctaveGrid Grid = new(LowestPressure, CellsPerOctave);
-    private static readonly int Cells = Grid.Locate(HighestPressure, out _) + 1;
 
     /// <summary>Whether the table holds a pressure; false for NaN.</summary>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
@@ -35,13 +30,12 @@ internal static class SaturationTable
     public static SaturatedPhases Phases(double pressure) =>
         new(Covers(pressure) ? PhaseCurves.Table.At(pressure) : Exact(pressure, PhaseCurves.Of));
 
-    /// <summary>v′, v″, h′, h″ and their slopes along the saturation line [/Pa]; only inside the table.</summary>
-    public static SaturatedPhases Phases(double pressure, out SaturatedPhases slopes)
-    {
-        var phases = new SaturatedPhases(PhaseCurves.Table.At(pressure, out Four slope));
-        slopes = new(slope);
-        return phases;
-    }
+    /// <summary>As <see cref="Phases(double)"/>, unchecked: to the end of the last cell, with regions 1 and 2 continued above 623.15 K.</summary>
+    public static SaturatedPhases Continued(double pressure) => new(PhaseCurves.Table.At(pressure));
+
+    /// <summary>Ts [K] and how v of wet steam follows h and p; only inside the table.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static SaturatedSlopes Slopes(double pressure) => new(SlopeCurves.Table.At(pressure));
 
     /// <summary>Ts [K], σ [N/m], μ′ and μ″ [Pa·s].</summary>
     public static SaturatedFluid Fluid(double pressure) =>
@@ -55,10 +49,11 @@ internal static class SaturationTable
     public static SaturatedExpansion Expansion(double pressure) =>
         new(Covers(pressure) ? ExpansionCurves.Table.At(pressure) : Exact(pressure, ExpansionCurves.Of));
 
-    private static FourCurves Build(Func<SaturationCore, Four> group) =>
-        new(Grid, Cells, pressure =>
+    /// <summary>Any four smooth functions of the saturated state as curves over the table's cells.</summary>
+    public static FourCurves Curves(Func<SaturationCore, Four> group) =>
+        new(LowestPressure, HighestPressure, pressure =>
         {
-            // The last cell reaches beyond 623.15 K: regions 1 and 2 are continued there, so that nothing crosses the seam.
+            // The last cells reach beyond 623.15 K: regions 1 and 2 are continued there, so that nothing crosses the seam.
             double temperature = Region4.Temperature(pressure);
             return group(new() { Liquid = Region1.At(pressure, temperature), Vapour = Region2.At(pressure, temperature) });
         });
@@ -72,7 +67,18 @@ internal static class SaturationTable
         public static readonly Func<SaturationCore, Four> Of = s =>
             new(s.Liquid.SpecificVolume, s.Vapour.SpecificVolume, s.Liquid.Enthalpy, s.Vapour.Enthalpy);
 
-        public static readonly FourCurves Table = Build(Of);
+        public static readonly FourCurves Table = Curves(Of);
+    }
+
+    private static class SlopeCurves
+    {
+        public static readonly FourCurves Table = Curves(s =>
+        {
+            double along = s.TemperatureByPressure, byEnthalpy = (s.Vapour.SpecificVolume - s.Liquid.SpecificVolume) / s.LatentHeat;
+            double liquid = s.Liquid.VolumeAlong(along) - (byEnthalpy * s.Liquid.EnthalpyAlong(along));
+            double vapour = s.Vapour.VolumeAlong(along) - (byEnthalpy * s.Vapour.EnthalpyAlong(along));
+            return new(s.Temperature, byEnthalpy, liquid, vapour);
+        });
     }
 
     private static class FluidCurves
@@ -83,7 +89,7 @@ internal static class SaturationTable
             Transport.Viscosity(s.Liquid.Density, s.Temperature),
             Transport.Viscosity(s.Vapour.Density, s.Temperature));
 
-        public static readonly FourCurves Table = Build(Of);
+        public static readonly FourCurves Table = Curves(Of);
     }
 
     private static class HeatCurves
@@ -94,7 +100,7 @@ internal static class SaturationTable
             s.Liquid.IsobaricHeatCapacity,
             s.Vapour.IsobaricHeatCapacity);
 
-        public static readonly FourCurves Table = Build(Of);
+        public static readonly FourCurves Table = Curves(Of);
     }
 
     private static class ExpansionCurves
@@ -102,6 +108,6 @@ internal static class SaturationTable
         public static readonly Func<SaturationCore, Four> Of = s =>
             new(s.Vapour.IsentropicExponent, s.Liquid.Entropy, s.Vapour.Entropy, 0);
 
-        public static readonly FourCurves Table = Build(Of);
+        public static readonly FourCurves Table = Curves(Of);
     }
 }

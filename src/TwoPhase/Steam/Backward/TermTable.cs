@@ -1,3 +1,6 @@
+using System.Runtime.CompilerServices;
+using TwoPhase.Numerics;
+
 namespace TwoPhase.Steam.Backward;
 
 /// <summary>
@@ -21,6 +24,7 @@ internal sealed class TermTable
     }
 
     /// <summary>Σ n·a^I·b^J.</summary>
+    [MethodImpl(Fast.Hot)]
     public double Sum(double a, double b)
     {
         Span<double> powersOfA = stackalloc double[_powersOfA.Count], powersOfB = stackalloc double[_powersOfB.Count];
@@ -42,6 +46,7 @@ internal sealed class TermTable
         public static Range Of(sbyte[] exponents) => new(Math.Min((int)exponents.Min(), 0), Math.Max((int)exponents.Max(), 0));
 
         // Each power is the product of two of about half its exponent: short chains, and less round-off than one long one.
+        [MethodImpl(Fast.Hot)]
         public void Fill(Span<double> powers, double x)
         {
             Span<double> up = powers.Slice(-Least);
