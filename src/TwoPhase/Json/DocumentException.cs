@@ -28,7 +28,7 @@ public sealed class DocumentException : Exception
     /// <param name="message">What is wrong.</param>
     /// <param name="innerException">What was thrown; null when nothing was.</param>
     public DocumentException(string path, string message, Exception? innerException)
-        : base($"{path}: {message}", innerException) => Path = path;
+        : base(path.Length == 0 ? message : $"{path}: {message}", innerException) => Path = path;
 
     /// <summary>JSON path of the fault; empty when the text is no JSON at all.</summary>
     public string Path { get; } = "";

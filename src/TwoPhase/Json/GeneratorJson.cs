@@ -41,6 +41,7 @@ public static class GeneratorJson
         int details = error.Message.IndexOf(" Path: $", StringComparison.Ordinal);
         int position = error.Message.IndexOf(" LineNumber: ", StringComparison.Ordinal);
         int end = details >= 0 ? details : position >= 0 ? position : error.Message.Length;
-        return where + error.Message[..end].TrimEnd('.');
+        string message = string.Join(" ", error.Message[..end].Split('\r', '\n'));
+        return where + message.TrimEnd('.');
     }
 }

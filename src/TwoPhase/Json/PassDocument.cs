@@ -25,8 +25,8 @@ internal sealed class PassDocument
         Name = pass.Name,
         HeatAtFullFiring = pass.HeatAtFullFiring is { } heat ? QuantityText.Write(heat.Si(), "MW", UnitKind.Power, "W") : null,
         Sections = pass.Sections.Count == 0 ? null : [.. pass.Sections.Select(SectionDocument.Of)],
-        Meter = pass.Meter is { } meter ? MeterDocument.Of(meter) : null,
-        WetModel = pass.Meter is null ? null : pass.WetModel.Name,
+        Meter = pass.Meter is { } meter ? MeterDocument.Of(meter.Meter) : null,
+        WetModel = pass.Meter?.Model.Name,
         Tags = Names.Of(pass.Tags),
     };
 
@@ -43,7 +43,7 @@ internal sealed class PassDocument
     private Pass Metered(Pass pass, MeterDocument document, Place place)
     {
         DifferentialPressureMeter meter = document.Read(place.Member("meter"));
-        WetSteamModel? model = WetModel is null ? null : Names.WetModel(WetModel, place.Member("wetModel"));
-        return place.Member("wetModel").Make(() => pass.WithMeter(meter, model));
+        WetSteamModel model = WetModel is null ? WetSteamModel.Homogeneous : Names.WetModel(WetModel, place.Member("wetModel"));
+        return pass.WithMeter(place.Member("wetModel").Make(() => new QualityMeter(meter, model)));
     }
 }

@@ -42,14 +42,14 @@ public class GeneratorJsonTests
         Assert.Equal(("Otter Ridge 1", "north", "south"), (generator.Name, north.Name, south.Name));
         Assert.Equal(93, generator.Basis.AtmosphericPressure!.Value.Kilopascals);
         Assert.Equal("OR-PH", generator.Tags[GeneratorSignal.HeaderPressure]!.Name);
-        ClassicalVenturi venturi = Assert.IsType<ClassicalVenturi>(north.Meter);
+        ClassicalVenturi venturi = Assert.IsType<ClassicalVenturi>(north.Meter!.Meter);
         Approx.Relative(0.049 / 0.0779, venturi.DiameterRatio, 1e-12);
-        Assert.Equal("James", north.WetModel.Name);
-        Assert.Equal("Homogeneous", south.WetModel.Name);
+        Assert.Equal("James", north.Meter.Model.Name);
+        Assert.Equal("Homogeneous", south.Meter!.Model.Name);
         Assert.Equal(8.4e6, (double)north.HeatAtFullFiring!.Value.Watts);
         Assert.Equal((HeatZone.Convective, 18), (north.Sections[0].Zone, north.Sections[0].TubesInSeries));
         Approx.Relative(0.0889, north.Sections[1].OutsideDiameter.Meters, 1e-12);
-        Approx.Relative(2.5e-3, Assert.IsType<SiteConstantMeter>(south.Meter).K.SquareMeters, 1e-12);
+        Approx.Relative(2.5e-3, Assert.IsType<SiteConstantMeter>(south.Meter.Meter).K.SquareMeters, 1e-12);
         Assert.Empty(south.Sections);
         var format = new ReadingFormat(TagSet.OfPass.With(PassSignal.FeedFlow, north.Tags[PassSignal.FeedFlow]!), generator.Basis);
         Approx.Relative(999.1026 / 86400, format.Add(default, PassSignal.FeedFlow, 1).FeedFlow!.Value.KilogramsPerSecond, 1e-6);
@@ -76,7 +76,7 @@ public class GeneratorJsonTests
         ];
         foreach (DifferentialPressureMeter meter in meters)
         {
-            DifferentialPressureMeter back = GeneratorJson.Read(GeneratorJson.Write(new SteamGenerator("G", [new Pass("P", []).WithMeter(meter)]))).Passes[0].Meter!;
+            DifferentialPressureMeter back = GeneratorJson.Read(GeneratorJson.Write(new SteamGenerator("G", [new Pass("P", []).WithMeter(new(meter, WetSteamModel.Homogeneous))]))).Passes[0].Meter!.Meter;
             Assert.Equal((meter.GetType(), meter.Name), (back.GetType(), back.Name));
             if (meter is PrimaryElement element) Assert.Equal((element.PipeDiameter.Meters, element.ThroatDiameter.Meters), (((PrimaryElement)back).PipeDiameter.Meters, ((PrimaryElement)back).ThroatDiameter.Meters));
         }
@@ -87,8 +87,8 @@ public class GeneratorJsonTests
     {
         foreach (WetSteamModel model in WetSteamModel.All)
         {
-            Pass pass = new Pass("P", []).WithMeter(new OrificePlate(Length.FromMillimeters(80), Length.FromMillimeters(45), OrificeTappings.Flange), model);
-            Assert.Same(model, GeneratorJson.Read(GeneratorJson.Write(new SteamGenerator("G", [pass]))).Passes[0].WetModel);
+            Pass pass = new Pass("P", []).WithMeter(new(new OrificePlate(Length.FromMillimeters(80), Length.FromMillimeters(45), OrificeTappings.Flange), model));
+            Assert.Same(model, GeneratorJson.Read(GeneratorJson.Write(new SteamGenerator("G", [pass]))).Passes[0].Meter!.Model);
         }
     }
 
@@ -102,6 +102,7 @@ public class GeneratorJsonTests
     [InlineData("\"classicalVenturi\"", "\"pitot\"", "$.passes[0].meter.kind", "orificePlate")]
     [InlineData("\"James\"", "\"Nobody\"", "$.passes[0].wetModel", "Homogeneous")]
     [InlineData("\"James\"", "\"Chisholm\"", "$.passes[0].wetModel", "more than one")]
+    [InlineData("\"2500 mm2\" }", "\"2500 mm2\" }, \"wetModel\": \"Reader-Harris and Graham\"", "$.passes[1].wetModel", "needs the diameters")]
     [InlineData("OR-F1 [m3/d]", "OR-F1 [Mlb/h]", "$.passes[0].tags.feedFlow", "two meanings")]
     [InlineData("OR-D1 [% of 75 kPa]", "OR-D1 [%]", "$.passes[0].tags.differential", "OR-D1")]
     [InlineData("OR-PH [kPa(g)]", "OR-PH [kPa]", "$.tags.headerPressure", "gauge or absolute")]
@@ -131,6 +132,7 @@ public class GeneratorJsonTests
     [InlineData("null")]
     [InlineData("[]")]
     [InlineData("{")]
+    [InlineData("no json\n")]
     [InlineData("{ \"name\": \"x\" }")]
     [InlineData("{ \"name\": \"x\", \"passes\": [] }")]
     [InlineData("{ \"name\": \"x\", \"passes\": [null] }")]
@@ -155,6 +157,6 @@ public class GeneratorJsonTests
     {
         PrimaryElement cold = new ClassicalVenturi(Length.FromMillimeters(77.9), Length.FromMillimeters(49), ConvergentFinish.Machined)
             .MeasuredCold(CoefficientOfThermalExpansion.FromPerKelvin(12e-6), CoefficientOfThermalExpansion.FromPerKelvin(12e-6), Temperature.FromDegreesCelsius(20));
-        Assert.Throws<NotSupportedException>(() => GeneratorJson.Write(new SteamGenerator("G", [new Pass("P", []).WithMeter(cold)])));
+        Assert.Throws<NotSupportedException>(() => GeneratorJson.Write(new SteamGenerator("G", [new Pass("P", []).WithMeter(new(cold, WetSteamModel.Homogeneous))])));
     }
 }

@@ -1,0 +1,98 @@
+using TwoPhase.Metering;
+using UnitsNet;
+
+namespace PassReport.Report;
+
+/// <summary>What the report says about one pass.</summary>
+internal sealed class PassSummary
+{
+    private static readonly TimeSpan Now = TimeSpan.FromMinutes(10);
+
+    public PassSummary(PassSeries series)
+    {
+        Series = series;
+        Moves = Report.Moves.Of(series);
+        bool[] moving = Report.Moves.Inside(series.Times, Moves);
+        Settled = [.. series.Quality.Zip(moving, (quality, moves) => moves ? double.NaN : quality)];
+        Moving = moving.Count(moves => moves) / (double)moving.Length;
+        DateTimeOffset end = series.Times[^1];
+        (Flow, Pressure, Differential) = (Mean(series.Flow, end), Mean(series.Pressure, end), Mean(series.Differential, end));
+        Quality = Mean(series.Quality, end);
+        Models = ReadByModels();
+        Skipped = series.Quality.Count(double.IsNaN) / (double)series.Quality.Length;
+        OutsideDome = series.Status.Count(status => status is ReadingStatus.SubcooledOutlet or ReadingStatus.SuperheatedOutlet) / (double)series.Status.Length;
+        Largest = Moves.MaxBy(move => Math.Abs(move.Overshoot));
+        IsMovingNow = Moves.Count > 0 && Moves[^1].End >= end;
+    }
+
+    public PassSeries Series { get; }
+
+    public string Name => Series.Pass.Name;
+
+    public IReadOnlyList<Move> Moves { get; }
+
+    /// <summary>Quality with the moves taken out.</summary>
+    public double[] Settled { get; }
+
+    /// <summary>Means of the last ten minutes, SI.</summary>
+    public double Flow { get; }
+
+    public double Pressure { get; }
+
+    public double Differential { get; }
+
+    public double Quality { get; }
+
+    /// <summary>What each wet-steam model makes of the same means.</summary>
+    public IReadOnlyList<(WetSteamModel Model, QualityReading Reading)> Models { get; }
+
+    public double LowestModel => Models.Count == 0 ? double.NaN : Models.Min(model => model.Reading.Quality.DecimalFractions);
+
+    public double HighestModel => Models.Count == 0 ? double.NaN : Models.Max(model => model.Reading.Quality.DecimalFractions);
+
+    /// <summary>Share of the samples that gave no quality.</summary>
+    public double Skipped { get; }
+
+    /// <summary>Share of the samples that read below 0 or above 1.</summary>
+    public double OutsideDome { get; }
+
+    /// <summary>Share of the time in which the inputs moved.</summary>
+    public double Moving { get; }
+
+    public bool IsMovingNow { get; }
+
+    /// <summary>The move with the largest overshoot; null when nothing moved.</summary>
+    public Move? Largest { get; }
+
+    /// <summary>How far the pass reads from the middle of all passes at the end; 0 for a single pass.</summary>
+    public double Apart { get; set; }
+
+    /// <summary>How far the reading wandered at rest, against the other passes or, alone, with its inputs unchanged; NaN when it cannot be told.</summary>
+    public double Wander { get; set; } = double.NaN;
+
+    /// <summary>How much the pass asks for attention, in points of quality; skipped samples count a point for each four per cent.</summary>
+    public double Attention =>
+        100 * (Math.Abs(Apart) + (double.IsFinite(Wander) ? Math.Abs(Wander) : 0) + (0.5 * Math.Abs(Largest?.Overshoot ?? 0)) + (0.25 * Skipped) + OutsideDome + (double.IsNaN(Quality) ? 1 : 0));
+
+    private double Mean(double[] values, DateTimeOffset end) => new Windows(Series.Times, values).Mean(end, Now);
+
+    private List<(WetSteamModel Model, QualityReading Reading)> ReadByModels()
+    {
+        List<(WetSteamModel, QualityReading)> readings = [];
+        if (!(double.IsFinite(Flow) && double.IsFinite(Pressure) && double.IsFinite(Differential))) return readings;
+        DifferentialPressureMeter meter = Series.Pass.Meter!.Meter;
+        foreach (WetSteamModel model in WetSteamModel.All.Where(model => Suits(model, meter)))
+        {
+            QualityReading reading = new QualityMeter(meter, model).Quality(MassFlow.FromKilogramsPerSecond(Flow), UnitsNet.Pressure.FromPascals(Pressure), UnitsNet.Pressure.FromPascals(Differential));
+            if (reading.Status is ReadingStatus.WetSteam or ReadingStatus.SubcooledOutlet or ReadingStatus.SuperheatedOutlet) readings.Add((model, reading));
+        }
+
+        return readings;
+    }
+
+    // The two forms of ISO/TR 11583 belong to one element each.
+    private static bool Suits(WetSteamModel model, DifferentialPressureMeter meter) =>
+        (!model.NeedsGeometry || meter is PrimaryElement)
+        && (model != WetSteamModel.StevenOrifice || meter is OrificePlate)
+        && (model != WetSteamModel.ReaderHarrisGraham || meter is ClassicalVenturi or VenturiNozzle);
+}

@@ -1,0 +1,46 @@
+using PassReport.History;
+using Spectre.Console;
+using static PassReport.Report.Words;
+
+namespace PassReport.Report;
+
+/// <summary>The report on the screen: verdict, one row a pass, cautions.</summary>
+internal static class Screen
+{
+    public static void Write(IAnsiConsole console, string generator, IReadOnlyList<PassSummary> passes, SampleFaults faults, string folder)
+    {
+        DateTimeOffset[] times = passes[0].Series.Times;
+        console.WriteLine($"{generator}, {Time(times[0])} to {Time(times[^1])} ({Length(times[^1] - times[0])}, {Words.Count(times.Length, "row", "rows")})");
+        console.WriteLine();
+        foreach (string sentence in Verdict.Sentences(passes)) console.WriteLine(sentence);
+        console.WriteLine();
+        console.Write(Rows(passes));
+        console.WriteLine("Means of the last ten minutes; most in need of attention first. Models: what the published wet-steam models make of the same reading.");
+        console.WriteLine();
+        foreach (string caution in Verdict.Cautions(passes)) console.WriteLine("- " + caution);
+        if (faults.Count > 0) console.WriteLine("- " + Skipped(faults));
+        console.WriteLine();
+        console.WriteLine($"Full figures and pictures: {folder}");
+    }
+
+    private static Table Rows(IReadOnlyList<PassSummary> passes)
+    {
+        Table table = new Table().Border(TableBorder.Simple).AddColumn("Pass");
+        foreach (string heading in new[] { "Flow\nkg/s", "Pressure\nMPa abs", "Differential\nkPa", "Quality\nread", "Models\nlow – high" }) table.AddColumn(new TableColumn(new Text(heading)).RightAligned().NoWrap());
+        table.AddColumn("Why");
+        foreach (PassSummary pass in passes)
+        {
+            table.AddRow(new Text(pass.Name), new Text(Number(pass.Flow, "0.000")), new Text(Number(pass.Pressure / 1e6, "0.000")), new Text(Number(pass.Differential / 1e3, "0.00")),
+                new Text(Number(pass.Quality, "0.000")), new Text($"{Number(pass.LowestModel, "0.00")} – {Number(pass.HighestModel, "0.00")}"), new Text(Verdict.Why(pass)));
+        }
+
+        return table;
+    }
+
+    private static string Skipped(SampleFaults faults)
+    {
+        SampleFaults.Entry first = faults.Entries[0];
+        string kinds = string.Join(", ", faults.Counts.Select(pair => $"{pair.Value} {SampleFaults.Words(pair.Key)}"));
+        return $"{Words.Count(faults.Count, "sample was", "samples were")} skipped ({kinds}); the first in row {first.Row}, column {first.Column}. faults.csv lists them.";
+    }
+}
