@@ -1,5 +1,6 @@
 using MathNet.Numerics;
 using MathNet.Numerics.Distributions;
+using TwoPhase.Numerics;
 using TwoPhase.Units;
 using UnitsNet;
 
@@ -60,14 +61,15 @@ public sealed partial class MeterFit
     {
         double meanWeight = points.Average(point => point.Weight);
         double[] weights = Array.ConvertAll(points, point => point.Weight / meanWeight);
-        double value = FindMinimum.OfScalarFunctionConstrained(SumOfSquares, low, high, 1e-7 * (high - low), 200);
-        bool atLimit = value - low < 1e-5 * (high - low) || high - value < 1e-5 * (high - low);
+        double value = GoldenSection.Minimum(SumOfSquares, low, high, 1e-7 * (high - low));
+        bool atLimit = value == low || value == high;
 
         double step = 1e-4 * (high - low), moment = 0, curvature = 0;
-        double[] residuals = Residual(value), above = Residual(value + step), below = Residual(value - step);
+        double right = Math.Min(value + step, high), left = Math.Max(value - step, low);   // never where the caller said no value makes sense
+        double[] residuals = Residual(value), above = Residual(right), below = Residual(left);
         for (int i = 0; i < points.Length; i++)
         {
-            double slope = (above[i] - below[i]) / (2 * step);
+            double slope = (above[i] - below[i]) / (right - left);
             moment += weights[i] * slope * residuals[i];
             curvature += weights[i] * slope * slope;
         }

@@ -122,6 +122,15 @@ public class MeterFitTests
     }
 
     [Fact]
+    public void OneParameter_ValueAtTheEnd_NeverLeavesTheRange()
+    {
+        QualityMeter truth = new(Venturi, new ExponentModel(0.43));
+        MeterFit fit = MeterFit.OneParameter("n [-]", n => n is >= 0.2 and <= 0.35 ? new QualityMeter(Venturi, new ExponentModel(n)) : throw new InvalidOperationException("outside"), 0.2, 0.35, Readings(truth, 0, 5));
+        Assert.Equal(0.35, fit.Value);
+        Assert.True(fit.Warnings.HasFlag(FitWarnings.AtLimit));
+    }
+
+    [Fact]
     public void Fit_BadInput_Throws()
     {
         List<ReferenceReading> readings = Readings(new QualityMeter(Site, WetSteamModel.Homogeneous), 0, 2);
