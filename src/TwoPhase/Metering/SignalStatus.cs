@@ -17,4 +17,7 @@ public enum SignalStatus
 
     /// <summary>A number that the quantity cannot have: infinite, a negative flow, a temperature below freezing.</summary>
     OutOfRange,
+
+    /// <summary>The instrument stands at an end of its range, or below its low cut-off: the true value lies beyond what it can say.</summary>
+    Saturated,
 }

@@ -76,6 +76,19 @@ public class DifferentialPressureTransmitterTests
         Approx.Relative(40e3, biased.Read(biased.Current(Pressure.FromPascals(40e3))).Differential!.Value.Pascals, 1e-12);
     }
 
+    [Theory]
+    [InlineData(12, SignalStatus.Good)]
+    [InlineData(20.4, SignalStatus.Saturated)]
+    [InlineData(3.9, SignalStatus.Saturated)]
+    [InlineData(22, SignalStatus.Bad)]
+    public void WithDifferential_TransmitterStatus_BecomesTheSignals(double milliamperes, SignalStatus status)
+    {
+        PassReading reading = new PassReading(DateTimeOffset.UnixEpoch, MassFlow.FromKilogramsPerSecond(4.8), null).WithDifferential(Linear.Read(ElectricCurrent.FromMilliamperes(milliamperes)));
+        Assert.Equal(status, reading.Status(PassSignal.Differential));
+        Assert.Equal(status == SignalStatus.Good ? 30e3 : null, reading.Differential?.Pascals);
+        Assert.Equal(SignalStatus.Missing, reading.WithDifferential(default).Status(PassSignal.Differential));
+    }
+
     [Fact]
     public void Default_Reading_IsNoGoodNews()
     {
