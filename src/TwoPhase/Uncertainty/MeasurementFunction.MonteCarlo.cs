@@ -1,3 +1,4 @@
+using System.Runtime.ExceptionServices;
 using TwoPhase.Units;
 
 namespace TwoPhase.Uncertainty;
@@ -67,7 +68,17 @@ public sealed partial class MeasurementFunction
     private void Fill(InputSampler sampler, double[] results, int start, int count, bool parallel)
     {
         double[][] draws = sampler.Draw(count);
-        if (parallel) Parallel.For(0, count, () => new double[_inputs.Length], (trial, _, values) => Trial(trial, values), _ => { });
+        if (parallel)
+        {
+            try
+            {
+                Parallel.For(0, count, () => new double[_inputs.Length], (trial, _, values) => Trial(trial, values), _ => { });
+            }
+            catch (AggregateException several)
+            {
+                ExceptionDispatchInfo.Capture(several.InnerExceptions[0]).Throw();   // the same as without threads
+            }
+        }
         else
         {
             double[] values = new double[_inputs.Length];

@@ -112,6 +112,15 @@ public class QualityMeterBudgetTests
     }
 
     [Fact]
+    public void QualityFunction_CalibratedElement_StartsFromTheReading()
+    {
+        QualityMeter calibrated = new(((PrimaryElement)Venturi.Meter).Calibrated(1.02), WetSteamModel.ReaderHarrisGraham);
+        Pressure dp = calibrated.Differential(Flow, Static, MassFraction.FromDecimalFractions(X));
+        Approx.Absolute(X, calibrated.QualityFunction(Flow, Static, dp, Instruments()).Propagate().Value, 1e-10);
+        Approx.Relative(1.02 * 0.995, ((PrimaryElement)calibrated.Meter).DischargeCoefficient(1e6), 1e-15);
+    }
+
+    [Fact]
     public void QualityWithUncertainty_ModelsOwnUncertainty_IsNeverLeftOut()
     {
         Pressure dp = Venturi.Differential(Flow, Static, MassFraction.FromDecimalFractions(X));

@@ -1,3 +1,5 @@
+using FsCheck;
+using FsCheck.Xunit;
 using TwoPhase.Uncertainty;
 
 namespace TwoPhase.Tests.Uncertainty;
@@ -136,6 +138,21 @@ public class LinearReconciliationTests
         Assert.All(result.UnmeasuredUncertainties, Assert.Null);
         Assert.Equal(1, result.DegreesOfFreedom);
         Approx.Absolute(1, Math.Abs(result.TestCorrelation(0, 1)), 1e-12);
+    }
+
+    // Any four-node network, any uncertainties: balances close, no value gets less certain, and what is adjusted once stays when adjusted again.
+    [Property]
+    public void Solve_AnyUncertainties_ClosesTheBalancesAndNeverLosesCertainty(PositiveInt seed)
+    {
+        Random random = new(seed.Get);
+        double[] flows = [.. BypassFlows.Select(flow => flow * (0.8 + (0.4 * random.NextDouble())))];
+        double[] uncertainties = [.. Enumerable.Range(0, 6).Select(_ => Math.Exp(4 * (random.NextDouble() - 0.5)))];
+        LinearReconciliation result = LinearReconciliation.Solve(flows, uncertainties, Bypass);
+        LinearReconciliation again = LinearReconciliation.Solve([.. result.Adjusted], uncertainties, Bypass);
+        for (int i = 0; i < 4; i++) Approx.Absolute(0, Enumerable.Range(0, 6).Sum(j => Bypass[i, j] * result.Adjusted[j]), 1e-9);
+        for (int j = 0; j < 6; j++) Assert.True(result.AdjustedUncertainties[j] <= uncertainties[j] * (1 + 1e-12));
+        AssertAll([.. result.Adjusted], again.Adjusted, 1e-9);
+        Approx.Absolute(0, again.GlobalStatistic, 1e-12);
     }
 
     [Fact]

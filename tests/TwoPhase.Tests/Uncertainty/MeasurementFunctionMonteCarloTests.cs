@@ -158,7 +158,9 @@ public class MeasurementFunctionMonteCarloTests
         Assert.Throws<ArgumentOutOfRangeException>(() => new MeasurementFunction(v => v[0], x).Simulate(10));
         Assert.Throws<ArgumentOutOfRangeException>(() => new MeasurementFunction(v => v[0], x).SimulateUntilSettled(0));
         Assert.Contains("y", Assert.Throws<ArgumentException>(() => new MeasurementFunction(v => v[0] + v[1], x, bounded).WithCorrelation("x", "y", 0.5).Simulate()).Message, StringComparison.Ordinal);
-        Assert.Throws<ArithmeticException>(() => new MeasurementFunction(v => Math.Sqrt(v[0]), new UncertainInput("x", 0, 1)).Simulate());
+        MeasurementFunction root = new(v => Math.Sqrt(v[0]), new UncertainInput("x", 0, 1));
+        Assert.Throws<ArithmeticException>(() => root.Simulate());
+        Assert.Throws<ArithmeticException>(() => root.Simulate(parallel: true));
     }
 
     // Four standard errors of a 97.5 % quantile of a normal result: u·√(p(1 − p)/M)/φ(1.96).
