@@ -1,3 +1,4 @@
+using System.Runtime.CompilerServices;
 using System.Runtime.InteropServices;
 
 namespace TwoPhase.Numerics;
@@ -16,6 +17,7 @@ internal readonly struct Four(double a, double b, double c, double d)
     public readonly double D = d;
 
     /// <summary>Adds the four, times a weight, to four numbers.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public void AddTo(Span<double> sums, double weight)
     {
         sums[0] += weight * A;

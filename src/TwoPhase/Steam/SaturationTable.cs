@@ -37,6 +37,10 @@ internal static class SaturationTable
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static SaturatedSlopes Slopes(double pressure) => new(SlopeCurves.Table.At(pressure));
 
+    /// <summary>Ts [K].</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static double Temperature(double pressure) => Covers(pressure) ? Slopes(pressure).Temperature : Exact(pressure, FluidCurves.Of).A;
+
     /// <summary>Ts [K], σ [N/m], μ′ and μ″ [Pa·s].</summary>
     public static SaturatedFluid Fluid(double pressure) =>
         new(Covers(pressure) ? FluidCurves.Table.At(pressure) : Exact(pressure, FluidCurves.Of));

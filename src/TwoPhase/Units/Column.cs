@@ -10,6 +10,14 @@ public static class Column
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="unit"/> is no member of its enumeration.</exception>
     public static Column<TUnit> Of<TUnit>(ReadOnlySpan<double> values, TUnit unit)
         where TUnit : struct, Enum => new(values, unit);
+
+    /// <summary>A column to be filled with results in a unit.</summary>
+    /// <typeparam name="TUnit">A unit enumeration of UnitsNet, such as <c>TemperatureUnit</c>.</typeparam>
+    /// <param name="values">Where the results go.</param>
+    /// <param name="unit">The unit that they are wanted in.</param>
+    /// <exception cref="ArgumentOutOfRangeException"><paramref name="unit"/> is no member of its enumeration.</exception>
+    public static ResultColumn<TUnit> Into<TUnit>(Span<double> values, TUnit unit)
+        where TUnit : struct, Enum => new(values, unit);
 }
 
 /// <summary>
