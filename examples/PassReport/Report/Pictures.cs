@@ -15,13 +15,14 @@ internal sealed class Pictures
 
     private Pictures(TimeSpan offset) => _offset = offset;
 
-    public static void Write(string folder, string generator, IReadOnlyList<PassSummary> attention)
+    public static void Write(string folder, string name, IReadOnlyList<PassSummary> attention)
     {
+        string generator = name.Length > 40 ? name[..40] + "…" : name;
         PassSummary[] passes = [.. attention.OrderBy(pass => pass.Name, StringComparer.OrdinalIgnoreCase)];
         var pictures = new Pictures(passes[0].Series.Times[0].Offset);
-        Save(pictures.Ribbons(generator, passes), folder, "quality", 1200, 200 + (130 * passes.Length));
+        Save(pictures.Ribbons(generator, passes), folder, "quality", 1200, 260 + (120 * passes.Length));
         Save(pictures.Inputs(generator, passes), folder, "inputs", 1200, 760);
-        Save(Models(generator, attention), folder, "models", 1100, 260 + (56 * passes.Length));
+        Save(Models(generator, attention), folder, "models", 1200, 360 + (50 * passes.Length));
     }
 
     /// <summary>The history of quality, one band for each pass, all to one scale, shaded while the inputs moved.</summary>
@@ -30,7 +31,7 @@ internal sealed class Pictures
         double[] all = [.. passes.SelectMany(pass => pass.Series.Quality).Where(double.IsFinite).DefaultIfEmpty(0.8).Order()];
         double low = Math.Floor((all[(int)(0.001 * all.Length)] - 0.01) * 20) / 20, high = Math.Ceiling((all[(int)(0.999 * (all.Length - 1))] + 0.01) * 20) / 20;
         double height = (high - low) * 1.22;
-        Plot plot = New($"{generator}: quality read by each pass");
+        Plot plot = New($"{generator}: quality read by each pass, one scale for all");
         var ticks = new NumericManual();
         for (int i = 0; i < passes.Length; i++)
         {
@@ -41,7 +42,7 @@ internal sealed class Pictures
         }
 
         plot.Axes.Left.TickGenerator = ticks;
-        plot.YLabel("Quality [kg/kg], the same scale in every band");
+        plot.YLabel("Quality [kg/kg]");
         TimeAxis(plot, passes[0].Series.Times);
         plot.Axes.SetLimitsY(-0.03 * height, (passes.Length * height) - (0.1 * height));
         Legend(plot);
@@ -131,8 +132,8 @@ internal sealed class Pictures
         plot.Axes.Left.TickGenerator = new NumericManual([.. attention.Select((_, i) => (double)(attention.Count - 1 - i))], [.. attention.Select(pass => pass.Name)]);
         plot.Axes.SetLimitsY(-0.6, attention.Count - 0.4);
         plot.XLabel("Quality [kg/kg]");
-        plot.YLabel("Pass, most in need of attention on top");
-        plot.ShowLegend(Edge.Right);
+        plot.YLabel("Pass");
+        plot.ShowLegend(Edge.Bottom).Legend.Orientation = Orientation.Horizontal;
         return plot;
     }
 

@@ -14,7 +14,7 @@ internal static class Words
 
     public static string Share(double share) => Number(100 * share, share is > 0 and < 0.1 ? "0.0" : "0") + " %";
 
-    public static string Time(DateTimeOffset time) => time.ToString("yyyy-MM-dd HH:mm", CultureInfo.InvariantCulture);
+    public static string Time(DateTimeOffset time) => time.ToString("yyyy-MM-dd HH:mm zzz", CultureInfo.InvariantCulture);
 
     public static string Length(TimeSpan span) => span.TotalHours >= 48 ? Number(span.TotalDays, "0.#") + " days" : span.TotalHours >= 2 ? Number(span.TotalHours, "0.#") + " h" : Number(span.TotalMinutes, "0.#") + " min";
 

@@ -117,6 +117,7 @@ internal ref struct SteadySolver<TFluid>
 
     private readonly void Check()
     {
+        if (_pass.Ducts.Length == 0) throw new ArgumentException($"Pass '{_pass.Name}' has no section: its steady state needs its tubes.", "pass");
         string outlet = _pass.Ducts[^1].Name, first = _pass.Ducts[0].Name;
         Require.Positive(_given.RawFeedFlow, "Feed flow", Scale.KilogramsPerSecond, "conditions");
         Require.Positive(_given.RawOutletPressure, "Outlet pressure", Scale.Megapascals, "conditions");
