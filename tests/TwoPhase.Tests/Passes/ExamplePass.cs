@@ -4,7 +4,7 @@ using UnitsNet;
 namespace TwoPhase.Tests.Passes;
 
 /// <summary>An invented pass of the usual size: 671 m of 3 inch tube, half convection bank, half radiant coil.</summary>
-internal static class Examples
+internal static class ExamplePass
 {
     public static Pass Pass { get; } = new Pass("1", [Tubes("bank", 335.5).AsConvective(), Tubes("coil", 335.5)]).WithConvectiveShare(Ratio.FromPercent(41));
 
