@@ -37,7 +37,8 @@ public readonly ref struct Column<TUnit>
 #if NET
         bool known = Enum.IsDefined(unit);
 #else
-        bool known = Enum.IsDefined(typeof(TUnit), unit);
+        // Enum.IsDefined allocates there; no unit of UnitsNet is numbered zero.
+        bool known = !EqualityComparer<TUnit>.Default.Equals(unit, default);
 #endif
         if (!known)
             throw new ArgumentOutOfRangeException(nameof(unit), $"{unit} is no member of {typeof(TUnit).Name}.");
