@@ -1,3 +1,4 @@
+using System.Globalization;
 using PassReport.History;
 using TwoPhase.Metering;
 using TwoPhase.Passes;
@@ -41,11 +42,36 @@ internal sealed class PassSeries(Pass pass, DateTimeOffset[] times)
 
         foreach (PassSeries one in series)
         {
-            one.Pass.Meter!.Quality(
-                Column.Of<MassFlowUnit>(one.Flow, MassFlowUnit.KilogramPerSecond), Column.Of<PressureUnit>(one.Pressure, PressureUnit.Pascal), Column.Of<PressureUnit>(one.Differential, PressureUnit.Pascal), one.Quality, one.Status);
+            one.Infer();
+            one.CountRefused(generator, history, faults);
         }
 
         return series;
+    }
+
+    private void Infer() => Pass.Meter!.Quality(
+        Column.Of<MassFlowUnit>(Flow, MassFlowUnit.KilogramPerSecond),
+        Column.Of<PressureUnit>(Pressure, PressureUnit.Pascal),
+        Column.Of<PressureUnit>(Differential, PressureUnit.Pascal),
+        Quality,
+        Status);
+
+    /// <summary>What the meter refuses though the instrument could say it: a differential beyond the static pressure, no flow, a pressure past the critical one.</summary>
+    private void CountRefused(SteamGenerator generator, HistoryTable history, SampleFaults faults)
+    {
+        for (int row = 0; row < Status.Length; row++)
+        {
+            PassSignal? refused = Status[row] switch
+            {
+                ReadingStatus.FlowOutOfRange => PassSignal.FeedFlow,
+                ReadingStatus.PressureOutOfRange => PassSignal.OutletPressure,
+                ReadingStatus.DifferentialOutOfRange => PassSignal.Differential,
+                _ => null,
+            };
+            if (refused is not { } signal) continue;
+            string tag = (Pass.Tags[signal] ?? generator.Tags[GeneratorSignal.HeaderPressure]!).Name;
+            faults.Add(SampleFault.OutOfRange, history.Rows[row], tag, history[tag][row].ToString("G6", CultureInfo.InvariantCulture));
+        }
     }
 
     private void Take(int row, in PassReading reading)

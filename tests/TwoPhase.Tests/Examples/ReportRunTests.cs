@@ -68,6 +68,18 @@ public sealed class ReportRunTests : IDisposable
     }
 
     [Fact]
+    public void Run_PressureAndDifferentialSwapped_CountsEachSample()
+    {
+        string history = Write("h.csv", Heading, "2031-05-14T12:00:00,17.28,41.6,9507,38096,167.2", "2031-05-14T12:00:10,0,9507,41.6,38096,167.2");
+        (int code, string output, _) = Run(Write("g.json", Generator), history);
+        Assert.Equal(0, code);
+        string[] faults = File.ReadAllLines(Out("faults.csv"));
+        Assert.Contains("2,DA,out of range,9507", faults);
+        Assert.Contains("3,FA,out of range,0", faults);
+        Assert.Contains("Advisory only", output, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void Run_RepeatedAndMissingHour_AreToldApart()
     {
         string rows = ",17.28,9507,41.6,38096,167.2";
