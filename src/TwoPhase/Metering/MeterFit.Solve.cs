@@ -83,7 +83,9 @@ public sealed partial class MeterFit
             | (atLimit ? FitWarnings.AtLimit : FitWarnings.None)
             | (points.Length < 4 ? FitWarnings.FewReadings : FitWarnings.None)
             | (HasTrend(points, residuals) ? FitWarnings.Trend : FitWarnings.None);
-        return new(parameter, value, standard, residuals, deviation, warnings, meterOf(value));
+        QualityMeter fitted = meterOf(value);
+        double scatter = deviation * Math.Sqrt(1 + (1.0 / points.Length));   // of one more reading, the parameter's own part included
+        return new(parameter, value, standard, residuals, deviation, warnings, fitted.WithModelUncertainty(ModelUncertainty(fitted, points, scatter)));
 
         double[] Residual(double at)
         {
@@ -93,6 +95,19 @@ public sealed partial class MeterFit
 
         double Sum(double[] of) => of.Select((residual, i) => weights[i] * residual * residual).Sum();
         double SumOfSquares(double at) => Sum(Residual(at));
+    }
+
+    // What scatter and parameter leave of the quality, as a share of the differential: by dx/dlnΔp at the readings.
+    private static Ratio ModelUncertainty(QualityMeter meter, ReferenceReading[] points, double scatter)
+    {
+        const double least = 0.005;    // common practice, no source: no reference is better than that
+        const double most = 0.5;
+        const double step = 1e-3;
+        double slope = points.Average(point => (At(point, 1 + step) - At(point, 1 - step)) / (2 * step));
+        return Ratio.FromDecimalFractions(Fast.Clamp(scatter / Math.Abs(slope), least, most));
+
+        double At(ReferenceReading point, double factor) =>
+            meter.Quality(point.Flow, point.Pressure, Pressure.FromPascals(point.DifferentialCore * factor)).QualityCore;
     }
 
     // Slope of the residuals over lnΔp against its own standard deviation, at 99 %.

@@ -41,7 +41,7 @@ public sealed partial class MeterFit
     /// <summary>What the fit must be read with.</summary>
     public FitWarnings Warnings { get; }
 
-    /// <summary>The meter with the parameter at its best value.</summary>
+    /// <summary>The meter with the parameter at its best value. Its <see cref="QualityMeter.ModelUncertainty"/> is what scatter and parameter leave, at least 0.5 %: in a budget take constant or coefficient as exact beside it.</summary>
     public QualityMeter Meter { get; }
 
     /// <summary>Confidence interval of the parameter, by Student's t.</summary>

@@ -92,6 +92,23 @@ public class MeterFitTests
         Approx.Relative(s / Math.Sqrt(sxx) / (2 * Math.Sqrt(best)), fit.StandardUncertainty, 1e-4);
     }
 
+    // Homogeneous: dx = W dlnΔp, W = v/(vg − vl), so a scatter s of quality is s/W of the differential; the parameter adds its part, 1/n of the variance.
+    [Fact]
+    public void Meter_AfterAFit_CarriesTheScatterAsModelUncertainty()
+    {
+        QualityMeter truth = new(Site, WetSteamModel.Homogeneous);
+        List<ReferenceReading> readings = Readings(truth, 0.02, 20);
+        MeterFit fit = MeterFit.LumpedConstant(WetSteamModel.Homogeneous, readings);
+        double w = readings.Average(r =>
+        {
+            TwoPhase.Steam.Saturation steam = TwoPhase.Steam.Saturation.FromPressure(r.Pressure);
+            double vl = steam.Liquid.SpecificVolume.CubicMetersPerKilogram, vg = steam.Vapour.SpecificVolume.CubicMetersPerKilogram;
+            return fit.Meter.Quality(r.Flow, r.Pressure, r.Differential).Quality.DecimalFractions + (vl / (vg - vl));
+        });
+        Approx.Relative(fit.ResidualDeviation.DecimalFractions * Math.Sqrt(1 + (1.0 / 20)) / w, fit.Meter.ModelUncertainty.DecimalFractions, 2e-3);
+        Assert.Equal(0.5, MeterFit.LumpedConstant(WetSteamModel.Homogeneous, Readings(truth, 0, 6)).Meter.ModelUncertainty.Percent, 9);   // never zero
+    }
+
     [Fact]
     public void Warnings_DataThatCannotTell_SaySo()
     {
