@@ -24,8 +24,15 @@ public abstract partial class FrictionModel
         protected internal override double GradientCore(in FlowState flow, double roughness)
         {
             double l = LiquidOnly(flow, roughness), g = VapourOnly(flow, roughness);
-            double vapour = Math.Pow(flow.Quality, 0.875), liquid = Math.Pow(1 - flow.Quality, 0.875);
+            double vapour = SevenEighths(flow.Quality), liquid = SevenEighths(1 - flow.Quality);
             return l + ((g - l) * ((B(flow.MassFlux, Fast.Sqrt(g / l)) * vapour * liquid) + (vapour * vapour)));
+        }
+
+        // x^0.875 by square roots: a third of the cost of a power.
+        private static double SevenEighths(double x)
+        {
+            double eighth = Fast.Sqrt(Fast.Sqrt(Fast.Sqrt(x))), quarter = eighth * eighth;
+            return eighth * quarter * quarter * quarter;
         }
 
         private static double B(double massFlux, double y) => y switch
