@@ -13,7 +13,7 @@ namespace TwoPhase.Metering;
 /// <para>An element that was measured cold is taken at the saturation temperature. The Reynolds number of the pipe is 4 ṁ/(π D) · [x/μg + (1 − x)/μl]:
 /// that of the liquid at x = 0, of the vapour at x = 1.</para>
 /// <para>The reading is right only while as much steam and water leaves the pass as feed enters it, and only as good as the model: the models differ by more than any instrument errs,
-/// see <c>CompareModels</c>. Advisory only.</para>
+/// see <see cref="CompareModels"/>. Advisory only.</para>
 /// <para>Immutable, safe to share between threads. Doors allocate nothing when they do not throw.</para>
 /// </remarks>
 public sealed partial class QualityMeter
