@@ -22,7 +22,7 @@ public sealed partial class QualityMeter
         double low = Model.LowestQuality, atLow = reduced.Value(low), atDry = reduced.Value(1);
         return Model.Trend == DifferentialTrend.Unknown ? SearchEverywhere(reduced, low, atLow, atDry)
             : atLow >= 0 ? Continued(geometry, state, target, low)
-            : atDry > 0 ? Between(reduced, low, atLow, 1, atDry)
+            : atDry > (Model.Trend == DifferentialTrend.RisingThenFalling ? Residual : 0) ? Between(reduced, low, atLow, 1, atDry)
             : Model.Trend == DifferentialTrend.RisingThenFalling ? SearchBelowPeak(geometry, state, target, reduced, low, atLow, atDry)
             : Continued(geometry, state, target, 1);
     }
@@ -46,7 +46,7 @@ public sealed partial class QualityMeter
     private QualitySolution SearchBelowPeak(in MeterGeometry geometry, in MeterState state, double target, in ReducedVolume reduced, double low, double atLow, double atDry)
     {
         double peak = Peak(reduced, low, 1), atPeak = reduced.Value(peak);
-        if (!(atPeak > 0)) return Continued(geometry, state, target, 1);
+        if (!(atPeak > Residual)) return atDry > 0 ? Between(reduced, low, atLow, 1, atDry) : Continued(geometry, state, target, 1);
         double other = atDry < 0 ? BracketedRoot.TryFind(reduced, peak, atPeak, 1, atDry, 1e-15).X : 1;
         return Between(reduced, low, atLow, peak, atPeak, other);
     }

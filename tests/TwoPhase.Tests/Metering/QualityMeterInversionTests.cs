@@ -30,6 +30,22 @@ public class QualityMeterInversionTests
         }
     });
 
+    // Dry steam itself is then the second quality, give or take a rounding: the lower one is returned and the flag must not hang on it.
+    [Fact]
+    public void Quality_DryReadingThatAlsoFitsWetSteam_IsFlagged()
+    {
+        var venturi = new ClassicalVenturi(Length.FromMillimeters(110), Length.FromMillimeters(77), ConvergentFinish.Machined);
+        var meter = new QualityMeter(venturi, WetSteamModel.ReaderHarrisGraham);
+        MassFlow flow = MassFlow.FromKilogramsPerSecond(2.27);
+        Pressure pressure = Pressure.FromKilopascals(11_362), dry = meter.Differential(flow, pressure, MassFraction.FromDecimalFractions(1));
+        foreach (double factor in new[] { 1 - 1e-15, 1, 1 + 1e-15 })
+        {
+            QualityReading reading = meter.Quality(flow, pressure, dry * factor);
+            Assert.InRange(reading.Quality.DecimalFractions, 0.92, 0.95);
+            Assert.True(reading.Applicability.Exceeded.HasFlag(ApplicabilityLimits.SecondRoot));
+        }
+    }
+
     [Property(MaxTest = 25)]
     public Property Directions_ContinuedOutsideTheFormula_StillInvert() => Prop.ForAll(Cases(1, 1.6).ToArbitrary(), c =>
     {
