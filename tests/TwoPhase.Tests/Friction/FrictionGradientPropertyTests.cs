@@ -70,9 +70,10 @@ public class FrictionGradientPropertyTests
             Approx.Relative(one, model.GradientCore(flow, Roughness), 1e-13, model.Name);
     }
 
+    // Chisholm's B steps down where the ratio of the two gradients passes 9.5 and 28, as published, and roughness moves that ratio.
     [Property]
     public void Gradient_RougherTube_LosesMore(FlowState flow) => Assert.All(
-        All.Except(BlindToRoughness), model => Assert.True(model.GradientCore(flow, 46e-6) >= model.GradientCore(flow, 0) * (1 - 1e-12), model.Name));
+        All.Except(BlindToRoughness).Except([ChisholmB]), model => Assert.True(model.GradientCore(flow, 46e-6) >= model.GradientCore(flow, 0) * (1 - 1e-12), model.Name));
 
     [Fact]
     public void Gradient_ThroughThePublicDoor_IsTheCoreAndRefusesBadRoughness()
