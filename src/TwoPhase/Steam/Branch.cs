@@ -21,11 +21,11 @@ internal readonly struct Branch(int region, double cold, double hot, bool vapour
     /// <summary>Highest temperature of the stretch [K].</summary>
     public double Hot { get; } = hot;
 
-    /// <summary>Lowest temperature that a search may try: the phase boundary and the end of the formulation are hard, a border is not.</summary>
-    public double SearchFrom => startsSaturated || Cold <= LowestTemperature ? Cold : Cold - Overlap;
+    /// <summary>Lowest temperature that a search may try: saturation is hard, a border is not, and the end of the formulation as the caller says.</summary>
+    public double SearchFrom(double beyond) => startsSaturated ? Cold : Cold - (Cold <= LowestTemperature ? beyond : Overlap);
 
     /// <summary>Highest temperature that a search may try.</summary>
-    public double SearchTo(double pressure) => endsSaturated || Hot >= HighestTemperatureAt(pressure) ? Hot : Hot + Overlap;
+    public double SearchTo(double pressure, double beyond) => endsSaturated ? Hot : Hot + (Hot >= HighestTemperatureAt(pressure) ? beyond : Overlap);
 
     /// <summary>True where the temperature is bounded by saturation: the phase is known, so only round-off can lead there.</summary>
     public bool IsSaturatedAt(double temperature) => (startsSaturated && temperature <= Cold) || (endsSaturated && temperature >= Hot);

@@ -10,6 +10,7 @@ internal static class Domain
     public static double Pressure(Pressure pressure, string parameter)
     {
         double value = Require.Positive(pressure.Si(), "Pressure p", Scale.Megapascals, parameter);
+        if (value < LowestPressure) throw Require.OutOfRange(value, "Pressure p", new Scale("Pa", 1), parameter, "must be at least 1e-9 Pa");
         return value <= HighestPressure ? value : throw Require.OutOfRange(value, "Pressure p", Scale.Megapascals, parameter, "must not exceed 100 MPa");
     }
 

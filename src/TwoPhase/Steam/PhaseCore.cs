@@ -111,7 +111,14 @@ internal readonly record struct PhaseCore
             Entropy = gasConstant * (t - f),
             IsochoricHeatCapacity = -gasConstant * tt,
             PressureByTemperature = density * gasConstant * (d - dt),
-            BulkModulus = density * thermal * ((2 * d) + dd),
+            BulkModulus = AboveRoundOff(density * thermal * ((2 * d) + dd)),
         };
+    }
+
+    // At the critical point the bulk modulus is zero, and its sum is what round-off leaves of terms of 1e8 Pa, of either sign.
+    private static double AboveRoundOff(double bulkModulus)
+    {
+        const double roundOff = 1e-2;
+        return Math.Abs(bulkModulus) < roundOff ? roundOff : bulkModulus;
     }
 }

@@ -5,7 +5,10 @@ namespace TwoPhase.Steam;
 
 internal static partial class Region3
 {
-    private const double LowestDensity = 20, HighestDensity = 1000;
+    /// <summary>Above every density of the region: 765 kg/m³ at 623.15 K and 100 MPa.</summary>
+    public const double HighestDensity = 800;
+
+    private const double LowestDensity = 20;
 
     /// <summary>The state at p and T, from the backward equation v(p,T) on.</summary>
     /// <param name="pressure">p [Pa].</param>
@@ -24,7 +27,8 @@ internal static partial class Region3
         double low = subcritical && !vapour ? CriticalDensity : LowestDensity;
         double high = subcritical && vapour ? CriticalDensity : HighestDensity;
         double density = start > low && start < high ? start : (low + high) / 2;
-        PhaseCore phase = At(density, temperature);
+        double previous = double.PositiveInfinity;
+        PhaseCore phase = At(density, temperature), stable = phase;
         for (int i = 0; i < 100; i++)
         {
             if (phase.BulkModulus <= 0)
@@ -35,16 +39,21 @@ internal static partial class Region3
                 continue;
             }
 
+            stable = phase;
             double missing = pressure - phase.Pressure;
+
+            // Once the pressure is met and nears it no more, the rest is round-off.
+            if (Math.Abs(missing) <= 1e-12 * pressure && Math.Abs(missing) >= previous / 2) break;
+            previous = Math.Abs(missing);
             if (missing > 0) low = Math.Max(low, density);
             else high = Math.Min(high, density);
             double next = density + (missing * density / phase.BulkModulus);
-            if (!(next > low && next < high)) next = (low + high) / 2;
-            if (Math.Abs(next - density) <= 4e-16 * density) break;
-            density = next;
+            if (next == density) break;
+            density = next > low && next < high ? next : (low + high) / 2;
             phase = At(density, temperature);
         }
 
-        return phase with { Pressure = pressure };
+        // Within 1e-5 K of Tc the saturation equation asks for slightly more than the spinodal gives: its stable side is the answer.
+        return (phase.BulkModulus > 0 ? phase : stable) with { Pressure = pressure };
     }
 }

@@ -48,11 +48,11 @@ internal static partial class Transport
     private static double ReferenceCompressibility(double delta)
     {
         int row = delta <= 0.310559006 ? 0 : delta <= 0.776397516 ? 1 : delta <= 1.242236025 ? 2 : delta <= 1.863354037 ? 3 : 4;
-        return 1 / Polynomial(ReferenceTable.Slice(6 * row, 6), 6, 0, delta);
+        return 1 / Polynomial(ReferenceTable.AsSpan(6 * row, 6), 6, 0, delta);
     }
 
     // L(i,j), Table 2: a row for each power i of (Tc/T − 1), a column for each power j of (ρ/ρc − 1).
-    private static ReadOnlySpan<double> ConductivityTable =>
+    private static readonly double[] ConductivityTable =
     [
         1.60397357, -0.646013523, 0.111443906, 0.102997357, -0.0504123634, 0.00609859258,
         2.33771842, -2.78843778, 1.53616167, -0.463045512, 0.0832827019, -0.00719201245,
@@ -62,7 +62,7 @@ internal static partial class Transport
     ];
 
     // A(i,j), Table 6, a row for each density range.
-    private static ReadOnlySpan<double> ReferenceTable =>
+    private static readonly double[] ReferenceTable =
     [
         6.53786807199516, -5.61149954923348, 3.39624167361325, -2.27492629730878, 10.2631854662709, 1.97815050331519,
         6.52717759281799, -6.30816983387575, 8.08379285492595, -9.82240510197603, 12.1358413791395, -5.54349664571295,

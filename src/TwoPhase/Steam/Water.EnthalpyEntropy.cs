@@ -14,39 +14,52 @@ internal static partial class Water
     {
         if (!Numerics.Fast.IsFinite(enthalpy) || !Numerics.Fast.IsFinite(entropy)) return default;
 
-        double low = Math.Log(LowestPressureOf(entropy)), high = Math.Log(HighestPressure);
-        if (!(low > -700)) return default;
+        double low = Math.Log(Math.Max(LowestPressureOf(entropy), LowestPressure)), high = Math.Log(HighestPressure);
 
         double x = Math.Log(Start(enthalpy, entropy));
         if (!(x > low && x < high)) x = (low + high) / 2;
-        WaterCore best = default;
-        double smallest = double.PositiveInfinity, scale = Math.Abs(enthalpy) + 1e3;
+        WaterCore below = default, above = default;
+        double scale = Math.Abs(enthalpy) + 1e3, previous = double.PositiveInfinity;
         for (int i = 0; i < 100 && high - low > 1e-15 * Math.Abs(x); i++)
         {
             double pressure = Math.Exp(x);
-            WaterCore state = AtPressureEntropy(pressure, entropy);
+            WaterCore state = OnIsobar(pressure, Property.Entropy, entropy, SearchBeyond);
             double next = double.NaN;
             if (state.Region == 0)
             {
-                // No state: the isentrope leaves the formulation at its hot end above, at its cold end below.
+                // The isentrope leaves the formulation at its hot end above, at its cold end below.
                 if (IsTooCold(pressure, entropy)) low = x;
                 else high = x;
             }
             else
             {
-                double missing = enthalpy - state.Enthalpy;
-                if (Math.Abs(missing) < smallest) (smallest, best) = (Math.Abs(missing), state);
-                if (smallest <= 1e-14 * scale) break;
-                if (missing > 0) low = x;
-                else high = x;
-                next = x + (missing / (pressure * state.SpecificVolume));
+                double step = (enthalpy - state.Enthalpy) / (pressure * state.SpecificVolume);
+                bool settled = Math.Abs(step) < 1e-11 && Math.Abs(step) >= previous / 2;
+                if (x + step == x || settled) return Inside(state);
+                previous = Math.Abs(step);
+                if (step > 0) (low, below) = (x, state);
+                else (high, above) = (x, state);
+                next = x + step;
             }
 
             x = next > low && next < high ? next : (low + high) / 2;
         }
 
-        return smallest <= Seam ? best : default;
+        // Nothing left between two pressures: the state, or a seam with a state on either side, or an end of the formulation.
+        double short1 = Math.Abs(enthalpy - below.Enthalpy), short2 = Math.Abs(enthalpy - above.Enthalpy);
+        bool isSeam = below.Region != 0 && above.Region != 0;
+        WaterCore nearer = above.Region == 0 || (below.Region != 0 && short1 < short2) ? below : above;
+        return Math.Abs(enthalpy - nearer.Enthalpy) <= (isSeam ? Seam : EdgeTolerance * scale) ? Inside(nearer) : default;
     }
+
+    private static WaterCore Inside(in WaterCore state)
+    {
+        const double tolerance = EdgeTolerance * HighestTemperature;
+        return state.Temperature >= LowestTemperature - tolerance && state.Temperature <= Branch.HighestTemperatureAt(state.Pressure) + tolerance ? state : default;
+    }
+
+    // The search may look this far over the ends of the formulation [K]: along the isentropes of water at 0 °C the temperature falls, then rises.
+    private const double SearchBeyond = 2;
 
     // The largest jump of h across a border of regions [J/kg].
     private const double Seam = 100;

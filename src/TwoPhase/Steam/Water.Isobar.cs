@@ -8,9 +8,10 @@ internal static partial class Water
     private const double EdgeTolerance = 1e-9;
 
     /// <summary>The state at p where a property has a value: the phase is decided first, then one region's equation is solved for T.</summary>
-    private static WaterCore OnIsobar(double pressure, Property property, double value)
+    /// <remarks>A search in another variable may look up to <paramref name="beyond"/> kelvins over the ends of the formulation.</remarks>
+    private static WaterCore OnIsobar(double pressure, Property property, double value, double beyond = 0)
     {
-        if (!(pressure > 0 && pressure <= HighestPressure) || double.IsNaN(value)) return default;
+        if (!(pressure >= LowestPressure && pressure <= HighestPressure) || double.IsNaN(value)) return default;
 
         Span<Branch> branches = stackalloc Branch[Branch.Most];
         int count;
@@ -36,37 +37,61 @@ internal static partial class Water
         int last = count - 1;
         for (int i = 0; i < last; i++)
         {
-            if (value <= branches[i].At(pressure, branches[i].Hot).Value(property)) return OnBranch(branches[i], pressure, property, value);
+            if (value <= branches[i].At(pressure, branches[i].Hot).Value(property)) return OnBranch(branches[i], pressure, property, value, beyond);
         }
 
-        return OnBranch(branches[last], pressure, property, value);
+        return OnBranch(branches[last], pressure, property, value, beyond);
+    }
+
+    // In region 3 density is a variable of the equation: only T is left to solve for, on p(T), which is all but straight.
+    private static WaterCore Dense(in Branch branch, double pressure, double density)
+    {
+        double temperature = (branch.Cold + branch.Hot) / 2, step = double.PositiveInfinity;
+        PhaseCore phase = Region3.At(density, temperature);
+        for (int i = 0; i < 50 && Math.Abs(step) > 1e-15 * temperature; i++)
+        {
+            step = (pressure - phase.Pressure) / phase.PressureByTemperature;
+            temperature = Math.Min(Math.Max(temperature + step, Border13Temperature - 10), Border23.HighestTemperature + 10);
+            phase = Region3.At(density, temperature);
+        }
+
+        const double tolerance = EdgeTolerance * CriticalTemperature;
+        bool isInside = temperature >= branch.SearchFrom(0) - tolerance && temperature <= branch.SearchTo(pressure, 0) + tolerance;
+        return isInside && Math.Abs(phase.Pressure - pressure) <= EdgeTolerance * pressure ? new(3, phase with { Pressure = pressure }) : default;
     }
 
     // Newton's method in T inside the stretch, halving where a step would leave what is left of it.
-    private static WaterCore OnBranch(in Branch branch, double pressure, Property property, double value)
+    private static WaterCore OnBranch(in Branch branch, double pressure, Property property, double value, double beyond)
     {
-        double from = branch.Region == 1 && property == Property.Volume ? DensestTemperature(pressure) : branch.SearchFrom, to = branch.SearchTo(pressure), low = from, high = to;
+        if (branch.Region == 3 && property == Property.Volume) return Dense(branch, pressure, 1 / value);
+
+        double from = branch.Region == 1 && property == Property.Volume ? Math.Min(DensestTemperature(pressure), branch.Hot) : branch.SearchFrom(beyond);
+        double to = branch.SearchTo(pressure, beyond), low = from, high = to;
         double start = branch.Start(pressure, property, value);
-        double temperature = start >= low && start <= high ? start : (low + high) / 2;
+        double temperature = start >= low && start <= high ? start : (low + high) / 2, previous = double.PositiveInfinity;
         for (int i = 0; i < 100; i++)
         {
             PhaseCore phase = branch.At(pressure, temperature);
             double step = (value - phase.Value(property)) / phase.SlopeAlongIsobar(property);
-            bool stays = Math.Abs(step) <= 1e-15 * temperature;
-            if (stays) return new(branch.Region, phase);
+
+            // Once steps no longer shrink they are round-off.
+            bool settled = Math.Abs(step) <= EdgeTolerance * temperature && Math.Abs(step) >= previous / 2;
+            if (temperature + step == temperature || settled) return new(branch.Region, phase);
+            previous = Math.Abs(step);
 
             if (step > 0) low = temperature;
             else high = temperature;
             if (low >= high)
             {
-                bool onTheEdge = branch.IsSaturatedAt(temperature) || Math.Abs(step) <= EdgeTolerance * temperature;
+                // The phase is known, so at saturation only round-off can be left; the other ends are the formulation's.
+                bool onTheEdge = Math.Abs(step) <= EdgeTolerance * temperature
+                    || (branch.IsSaturatedAt(temperature) && Math.Abs(value - phase.Value(property)) <= EdgeTolerance * Math.Abs(value));
                 return onTheEdge ? new(branch.Region, phase) : default;
             }
 
             double next = temperature + step;
             if (!(next > low)) next = low == from && temperature != from ? from : (low + high) / 2;
             else if (!(next < high)) next = high == to && temperature != to ? to : (low + high) / 2;
-            if (Math.Abs(next - temperature) <= 2e-16 * temperature) return new(branch.Region, phase);
             temperature = next;
         }
 

@@ -11,7 +11,7 @@ internal static partial class Water
     /// <summary>The state at p [Pa] and T [K]; on the saturation line itself, vapour.</summary>
     public static WaterCore AtPressureTemperature(double pressure, double temperature)
     {
-        if (!(pressure > 0 && pressure <= HighestPressure && temperature >= LowestTemperature && temperature <= HighestTemperature)) return default;
+        if (!(pressure >= LowestPressure && pressure <= HighestPressure && temperature >= LowestTemperature && temperature <= HighestTemperature)) return default;
         if (temperature > Border25Temperature)
             return pressure <= HighestPressureOfRegion5 ? new(5, Region5.At(pressure, temperature)) : default;
 

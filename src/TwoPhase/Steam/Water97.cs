@@ -27,6 +27,9 @@ internal static class Water97
     /// <summary>Upper end of region 5 [K].</summary>
     public const double HighestTemperature = 2273.15;
 
+    /// <summary>Where this library begins [Pa]; the formulation begins at zero, where v has no number.</summary>
+    public const double LowestPressure = 1e-9;
+
     /// <summary>Highest pressure of regions 1 to 3 [Pa].</summary>
     public const double HighestPressure = 100e6;
 
