@@ -69,7 +69,11 @@ internal sealed class MeterDocument
 
     private static MeterDocument OfElement(PrimaryElement element, string kind, string? finish = null, string? tappings = null) => new()
     {
-        Kind = kind, Pipe = Millimetres(element.PipeDiameter), Throat = Millimetres(element.ThroatDiameter), Finish = finish, Tappings = tappings,
+        Kind = kind,
+        Pipe = Millimetres(element.PipeDiameter),
+        Throat = Millimetres(element.ThroatDiameter),
+        Finish = finish,
+        Tappings = tappings,
     };
 
     private static string Millimetres(Length length) => QuantityText.Write(length.Si(), "mm", UnitKind.Length, "m");

@@ -71,8 +71,14 @@ public readonly partial struct PassReading
                 var nothing = Signal.Without(SignalStatus.Missing);
                 return new()
                 {
-                    FeedFlow = nothing, Differential = nothing, OutletPressure = nothing, InletPressure = nothing,
-                    OutletTemperature = nothing, FeedTemperature = nothing, Firing = nothing, FeedValve = nothing,
+                    FeedFlow = nothing,
+                    Differential = nothing,
+                    OutletPressure = nothing,
+                    InletPressure = nothing,
+                    OutletTemperature = nothing,
+                    FeedTemperature = nothing,
+                    Firing = nothing,
+                    FeedValve = nothing,
                 };
             }
         }

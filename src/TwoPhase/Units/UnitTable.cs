@@ -52,8 +52,16 @@ internal static class UnitTable
 
     private static readonly Dictionary<string, double> WaterColumns = new(StringComparer.OrdinalIgnoreCase)
     {
-        ["inH2O"] = MetresPerInch, ["inWC"] = MetresPerInch, ["inWG"] = MetresPerInch, ["\"H2O"] = MetresPerInch, ["\"WC"] = MetresPerInch, ["ftH2O"] = MetresPerFoot,
-        ["mmH2O"] = 1e-3, ["mmWC"] = 1e-3, ["cmH2O"] = 1e-2, ["mH2O"] = 1,
+        ["inH2O"] = MetresPerInch,
+        ["inWC"] = MetresPerInch,
+        ["inWG"] = MetresPerInch,
+        ["\"H2O"] = MetresPerInch,
+        ["\"WC"] = MetresPerInch,
+        ["ftH2O"] = MetresPerFoot,
+        ["mmH2O"] = 1e-3,
+        ["mmWC"] = 1e-3,
+        ["cmH2O"] = 1e-2,
+        ["mH2O"] = 1,
     };
 
     private const string MilliOrMega = "millipascal or megapascal (MPa)";
@@ -61,8 +69,12 @@ internal static class UnitTable
     // Spellings whose first letter means a thousand to one trade and a million, or a thousandth, to another.
     private static readonly Dictionary<string, string> TwoMeanings = new(StringComparer.Ordinal)
     {
-        ["mPa"] = MilliOrMega, ["mPag"] = MilliOrMega, ["mPaa"] = MilliOrMega, ["mW"] = "milliwatt or megawatt (MW)",
-        ["ton"] = "short (shortton), long (longton) or metric tons (t)", ["tons"] = "short (shortton), long (longton) or metric tons (t)",
+        ["mPa"] = MilliOrMega,
+        ["mPag"] = MilliOrMega,
+        ["mPaa"] = MilliOrMega,
+        ["mW"] = "milliwatt or megawatt (MW)",
+        ["ton"] = "short (shortton), long (longton) or metric tons (t)",
+        ["tons"] = "short (shortton), long (longton) or metric tons (t)",
     };
 
     private static readonly string[] ThousandOrMillion = ["lb", "lbs", "lbm", "Btu", "scf", "gal", "bbl", "pph", "scfd", "scfh", "BtuH"];
