@@ -21,10 +21,14 @@ internal sealed class MeterDocument
 
     public string? K { get; set; }
 
+    /// <summary>C in place over C of the standard; 1 when left out.</summary>
+    public double? CalibrationFactor { get; set; }
+
+    public ColdDocument? MeasuredCold { get; set; }
+
     public static MeterDocument Of(DifferentialPressureMeter meter) => meter switch
     {
         SiteConstantMeter site => new() { Kind = SiteConstant, K = QuantityText.Write(site.K.Si(), "mm2", UnitKind.Area, "m2") },
-        PrimaryElement { IsMeasuredCold: true } => throw new NotSupportedException("A document holds the diameters at working temperature: write meter.HotAt(temperature)."),
         ClassicalVenturi venturi => OfElement(venturi, Venturi, finish: Names.Of(venturi.Finish)),
         OrificePlate plate => OfElement(plate, Orifice, tappings: Names.Of(plate.Tappings)),
         Isa1932Nozzle nozzle => OfElement(nozzle, Isa),
@@ -52,7 +56,10 @@ internal sealed class MeterDocument
             _ => throw place.Member("kind").Fault($"'{kind}' is none of {Venturi}, {Orifice}, {Isa}, {LongRadius}, {NozzleVenturi}, {SiteConstant}"),
         };
         Length pipe = place.Member("pipe").Length(Pipe), throat = place.Member("throat").Length(Throat);
-        return place.Member("throat").Make(() => make(pipe, throat));
+        return new Change<PrimaryElement>(place, place.Member("throat").Make(() => make(pipe, throat)))
+            .With("measuredCold", MeasuredCold, (it, cold, at) => cold.Add(it, at))
+            .With("calibrationFactor", CalibrationFactor, (it, factor, _) => it.Calibrated(factor!.Value))
+            .Made;
     }
 
     private Func<Length, Length, PrimaryElement> Venturis(Place place)
@@ -70,11 +77,11 @@ internal sealed class MeterDocument
     private static MeterDocument OfElement(PrimaryElement element, string kind, string? finish = null, string? tappings = null) => new()
     {
         Kind = kind,
-        Pipe = Millimetres(element.PipeDiameter),
-        Throat = Millimetres(element.ThroatDiameter),
+        Pipe = QuantityText.Millimetres(element.PipeDiameter.Si()),
+        Throat = QuantityText.Millimetres(element.ThroatDiameter.Si()),
         Finish = finish,
         Tappings = tappings,
+        CalibrationFactor = element.CalibrationFactor == 1 ? null : element.CalibrationFactor,
+        MeasuredCold = ColdDocument.Of(element),
     };
-
-    private static string Millimetres(Length length) => QuantityText.Write(length.Si(), "mm", UnitKind.Length, "m");
 }

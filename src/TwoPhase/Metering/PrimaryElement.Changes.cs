@@ -81,8 +81,17 @@ public abstract partial class PrimaryElement
     private static double Coefficient(CoefficientOfThermalExpansion value, string parameter) =>
         Require.Within(value.As(CoefficientOfThermalExpansionUnit.PerKelvin), 0, 1e-4, "Coefficient of thermal expansion", new Scale("1/K", 1), parameter);
 
-    private sealed class ThermalGrowth(double pipeCoefficient, double throatCoefficient, double reference)
+    /// <summary>How the element was measured cold; null when its diameters are those at work.</summary>
+    internal ThermalGrowth? Growth => _growth;
+
+    internal sealed class ThermalGrowth(double pipeCoefficient, double throatCoefficient, double reference)
     {
+        public double PipeCoefficient => pipeCoefficient;
+
+        public double ThroatCoefficient => throatCoefficient;
+
+        public double Reference => reference;
+
         public MeterGeometry Apply(in MeterGeometry cold, double temperature) => new(
             cold.PipeDiameter * (1 + (pipeCoefficient * (temperature - reference))),
             cold.ThroatDiameter * (1 + (throatCoefficient * (temperature - reference))));

@@ -19,7 +19,7 @@ namespace TwoPhase.Metering;
 public sealed partial class QualityMeter
 {
     /// <summary>Relative standard uncertainty (k = 1) of the differential that a model predicts, as long as it has not been fitted to the site.</summary>
-    private const double UnfittedModelUncertainty = 0.03;
+    internal const double UnfittedModelUncertainty = 0.03;
 
     private readonly double _modelUncertainty = UnfittedModelUncertainty;
 

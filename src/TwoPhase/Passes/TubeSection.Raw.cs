@@ -23,6 +23,9 @@ public sealed partial class TubeSection
 
     internal double RawRise => _rise ?? RawLength * Math.Sin(_inclination);
 
+    /// <summary>The rise where the drawing gives it; null where it follows from the inclination.</summary>
+    internal double? GivenRise => _rise;
+
     internal double RawInclination => _inclination;
 
     internal double RawRoughness => _roughness;
@@ -32,6 +35,9 @@ public sealed partial class TubeSection
     internal double RawScale => _scale;
 
     internal double RawScaleConductivity => _scaleConductivity;
+
+    /// <summary>The metal where the drawing gives it; null where it follows from the diameters.</summary>
+    internal double? GivenMetalMass => _metalMass;
 
     internal double RawMetalMass => _metalMass
         ?? (ParallelTubes * (Math.PI / 4) * ((_outsideDiameter * _outsideDiameter) - (_bore * _bore)) * RawLength * Metal.RawDensity) + _finMetal;

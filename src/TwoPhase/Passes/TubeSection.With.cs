@@ -28,9 +28,7 @@ public sealed partial class TubeSection
         double mass = Require.Positive(metal.Si(), $"Metal of section '{name}'", Kilograms, nameof(metal));
         double length = water / (Math.PI / 4 * diameter * diameter);
         double outside = Math.Sqrt((diameter * diameter) + (mass / (TubeMetal.CarbonSteel.RawDensity * length * Math.PI / 4)));
-        TubeSection header = Crossover(name, bore, Length.FromMeters(outside), Length.FromMeters(length), lossCoefficient);
-        header._metalMass = mass;
-        return header;
+        return Crossover(name, bore, Length.FromMeters(outside), Length.FromMeters(length), lossCoefficient).WithMetalMass(metal);
     }
 
     /// <summary>With return bends in each flow path.</summary>
@@ -129,6 +127,15 @@ public sealed partial class TubeSection
     {
         TubeSection copy = Copy();
         copy.Metal = Require.NotNull(metal, nameof(metal));
+        return copy;
+    }
+
+    /// <summary>With the mass of its metal, fins included, as the drawing gives it; else it follows from the diameters.</summary>
+    /// <param name="mass">Greater than zero.</param>
+    public TubeSection WithMetalMass(Mass mass)
+    {
+        TubeSection copy = Copy();
+        copy._metalMass = Require.Positive(mass.Si(), Of("Metal"), Kilograms, nameof(mass));
         return copy;
     }
 

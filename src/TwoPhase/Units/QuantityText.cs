@@ -27,6 +27,12 @@ internal static class QuantityText
         return $"{si.ToString("R", CultureInfo.InvariantCulture)} {siUnit}";
     }
 
+    /// <summary>A length in mm.</summary>
+    public static string Millimetres(double si) => Write(si, "mm", UnitKind.Length, "m");
+
+    /// <summary>A length in m.</summary>
+    public static string Metres(double si) => Write(si, "m", UnitKind.Length, "m");
+
     /// <summary>The number at the start of a text, and what stands behind it.</summary>
     public static (double Number, string Tail) SplitNumber(string text)
     {

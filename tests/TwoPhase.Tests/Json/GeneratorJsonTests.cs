@@ -152,11 +152,4 @@ public class GeneratorJsonTests
         Assert.Contains("line 3, column", error.Message, StringComparison.Ordinal);
     }
 
-    [Fact]
-    public void Write_ColdElement_IsRefusedRatherThanLost()
-    {
-        PrimaryElement cold = new ClassicalVenturi(Length.FromMillimeters(77.9), Length.FromMillimeters(49), ConvergentFinish.Machined)
-            .MeasuredCold(CoefficientOfThermalExpansion.FromPerKelvin(12e-6), CoefficientOfThermalExpansion.FromPerKelvin(12e-6), Temperature.FromDegreesCelsius(20));
-        Assert.Throws<NotSupportedException>(() => GeneratorJson.Write(new SteamGenerator("G", [new Pass("P", []).WithMeter(new(cold, WetSteamModel.Homogeneous))])));
-    }
 }
