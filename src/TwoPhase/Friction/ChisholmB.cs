@@ -23,7 +23,7 @@ public abstract partial class FrictionModel
 
         protected internal override double GradientCore(in FlowState flow, double roughness)
         {
-            double l = LiquidOnly(flow, roughness), g = VapourOnly(flow, roughness);
+            (double l, double g) = FrictionFactor.GradientPair(flow, roughness);
             double vapour = SevenEighths(flow.Quality), liquid = SevenEighths(1 - flow.Quality);
             return l + ((g - l) * ((B(flow.MassFlux, Fast.Sqrt(g / l)) * vapour * liquid) + (vapour * vapour)));
         }

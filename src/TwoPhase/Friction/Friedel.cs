@@ -1,4 +1,5 @@
 using TwoPhase.Flow;
+using TwoPhase.Numerics;
 using TwoPhase.Units;
 
 namespace TwoPhase.Friction;
@@ -24,16 +25,16 @@ public abstract partial class FrictionModel
         protected internal override double GradientCore(in FlowState flow, double roughness)
         {
             double x = flow.Quality, y = 1 - x, flux = flow.MassFlux * Mixture.HomogeneousVolume(flow);
-            double l = LiquidOnly(flow, roughness), g = VapourOnly(flow, roughness);
+            (double l, double g) = FrictionFactor.GradientPair(flow, roughness);
             double viscosityRatio = flow.VapourViscosity / flow.LiquidViscosity;
             double froude = flux * flux / (SiDoor.StandardGravity * flow.Bore);
             double weber = flow.MassFlux * flux * flow.Bore / flow.SurfaceTension;
 
             // F H / (Fr^… We^…) as one exponential: seven powers would cost more than both friction factors together.
             // A logarithm of 0 (x at an end, critical point) is −∞ and the term 0, as it should be.
-            double slip = Math.Exp((0.78 * Math.Log(x)) + (0.224 * Math.Log(y))
-                + (0.91 * Math.Log(flow.LiquidDensity / flow.VapourDensity)) + (0.19 * Math.Log(viscosityRatio)) + (0.7 * Math.Log(1 - viscosityRatio))
-                - (0.0454 * Math.Log(froude)) - (0.035 * Math.Log(weber)));
+            double slip = Math.Exp(
+                Four.LogOfPowers(new(x, y, flow.LiquidDensity / flow.VapourDensity, viscosityRatio), new(0.78, 0.224, 0.91, 0.19))
+                + Four.LogOfPowers(new(1 - viscosityRatio, froude, weber, 1), new(0.7, -0.0454, -0.035, 0)));
             return (l * ((y * y) + (3.24 * slip))) + (g * x * x);
         }
 

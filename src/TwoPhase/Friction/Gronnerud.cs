@@ -1,4 +1,5 @@
 using TwoPhase.Flow;
+using TwoPhase.Numerics;
 using TwoPhase.Units;
 
 namespace TwoPhase.Friction;
@@ -28,7 +29,7 @@ public abstract partial class FrictionModel
             double phi = froude >= 1 ? 1 : Math.Exp(0.3 * logarithm) + (0.0055 * logarithm * logarithm);
             double x2 = x * x, x10 = x2 * x2 * x2 * x2 * x2;
             double share = phi * (x + (4 * (Math.Pow(x, 1.8) - (x10 * Math.Sqrt(phi)))));
-            double ratio = flow.LiquidDensity / flow.VapourDensity * Math.Pow(flow.VapourViscosity / flow.LiquidViscosity, 0.25);
+            double ratio = flow.LiquidDensity / flow.VapourDensity * Fast.Sqrt(Fast.Sqrt(flow.VapourViscosity / flow.LiquidViscosity));
             return LiquidOnly(flow, roughness) * (1 + (share * (ratio - 1)));
         }
 

@@ -23,7 +23,7 @@ public abstract partial class FrictionModel
         protected internal override double GradientCore(in FlowState flow, double roughness)
         {
             double x = flow.Quality;
-            double a = LiquidOnly(flow, roughness), b = VapourOnly(flow, roughness);
+            (double a, double b) = FrictionFactor.GradientPair(flow, roughness);
             return ((a + (2 * (b - a) * x)) * Fast.Cbrt(1 - x)) + (b * x * x * x);
         }
 

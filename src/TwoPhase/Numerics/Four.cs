@@ -1,5 +1,8 @@
 using System.Runtime.CompilerServices;
 using System.Runtime.InteropServices;
+#if NET
+using System.Runtime.Intrinsics;
+#endif
 
 namespace TwoPhase.Numerics;
 
@@ -15,6 +18,17 @@ internal readonly struct Four(double a, double b, double c, double d)
     public readonly double B = b;
     public readonly double C = c;
     public readonly double D = d;
+
+    /// <summary>ln of the product of the four raised to four exponents: the logarithms cost little more than one.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static double LogOfPowers(Four factors, Four exponents)
+    {
+#if NET
+        if (Vector256.IsHardwareAccelerated)
+            return Vector256.Sum(Vector256.Create(exponents.A, exponents.B, exponents.C, exponents.D) * Vector256.Log(Vector256.Create(factors.A, factors.B, factors.C, factors.D)));
+#endif
+        return (exponents.A * Math.Log(factors.A)) + (exponents.B * Math.Log(factors.B)) + (exponents.C * Math.Log(factors.C)) + (exponents.D * Math.Log(factors.D));
+    }
 
     /// <summary>Adds the four, times a weight, to four numbers.</summary>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]

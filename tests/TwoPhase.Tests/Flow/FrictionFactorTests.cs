@@ -31,6 +31,22 @@ public class FrictionFactorTests
         return Math.Abs((s / right) - 1) < 4e-15;
     }
 
+    /// <summary>The two solutions of Colebrook's equation, one by one and both phases at once, through laminar flow of either.</summary>
+    [Property]
+    public void GradientPair_AnyFlow_IsThatOfEitherPhaseAlone(NormalFloat a, NormalFloat b, NormalFloat c)
+    {
+        const double bore = 0.078;
+        FlowState flow = FlowStates.At(6e6, 0.3, 3, bore, 0);
+        double massFlux = 3 * Math.Pow(10, 4 * Unit(a.Get));
+        flow = flow with { MassFlux = massFlux, VapourViscosity = flow.VapourViscosity * Math.Pow(10, 3 * Unit(b.Get)) };
+        double roughness = Unit(c.Get) < 0.1 ? 0 : bore * Math.Pow(10, (6.5 * Unit(c.Get)) - 7);
+
+        (double liquid, double vapour) = FrictionFactor.GradientPair(flow, roughness);
+
+        Approx.Relative(FrictionFactor.GradientCore(massFlux, bore, flow.LiquidDensity, flow.LiquidViscosity, roughness), liquid, 1e-14, $"liquid at {massFlux}");
+        Approx.Relative(FrictionFactor.GradientCore(massFlux, bore, flow.VapourDensity, flow.VapourViscosity, roughness), vapour, 1e-14, $"vapour at {massFlux}");
+    }
+
     [Theory]
     [InlineData(2040, 64.0 / 2040)]
     [InlineData(1, 64.0)]
