@@ -36,6 +36,9 @@ internal sealed class SectionDocument
     /// <summary>Friction of a ribbed bore over that of a plain one; its presence makes the bore ribbed.</summary>
     public double? RibFrictionMultiplier { get; set; }
 
+    /// <summary>Friction of a plain bore over that of the formula, from a fit.</summary>
+    public double? FrictionFactor { get; set; }
+
     public double? LossCoefficient { get; set; }
 
     public MetalDocument? Metal { get; set; }
@@ -58,6 +61,7 @@ internal sealed class SectionDocument
         Scale = ScaleDocument.Of(section),
         Fins = FinsDocument.Of(section),
         RibFrictionMultiplier = section.IsRibbed ? section.FrictionMultiplier : null,
+        FrictionFactor = section.IsRibbed || section.FrictionMultiplier == 1 ? null : section.FrictionMultiplier,
         LossCoefficient = section.LossCoefficient == 0 ? null : section.LossCoefficient,
         Metal = section.Metal == TubeMetal.CarbonSteel ? null : MetalDocument.Of(section.Metal),
         MetalMass = section.GivenMetalMass is { } mass ? QuantityText.Write(mass, "kg", UnitKind.Mass, "kg") : null,
@@ -78,6 +82,7 @@ internal sealed class SectionDocument
             .With("roughness", Roughness, (it, roughness, at) => it.WithRoughness(at.Length(roughness)))
             .With("fins", Fins, (it, fins, at) => fins.Add(it, at))
             .With("ribFrictionMultiplier", RibFrictionMultiplier, (it, factor, _) => it.WithRibs(factor!.Value))
+            .With("frictionFactor", FrictionFactor, (it, factor, _) => it.WithFrictionFactor(factor!.Value))
             .With("lossCoefficient", LossCoefficient, (it, loss, _) => it.WithLossCoefficient(loss!.Value))
             .With("metal", Metal, (it, metal, at) => it.WithMetal(metal.Read(at)))
             .With("metalMass", MetalMass, (it, mass, at) => it.WithMetalMass(Mass.FromKilograms(at.Quantity(mass, UnitKind.Mass))))

@@ -7,7 +7,7 @@ namespace TwoPhase.Passes;
 /// <remarks>Immutable; each <c>With…</c> method returns a changed copy.</remarks>
 public sealed partial class Pass
 {
-    private readonly TubeSection[] _sections;
+    private TubeSection[] _sections;
 
     /// <summary>A pass from its sections.</summary>
     /// <param name="name">Name of the pass.</param>
@@ -89,6 +89,14 @@ public sealed partial class Pass
     {
         Require.Positive(heat.Si(), $"Heat at full firing of pass '{Name}'", Scale.Megawatts, nameof(heat));
         return Changed(pass => pass.HeatAtFullFiring = heat);
+    }
+
+    /// <summary>The pass with the friction of every section times a factor, as a fit to measured pressures has found it.</summary>
+    /// <param name="factor">Factor on what the sections have now.</param>
+    public Pass WithFrictionFactor(double factor)
+    {
+        Require.Positive(factor, $"Friction factor of pass '{Name}'", Scale.None, nameof(factor));
+        return Changed(pass => pass._sections = Array.ConvertAll(_sections, section => section.WithFrictionFactor(section.FrictionMultiplier * factor)));
     }
 
     /// <summary>The pass with an outlet line.</summary>

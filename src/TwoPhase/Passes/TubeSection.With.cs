@@ -112,6 +112,15 @@ public sealed partial class TubeSection
         return copy;
     }
 
+    /// <summary>With friction that is that of the formula times a factor, as a fit to measured pressures has found it.</summary>
+    /// <param name="factor">Factor, 0.01 to 100; over that of ribs where the bore has some.</param>
+    public TubeSection WithFrictionFactor(double factor)
+    {
+        TubeSection copy = Copy();
+        copy._frictionMultiplier = Require.Within(factor, 0.01, 100, Of("Friction factor"), Scale.None, nameof(factor));
+        return copy;
+    }
+
     /// <summary>With a further loss, on the section's own mass flux.</summary>
     /// <param name="coefficient">K, not negative.</param>
     public TubeSection WithLossCoefficient(double coefficient)

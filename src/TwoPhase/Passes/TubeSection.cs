@@ -87,7 +87,7 @@ public sealed partial class TubeSection
     /// <summary>Metal that fins add, all tubes together.</summary>
     public Mass FinMetal => Mass.FromKilograms(_finMetal);
 
-    /// <summary>Factor on the friction of a plain bore: 1 for plain tubes, the maker's figure for ribbed ones.</summary>
+    /// <summary>Factor on the friction of a plain bore: 1 for plain tubes, the maker's figure for ribbed ones, or what a fit has found.</summary>
     public double FrictionMultiplier => _frictionMultiplier;
 
     /// <summary>Whether the bore is ribbed (rifled): correlations for plain bores are then used outside their range and flagged.</summary>
