@@ -6,6 +6,7 @@ namespace TwoPhase.Units;
 /// <summary>
 /// The one way in: a quantity becomes a coherent SI double. Units that plants use are converted with factors of our own,
 /// since reading t/h or psi through UnitsNet allocates; any other unit goes through UnitsNet.
+/// A number with its unit is for columns.
 /// </summary>
 internal static class SiDoor
 {
@@ -19,24 +20,28 @@ internal static class SiDoor
     /// <summary>IT British thermal unit; exact by the definition Btu/lb = 2.326 kJ/kg.</summary>
     public const double JoulesPerBtu = 2326 * KilogramsPerPound;
 
-    public static double Si(this Pressure quantity) => quantity.Unit switch
+    public static double Si(this Pressure quantity) => Si(quantity.Value, quantity.Unit);
+
+    public static double Si(double value, PressureUnit unit) => unit switch
     {
-        PressureUnit.Pascal => quantity.Value,
-        PressureUnit.Kilopascal => quantity.Value * 1e3,
-        PressureUnit.Megapascal => quantity.Value * 1e6,
-        PressureUnit.Bar => quantity.Value * 1e5,
-        PressureUnit.Millibar or PressureUnit.Hectopascal => quantity.Value * 100,
-        PressureUnit.PoundForcePerSquareInch => quantity.Value * PascalsPerPsi,
-        PressureUnit.KilogramForcePerSquareCentimeter => quantity.Value * (StandardGravity * 1e4),
-        _ => quantity.As(PressureUnit.Pascal),
+        PressureUnit.Pascal => value,
+        PressureUnit.Kilopascal => value * 1e3,
+        PressureUnit.Megapascal => value * 1e6,
+        PressureUnit.Bar => value * 1e5,
+        PressureUnit.Millibar or PressureUnit.Hectopascal => value * 100,
+        PressureUnit.PoundForcePerSquareInch => value * PascalsPerPsi,
+        PressureUnit.KilogramForcePerSquareCentimeter => value * (StandardGravity * 1e4),
+        _ => new Pressure(value, unit).As(PressureUnit.Pascal),
     };
 
-    public static double Si(this Temperature quantity) => quantity.Unit switch
+    public static double Si(this Temperature quantity) => Si(quantity.Value, quantity.Unit);
+
+    public static double Si(double value, TemperatureUnit unit) => unit switch
     {
-        TemperatureUnit.Kelvin => quantity.Value,
-        TemperatureUnit.DegreeCelsius => quantity.Value + 273.15,
-        TemperatureUnit.DegreeFahrenheit => (quantity.Value + 459.67) / 1.8,
-        _ => quantity.As(TemperatureUnit.Kelvin),
+        TemperatureUnit.Kelvin => value,
+        TemperatureUnit.DegreeCelsius => value + 273.15,
+        TemperatureUnit.DegreeFahrenheit => (value + 459.67) / 1.8,
+        _ => new Temperature(value, unit).As(TemperatureUnit.Kelvin),
     };
 
     public static double Si(this TemperatureDelta quantity) => quantity.Unit switch
@@ -46,35 +51,41 @@ internal static class SiDoor
         _ => quantity.As(TemperatureDeltaUnit.Kelvin),
     };
 
-    public static double Si(this MassFlow quantity) => quantity.Unit switch
+    public static double Si(this MassFlow quantity) => Si(quantity.Value, quantity.Unit);
+
+    public static double Si(double value, MassFlowUnit unit) => unit switch
     {
-        MassFlowUnit.KilogramPerSecond => quantity.Value,
-        MassFlowUnit.GramPerSecond => quantity.Value * 1e-3,
-        MassFlowUnit.KilogramPerHour => quantity.Value / 3600,
-        MassFlowUnit.TonnePerHour => quantity.Value / 3.6,
-        MassFlowUnit.TonnePerDay => quantity.Value / 86.4,
-        MassFlowUnit.PoundPerHour => quantity.Value * (KilogramsPerPound / 3600),
-        MassFlowUnit.PoundPerSecond => quantity.Value * KilogramsPerPound,
-        _ => quantity.As(MassFlowUnit.KilogramPerSecond),
+        MassFlowUnit.KilogramPerSecond => value,
+        MassFlowUnit.GramPerSecond => value * 1e-3,
+        MassFlowUnit.KilogramPerHour => value / 3600,
+        MassFlowUnit.TonnePerHour => value / 3.6,
+        MassFlowUnit.TonnePerDay => value / 86.4,
+        MassFlowUnit.PoundPerHour => value * (KilogramsPerPound / 3600),
+        MassFlowUnit.PoundPerSecond => value * KilogramsPerPound,
+        _ => new MassFlow(value, unit).As(MassFlowUnit.KilogramPerSecond),
     };
 
-    public static double Si(this VolumeFlow quantity) => quantity.Unit switch
+    public static double Si(this VolumeFlow quantity) => Si(quantity.Value, quantity.Unit);
+
+    public static double Si(double value, VolumeFlowUnit unit) => unit switch
     {
-        VolumeFlowUnit.CubicMeterPerSecond => quantity.Value,
-        VolumeFlowUnit.CubicMeterPerHour => quantity.Value / 3600,
-        VolumeFlowUnit.CubicMeterPerDay => quantity.Value / 86400,
-        _ => quantity.As(VolumeFlowUnit.CubicMeterPerSecond),
+        VolumeFlowUnit.CubicMeterPerSecond => value,
+        VolumeFlowUnit.CubicMeterPerHour => value / 3600,
+        VolumeFlowUnit.CubicMeterPerDay => value / 86400,
+        _ => new VolumeFlow(value, unit).As(VolumeFlowUnit.CubicMeterPerSecond),
     };
 
-    public static double Si(this Length quantity) => quantity.Unit switch
+    public static double Si(this Length quantity) => Si(quantity.Value, quantity.Unit);
+
+    public static double Si(double value, LengthUnit unit) => unit switch
     {
-        LengthUnit.Meter => quantity.Value,
-        LengthUnit.Millimeter => quantity.Value * 1e-3,
-        LengthUnit.Centimeter => quantity.Value * 1e-2,
-        LengthUnit.Micrometer => quantity.Value * 1e-6,
-        LengthUnit.Inch => quantity.Value * MetresPerInch,
-        LengthUnit.Foot => quantity.Value * MetresPerFoot,
-        _ => quantity.As(LengthUnit.Meter),
+        LengthUnit.Meter => value,
+        LengthUnit.Millimeter => value * 1e-3,
+        LengthUnit.Centimeter => value * 1e-2,
+        LengthUnit.Micrometer => value * 1e-6,
+        LengthUnit.Inch => value * MetresPerInch,
+        LengthUnit.Foot => value * MetresPerFoot,
+        _ => new Length(value, unit).As(LengthUnit.Meter),
     };
 
     public static double Si(this Area quantity) => quantity.Unit switch
@@ -94,13 +105,15 @@ internal static class SiDoor
         _ => quantity.As(VolumeUnit.CubicMeter),
     };
 
-    public static double Si(this SpecificEnergy quantity) => quantity.Unit switch
+    public static double Si(this SpecificEnergy quantity) => Si(quantity.Value, quantity.Unit);
+
+    public static double Si(double value, SpecificEnergyUnit unit) => unit switch
     {
-        SpecificEnergyUnit.JoulePerKilogram => quantity.Value,
-        SpecificEnergyUnit.KilojoulePerKilogram => quantity.Value * 1e3,
-        SpecificEnergyUnit.MegajoulePerKilogram => quantity.Value * 1e6,
-        SpecificEnergyUnit.BtuPerPound => quantity.Value * 2326,
-        _ => quantity.As(SpecificEnergyUnit.JoulePerKilogram),
+        SpecificEnergyUnit.JoulePerKilogram => value,
+        SpecificEnergyUnit.KilojoulePerKilogram => value * 1e3,
+        SpecificEnergyUnit.MegajoulePerKilogram => value * 1e6,
+        SpecificEnergyUnit.BtuPerPound => value * 2326,
+        _ => new SpecificEnergy(value, unit).As(SpecificEnergyUnit.JoulePerKilogram),
     };
 
     public static double Si(this SpecificEntropy quantity) => quantity.Unit switch
@@ -111,26 +124,32 @@ internal static class SiDoor
         _ => quantity.As(SpecificEntropyUnit.JoulePerKilogramKelvin),
     };
 
-    public static double Si(this Density quantity) => quantity.Unit switch
+    public static double Si(this Density quantity) => Si(quantity.Value, quantity.Unit);
+
+    public static double Si(double value, DensityUnit unit) => unit switch
     {
-        DensityUnit.KilogramPerCubicMeter => quantity.Value,
-        DensityUnit.GramPerCubicCentimeter => quantity.Value * 1e3,
-        DensityUnit.PoundPerCubicFoot => quantity.Value * (KilogramsPerPound / (MetresPerFoot * MetresPerFoot * MetresPerFoot)),
-        _ => quantity.As(DensityUnit.KilogramPerCubicMeter),
+        DensityUnit.KilogramPerCubicMeter => value,
+        DensityUnit.GramPerCubicCentimeter => value * 1e3,
+        DensityUnit.PoundPerCubicFoot => value * (KilogramsPerPound / (MetresPerFoot * MetresPerFoot * MetresPerFoot)),
+        _ => new Density(value, unit).As(DensityUnit.KilogramPerCubicMeter),
     };
 
-    public static double Si(this MassFraction quantity) => quantity.Unit switch
+    public static double Si(this MassFraction quantity) => Si(quantity.Value, quantity.Unit);
+
+    public static double Si(double value, MassFractionUnit unit) => unit switch
     {
-        MassFractionUnit.DecimalFraction => quantity.Value,
-        MassFractionUnit.Percent => quantity.Value / 100,
-        _ => quantity.As(MassFractionUnit.DecimalFraction),
+        MassFractionUnit.DecimalFraction => value,
+        MassFractionUnit.Percent => value / 100,
+        _ => new MassFraction(value, unit).As(MassFractionUnit.DecimalFraction),
     };
 
-    public static double Si(this Ratio quantity) => quantity.Unit switch
+    public static double Si(this Ratio quantity) => Si(quantity.Value, quantity.Unit);
+
+    public static double Si(double value, RatioUnit unit) => unit switch
     {
-        RatioUnit.DecimalFraction => quantity.Value,
-        RatioUnit.Percent => quantity.Value / 100,
-        _ => quantity.As(RatioUnit.DecimalFraction),
+        RatioUnit.DecimalFraction => value,
+        RatioUnit.Percent => value / 100,
+        _ => new Ratio(value, unit).As(RatioUnit.DecimalFraction),
     };
 
     public static double Si(this MassFlux quantity) => quantity.Unit switch
@@ -150,13 +169,15 @@ internal static class SiDoor
         _ => (double)quantity.As(PowerUnit.Watt),
     };
 
-    public static double Si(this Duration quantity) => quantity.Unit switch
+    public static double Si(this Duration quantity) => Si(quantity.Value, quantity.Unit);
+
+    public static double Si(double value, DurationUnit unit) => unit switch
     {
-        DurationUnit.Second => quantity.Value,
-        DurationUnit.Minute => quantity.Value * 60,
-        DurationUnit.Hour => quantity.Value * 3600,
-        DurationUnit.Day => quantity.Value * 86400,
-        _ => quantity.As(DurationUnit.Second),
+        DurationUnit.Second => value,
+        DurationUnit.Minute => value * 60,
+        DurationUnit.Hour => value * 3600,
+        DurationUnit.Day => value * 86400,
+        _ => new Duration(value, unit).As(DurationUnit.Second),
     };
 
     public static double Si(this Mass quantity) => quantity.Unit switch
@@ -195,5 +216,11 @@ internal static class SiDoor
 
     public static double Si(this ForcePerLength quantity) => quantity.As(ForcePerLengthUnit.NewtonPerMeter);
 
-    public static double Si(this SpecificVolume quantity) => quantity.As(SpecificVolumeUnit.CubicMeterPerKilogram);
+    public static double Si(this SpecificVolume quantity) => Si(quantity.Value, quantity.Unit);
+
+    public static double Si(double value, SpecificVolumeUnit unit) => unit switch
+    {
+        SpecificVolumeUnit.CubicMeterPerKilogram => value,
+        _ => new SpecificVolume(value, unit).As(SpecificVolumeUnit.CubicMeterPerKilogram),
+    };
 }
