@@ -29,6 +29,7 @@ internal sealed class Run(string? generatorFile, string? historyFile, string fol
             Figures.Write(folder, passes, faults);
             drawing?.Report(0.6);
             Pictures.Write(folder, site.Generator.Name, passes);
+            if (passes.LastOrDefault(pass => pass.Interior is not null) is { } calmest) ProfilePicture.Write(folder, calmest);
         });
         if (generatorFile is null) console.WriteLine("Demonstration: generator, tags and history are invented.");
         Screen.Write(console, site.Generator.Name, passes, faults, folder);

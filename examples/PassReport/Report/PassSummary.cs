@@ -18,11 +18,13 @@ internal sealed class PassSummary
         DateTimeOffset end = series.Times[^1];
         (Flow, Pressure, Differential) = (Mean(series.Flow, end), Mean(series.Pressure, end), Mean(series.Differential, end));
         Quality = Mean(series.Quality, end);
+        FeedTemperature = Mean(series.FeedTemperature, end);
         Models = ReadByModels();
         Skipped = series.Quality.Count(double.IsNaN) / (double)series.Quality.Length;
         OutsideDome = series.Status.Count(status => status is ReadingStatus.SubcooledOutlet or ReadingStatus.SuperheatedOutlet) / (double)series.Status.Length;
         Largest = Moves.MaxBy(move => Math.Abs(move.Overshoot));
         IsMovingNow = Moves.Count > 0 && Moves[^1].End >= end;
+        Interior = Report.Interior.Of(this);
     }
 
     public PassSeries Series { get; }
@@ -42,6 +44,11 @@ internal sealed class PassSummary
     public double Differential { get; }
 
     public double Quality { get; }
+
+    public double FeedTemperature { get; }
+
+    /// <summary>What stands inside the pass if it is at rest and its meter right; null where that cannot be told.</summary>
+    public Interior? Interior { get; }
 
     /// <summary>What each wet-steam model makes of the same means.</summary>
     public IReadOnlyList<(WetSteamModel Model, QualityReading Reading)> Models { get; }

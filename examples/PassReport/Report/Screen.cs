@@ -16,6 +16,13 @@ internal static class Screen
         console.WriteLine();
         console.Write(Rows(passes));
         console.WriteLine("Means of the last ten minutes; most in need of attention first. Models: what the published wet-steam models make of the same reading.");
+        if (passes.Any(pass => pass.Interior is not null))
+        {
+            console.WriteLine();
+            console.Write(Interiors(passes));
+            console.WriteLine("At rest, with the heat that the meter's reading asks for. The water held downstream of boiling is good to about 30 %: published slip models differ.");
+        }
+
         console.WriteLine();
         foreach (string caution in Verdict.Cautions(passes)) console.WriteLine("- " + caution);
         if (faults.Count > 0) console.WriteLine("- " + Skipped(faults));
@@ -32,6 +39,21 @@ internal static class Screen
         {
             table.AddRow(new Text(pass.Name), new Text(Number(pass.Flow, "0.000")), new Text(Number(pass.Pressure / 1e6, "0.000")), new Text(Number(pass.Differential / 1e3, "0.00")),
                 new Text(Number(pass.Quality, "0.000")), new Text($"{Number(pass.LowestModel, "0.00")} – {Number(pass.HighestModel, "0.00")}"), new Text(Verdict.Why(pass)));
+        }
+
+        return table;
+    }
+
+    private static Table Interiors(IReadOnlyList<PassSummary> passes)
+    {
+        Table table = new Table().Border(TableBorder.Simple).AddColumn("Pass");
+        foreach (string heading in new[] { "Heat\nMW", "Boils from\nm", "of length\n%", "Water held\nkg", "upstream of\nboiling kg", "Residence\ns", "Pressure\ndrop kPa" }) table.AddColumn(new TableColumn(new Text(heading)).RightAligned().NoWrap());
+        foreach (PassSummary pass in passes)
+        {
+            if (pass.Interior is not { } inside) continue;
+            table.AddRow(new Text(pass.Name), new Text(Number((double)inside.Profile.Conditions.AbsorbedHeat.Megawatts, "0.00")), new Text(Number(inside.Onset?.Position.Meters ?? double.NaN, "0")),
+                new Text(Number(inside.Onset?.ShareOfLength.Percent ?? double.NaN, "0.0")), new Text(Number(inside.Holdup.Total.Kilograms, "0")), new Text(Number(inside.Holdup.UpstreamOfOnset.Kilograms, "0")),
+                new Text(Number(inside.Holdup.ResidenceTime.Seconds, "0")), new Text(Number(inside.Profile.PressureDrop.Total.Kilopascals, "0")));
         }
 
         return table;

@@ -39,7 +39,12 @@ public sealed class ReportRunTests : IDisposable
         Assert.DoesNotContain("\u001b", output, StringComparison.Ordinal);
         string[] move = File.ReadAllLines(Out("moves.csv"))[1].Split(',');
         Assert.InRange(double.Parse(move[6], CultureInfo.InvariantCulture), 0.02, 0.12);
-        foreach (string name in new[] { "quality", "inputs", "models" })
+        Assert.Contains("Boils from", output, StringComparison.Ordinal);
+        string[] heading = File.ReadAllLines(Out("passes.csv"))[0].Split(','), row = File.ReadAllLines(Out("passes.csv"))[1].Split(',');
+
+        // What the model that made the readings holds at the end: 1550.68 kg.
+        Assert.InRange(double.Parse(row[Array.IndexOf(heading, "water_held_kg")], CultureInfo.InvariantCulture), 1550.68 * 0.9, 1550.68 * 1.1);
+        foreach (string name in new[] { "quality", "inputs", "models", "profile" })
         {
             Assert.True(new FileInfo(Out(name + ".png")).Length > 5000);
             Assert.StartsWith("<?xml", File.ReadAllText(Out(name + ".svg")), StringComparison.Ordinal);
