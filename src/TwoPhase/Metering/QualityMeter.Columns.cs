@@ -17,8 +17,17 @@ public sealed partial class QualityMeter
     {
         CheckLengths(flow.Length, pressure.Length, differential.Length, quality.Length, status.Length);
         LinearMap toFlow = flow.Unit.ToSi(), toPressure = pressure.Unit.ToSi(), toDifferential = differential.Unit.ToSi();
-        for (int i = 0; i < quality.Length; i++)
-            quality[i] = SampleCore(toFlow.Map(flow.Values[i]), toPressure.Map(pressure.Values[i]), toDifferential.Map(differential.Values[i]), out status[i]);
+        for (int i = 0; i < quality.Length;)
+        {
+#if NET
+            if (HasLumpedForm && quality.Length - i >= LumpedHomogeneous.Width)
+                i += LumpedHomogeneous.Batch(_lumpedSquare, flow.Values[i..], toFlow, pressure.Values[i..], toPressure, differential.Values[i..], toDifferential, quality[i..], status[i..]);
+            int end = Math.Min(quality.Length, i + Math.Min(LumpedHomogeneous.Width, quality.Length));
+#else
+            int end = quality.Length;
+#endif
+            for (; i < end; i++) quality[i] = SampleCore(toFlow.Map(flow.Values[i]), toPressure.Map(pressure.Values[i]), toDifferential.Map(differential.Values[i]), out status[i]);
+        }
     }
 
     /// <summary>The quality of every sample of a history, with the applicability of each. Slower than without: the Reynolds number needs viscosities.</summary>
@@ -49,10 +58,17 @@ public sealed partial class QualityMeter
         status is ReadingStatus.WetSteam or ReadingStatus.SubcooledOutlet or ReadingStatus.SuperheatedOutlet;
 
     /// <summary>One sample, SI, unchecked: a quality and what it is, or NaN and why not.</summary>
-    private double SampleCore(double flow, double pressure, double differential, out ReadingStatus status)
+    internal double SampleCore(double flow, double pressure, double differential, out ReadingStatus status)
     {
         status = StatusOf(flow, pressure, differential);
         if (status != ReadingStatus.None) return double.NaN;
+        if (HasLumpedForm)
+        {
+            double lumped = LumpedHomogeneous.Quality(_lumpedSquare, flow, pressure, differential);
+            status = StatusOf(lumped);
+            return lumped;
+        }
+
         MeterSteam steam = MeterSteam.At(pressure, Meter.HasGeometry, Model.NeedsTransport);
         MeterGeometry geometry = Meter.GeometryAt(steam.Temperature);
         QualitySolution solution = SolveQuality(geometry, State(geometry, steam, flow, pressure, differential));

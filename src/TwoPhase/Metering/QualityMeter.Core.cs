@@ -12,6 +12,12 @@ public sealed partial class QualityMeter
     /// <summary>A reading with its applicability; <see cref="ReadingStatus.NotSolved"/> in place of an exception. SI, arguments checked.</summary>
     private QualityReading ReadCore(double flow, double pressure, double differential)
     {
+        if (HasLumpedForm)
+        {
+            double lumped = LumpedHomogeneous.Quality(_lumpedSquare, flow, pressure, differential);
+            return new QualityReading(lumped, flow * flow / (_lumpedSquare * differential), StatusOf(lumped), Applicability.Inside);
+        }
+
         MeterSteam steam = MeterSteam.At(pressure, Meter.HasGeometry, Model.NeedsTransport);
         MeterGeometry geometry = Meter.GeometryAt(steam.Temperature);
         MeterState state = State(geometry, steam, flow, pressure, differential);

@@ -7,6 +7,11 @@ public sealed partial class QualityMeter
     /// <summary>Steps in which the quality of a model of unknown trend is searched for every crossing.</summary>
     private const int SearchSteps = 64;
 
+    /// <summary>Secants after which the usual reading has long converged, and the relative residual at which it has.</summary>
+    private const int SecantSteps = 9;
+
+    private const double SecantResidual = 2e-14;
+
     /// <summary>Solves 1/(ρe C²) = 2 Δp (ε E A/ṁ)², whose right side the reading gives, for the quality.</summary>
     private QualitySolution SolveQuality(in MeterGeometry geometry, in MeterState state)
     {
@@ -19,12 +24,33 @@ public sealed partial class QualityMeter
         }
 
         var reduced = new ReducedVolume(this, geometry, state, target);
+        if (Model.Trend != DifferentialTrend.Unknown && TrySecant(reduced, out double quality)) return new QualitySolution(quality);
         double low = Model.LowestQuality, atLow = reduced.Value(low), atDry = reduced.Value(1);
         return Model.Trend == DifferentialTrend.Unknown ? SearchEverywhere(reduced, low, atLow, atDry)
             : atLow >= 0 ? Continued(geometry, state, target, low)
             : atDry > (Model.Trend == DifferentialTrend.RisingThenFalling ? Residual : 0) ? Between(reduced, low, atLow, 1, atDry)
             : Model.Trend == DifferentialTrend.RisingThenFalling ? SearchBelowPeak(geometry, state, target, reduced, low, atLow, atDry)
             : Continued(geometry, state, target, 1);
+    }
+
+    /// <summary>
+    /// The short way for the usual reading: secants from the homogeneous quality, nearly a straight line. Only a root inside the formula's
+    /// range counts, and only where it is the only one; everything else is left to the search between brackets.
+    /// </summary>
+    private bool TrySecant(in ReducedVolume reduced, out double quality)
+    {
+        double c = double.IsNaN(reduced.State.DischargeCoefficient) ? 1 : reduced.State.DischargeCoefficient, liquid = 1 / reduced.State.LiquidDensity;
+        double slope = ((1 / reduced.State.VapourDensity) - liquid) / (reduced.Target * c * c), lowest = Model.LowestQuality;
+        double before = Fast.Clamp((1 - (liquid / (reduced.Target * c * c))) / slope, lowest + 0.05, 0.95), atBefore = reduced.Value(before);
+        quality = before - (atBefore / slope);
+        for (int i = 0; i < SecantSteps && quality > lowest && quality < 1; i++)
+        {
+            double here = reduced.Value(quality);
+            if (Math.Abs(here) <= SecantResidual) return Model.Trend == DifferentialTrend.Rising || reduced.Value(1) > Residual;
+            (before, atBefore, quality) = (quality, here, quality - (here * (quality - before) / (here - atBefore)));
+        }
+
+        return false;
     }
 
     /// <summary>Outside the range of the formula: the homogeneous slope from its nearer end, with C as at that end.</summary>

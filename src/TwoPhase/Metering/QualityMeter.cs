@@ -23,6 +23,9 @@ public sealed partial class QualityMeter
 
     private readonly double _modelUncertainty = UnfittedModelUncertainty;
 
+    // k² of the closed form; NaN where the meter has a geometry or the model is another.
+    private readonly double _lumpedSquare = double.NaN;
+
     /// <summary>A meter read through a wet-steam model.</summary>
     /// <param name="meter">The meter.</param>
     /// <param name="model">The wet-steam model.</param>
@@ -34,6 +37,7 @@ public sealed partial class QualityMeter
         Model = Require.NotNull(model, nameof(model));
         if (model.NeedsGeometry && !meter.HasGeometry)
             throw new ArgumentException($"The wet-steam model '{model.Name}' needs the diameters of the meter, and a {meter.Name} has none.", nameof(model));
+        if (meter is SiteConstantMeter site && model == WetSteamModel.Homogeneous) _lumpedSquare = site.K.Si() * site.K.Si();
     }
 
     private QualityMeter(QualityMeter other, double modelUncertainty)
@@ -56,6 +60,8 @@ public sealed partial class QualityMeter
         double value = Require.Positive(differential.Si(), "Model uncertainty", Scale.None, nameof(differential));
         return new QualityMeter(this, Require.Below(value, 1, "Model uncertainty", Scale.None, nameof(differential)));
     }
+
+    private bool HasLumpedForm => !double.IsNaN(_lumpedSquare);
 
     /// <summary>The quality that a flow, a pressure and a differential imply.</summary>
     /// <remarks>Where two qualities fit the reading the lower is returned, and the applicability has <see cref="ApplicabilityLimits.SecondRoot"/> with the other as its value.</remarks>
