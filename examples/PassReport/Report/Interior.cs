@@ -21,10 +21,10 @@ internal sealed class Interior
 
     public WaterHoldup Holdup { get; }
 
-    /// <summary>The interior of a pass at the means of its last ten minutes; null where its file gives no tubes, or its readings no steady state.</summary>
+    /// <summary>The interior of a pass at the means of its last ten minutes; null where its file gives no tubes, its inputs still move, or its readings allow no steady state.</summary>
     public static Interior? Of(PassSummary pass)
     {
-        if (pass.Series.Pass.Sections.Count == 0 || !(pass.Quality is > 0 and < 1) || !double.IsFinite(pass.FeedTemperature)) return null;
+        if (pass.IsMovingNow || pass.Series.Pass.Sections.Count == 0 || !(pass.Quality is > 0 and < 1) || !double.IsFinite(pass.FeedTemperature)) return null;
         var conditions = new PassConditions(MassFlow.FromKilogramsPerSecond(pass.Flow), Temperature.FromKelvins(pass.FeedTemperature), Pressure.FromPascals(pass.Pressure), Power.Zero);
         try
         {

@@ -23,6 +23,10 @@ internal static class Screen
             console.WriteLine("At rest, with the heat that the meter's reading asks for. The water held downstream of boiling is good to about 30 %: published slip models differ.");
         }
 
+        // A steady state says nothing of a pass that is not in one.
+        if (passes.Where(pass => pass.IsMovingNow && pass.Series.Pass.Sections.Count > 0).Select(pass => pass.Name).ToArray() is { Length: > 0 } moving)
+            console.WriteLine($"What stands inside {Listed(moving)} is left out: still moving.");
+
         console.WriteLine();
         foreach (string caution in Verdict.Cautions(passes)) console.WriteLine("- " + caution);
         if (faults.Count > 0) console.WriteLine("- " + Skipped(faults));

@@ -9,9 +9,9 @@ internal sealed class ColdDocument
 {
     public string? At { get; set; }
 
-    public double PipeExpansionPerKelvin { get; set; }
+    public double? PipeExpansionPerKelvin { get; set; }
 
-    public double ThroatExpansionPerKelvin { get; set; }
+    public double? ThroatExpansionPerKelvin { get; set; }
 
     public static ColdDocument? Of(PrimaryElement element) => element.Growth is not { } growth ? null : new()
     {
@@ -21,7 +21,7 @@ internal sealed class ColdDocument
     };
 
     public PrimaryElement Add(PrimaryElement element, Place place) => element.MeasuredCold(
-        CoefficientOfThermalExpansion.FromPerKelvin(PipeExpansionPerKelvin),
-        CoefficientOfThermalExpansion.FromPerKelvin(ThroatExpansionPerKelvin),
+        CoefficientOfThermalExpansion.FromPerKelvin(place.Member("pipeExpansionPerKelvin").Required(PipeExpansionPerKelvin)),
+        CoefficientOfThermalExpansion.FromPerKelvin(place.Member("throatExpansionPerKelvin").Required(ThroatExpansionPerKelvin)),
         Temperature.FromKelvins(place.Member("at").Quantity(At, UnitKind.Temperature)));
 }

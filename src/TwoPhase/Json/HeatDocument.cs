@@ -8,7 +8,7 @@ internal sealed class HeatDocument
 {
     public string? Section { get; set; }
 
-    public double Share { get; set; }
+    public double? Share { get; set; }
 
     public List<FluxDocument>? Shape { get; set; }
 
@@ -27,21 +27,22 @@ internal sealed class HeatDocument
     private SectionHeat Read(Place place)
     {
         string section = place.Member("section").Required(Section);
+        double share = place.Member("share").Required(Share);
         FluxPoint[] shape = [.. (Shape ?? []).Select((point, i) => place.Member("shape").Item(i).Required(point).Read(place.Member("shape").Item(i)))];
-        return place.Make(() => new SectionHeat(section, Ratio.FromDecimalFractions(Share), shape));
+        return place.Make(() => new SectionHeat(section, Ratio.FromDecimalFractions(share), shape));
     }
 }
 
 /// <summary>One point of a flux shape: place along the section, 0 to 1, and flux relative to the other points.</summary>
 internal sealed class FluxDocument
 {
-    public double At { get; set; }
+    public double? At { get; set; }
 
-    public double Flux { get; set; }
+    public double? Flux { get; set; }
 
     public FluxPoint Read(Place place)
     {
-        double at = At, flux = Flux;
+        double at = place.Member("at").Required(At), flux = place.Member("flux").Required(Flux);
         return place.Make(() => new FluxPoint(Ratio.FromDecimalFractions(at), flux));
     }
 }

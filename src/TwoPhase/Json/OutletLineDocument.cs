@@ -9,7 +9,7 @@ internal sealed class OutletLineDocument
 {
     public string? Bore { get; set; }
 
-    public double LossCoefficient { get; set; }
+    public double? LossCoefficient { get; set; }
 
     public string? Volume { get; set; }
 
@@ -22,6 +22,6 @@ internal sealed class OutletLineDocument
 
     public OutletLine Read(Place place) => new(
         place.Member("bore").Length(Bore),
-        LossCoefficient,
+        place.Member("lossCoefficient").Required(LossCoefficient),
         UnitsNet.Volume.FromCubicMeters(place.Member("volume").Quantity(Volume, UnitKind.Volume)));
 }

@@ -30,6 +30,9 @@ internal readonly struct Place(string path)
     public T Required<T>(T? value)
         where T : class => value ?? throw Fault("is missing");
 
+    public T Required<T>(T? value)
+        where T : struct => value ?? throw Fault("is missing");
+
     public double Quantity(string? text, UnitKind kind, UnitBasis? basis = null)
     {
         string given = Required(text);

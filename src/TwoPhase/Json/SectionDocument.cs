@@ -36,7 +36,7 @@ internal sealed class SectionDocument
     /// <summary>Friction of a ribbed bore over that of a plain one; its presence makes the bore ribbed.</summary>
     public double? RibFrictionMultiplier { get; set; }
 
-    /// <summary>Friction of a plain bore over that of the formula, from a fit.</summary>
+    /// <summary>Friction over that of the formula for a plain bore, from a fit; stands over that of the ribs.</summary>
     public double? FrictionFactor { get; set; }
 
     public double? LossCoefficient { get; set; }
@@ -60,8 +60,9 @@ internal sealed class SectionDocument
         Roughness = section.RawRoughness == 0 ? null : QuantityText.Millimetres(section.RawRoughness),
         Scale = ScaleDocument.Of(section),
         Fins = FinsDocument.Of(section),
-        RibFrictionMultiplier = section.IsRibbed ? section.FrictionMultiplier : null,
-        FrictionFactor = section.IsRibbed || section.FrictionMultiplier == 1 ? null : section.FrictionMultiplier,
+        // A fit may find a ribbed bore smoother than ribs can be declared; the factor then stands over them.
+        RibFrictionMultiplier = section.IsRibbed ? Math.Max(section.FrictionMultiplier, 1) : null,
+        FrictionFactor = section.FrictionMultiplier == 1 || (section.IsRibbed && section.FrictionMultiplier > 1) ? null : section.FrictionMultiplier,
         LossCoefficient = section.LossCoefficient == 0 ? null : section.LossCoefficient,
         Metal = section.Metal == TubeMetal.CarbonSteel ? null : MetalDocument.Of(section.Metal),
         MetalMass = section.GivenMetalMass is { } mass ? QuantityText.Write(mass, "kg", UnitKind.Mass, "kg") : null,

@@ -52,6 +52,18 @@ public sealed class ReportRunTests : IDisposable
     });
 
     [Fact]
+    public void Run_EndsWhileInputsMove_ShowsNoInterior()
+    {
+        // A row every 5 s: the history stops two minutes after the firing has reached 106 %.
+        string[] lines = File.ReadAllLines(Data("firing-step.csv"));
+        string[] begun = lines[..(Array.FindIndex(lines, line => line.Split(',')[3] == "106.00") + 24)];
+        (int code, string output, string error) = Run(Data("one-pass.json"), Write("h.csv", begun));
+        Assert.Equal(("", 0), (error, code));
+        Assert.Contains("is left out: still moving", output, StringComparison.Ordinal);
+        Assert.DoesNotContain("Boils from", output, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void Run_FaultySamples_AreCountedWithRowAndColumnAndSkipped()
     {
         string history = Write("h.csv", Heading,

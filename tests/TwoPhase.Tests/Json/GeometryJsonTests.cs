@@ -68,6 +68,8 @@ public class GeometryJsonTests
     [InlineData("\"section\": \"coil\"", "\"section\": \"foil\"", "$.passes[0].heat", "has no section 'foil'")]
     [InlineData("\"volume\": \"0.08 m3\"", "\"volume\": \"0 m3\"", "$.passes[0].outletLine", "Volume of the outlet line")]
     [InlineData("\"thickness\"", "\"thikness\"", "$.passes[0].sections[1].scale", "thikness")]
+    [InlineData("\"lossCoefficient\": 3, ", "", "$.passes[0].outletLine.lossCoefficient", "is missing")]
+    [InlineData("\"at\": 0, ", "", "$.passes[0].heat[1].shape[0].at", "is missing")]
     public void Read_FaultOfGeometry_HasItsPath(string right, string wrong, string path, string why)
     {
         Assert.Contains(right, Sample, StringComparison.Ordinal);
@@ -124,7 +126,7 @@ public class GeometryJsonTests
         if ((flags & 4) != 0) section = section.WithScale(Length.FromMillimeters(n[8] / 333.0), ThermalConductivity.FromWattsPerMeterKelvin(n[9] / 321.0)).WithRoughness(Length.FromMicrometers(n[10] / 7.0));
         if ((flags & 8) != 0) section = section.WithFins(Area.FromSquareMeters(n[11] / 3.0), Mass.FromKilograms(n[0] / 1.7));
         if ((flags & 16) != 0) section = section.WithRibs(1 + (n[1] / 999.0)).WithLossCoefficient(n[2] / 77.0);
-        else if (n[2] % 3 == 0) section = section.WithFrictionFactor(0.5 + (n[1] / 777.0));
+        if (n[2] % 3 == 0) section = section.WithFrictionFactor(0.5 + (n[1] / 777.0));
         if ((flags & 32) != 0) section = section.WithParallelTubes(1 + (n[3] % 5)).WithMetalMass(Mass.FromPounds(n[4]));
         if ((flags & 64) != 0) section = section.WithMetal(new("own", Density.FromKilogramsPerCubicMeter(7000 + n[5]), SpecificEntropy.FromJoulesPerKilogramKelvin(400 + (n[6] / 9.0)), ThermalConductivity.FromWattsPerMeterKelvin(10 + (n[7] / 17.0))));
         section = (flags & 128) != 0 ? section.AsConvective() : (flags & 256) != 0 ? section.AsUnheated() : section;
