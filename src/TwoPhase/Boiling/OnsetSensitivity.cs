@@ -27,26 +27,26 @@ public readonly record struct OnsetSensitivity
     /// <summary>Per +0.1 MPa of outlet pressure.</summary>
     public Length PerTenthOfMegapascal => Length.FromMeters(_pressure * 1e5);
 
-    internal static OnsetSensitivity? Of(PassProfile profile)
+    internal static OnsetSensitivity? Of(PassProfile profile, Func<PassProfile, PassNode?> search)
     {
         PassConditions at = profile.Conditions;
-        double? heat = Slope(profile, Share, step => at with { RawAbsorbedHeat = at.RawAbsorbedHeat * (1 + step) });
-        double? flow = Slope(profile, Share, step => at with { RawFeedFlow = at.RawFeedFlow * (1 + step) });
-        double? temperature = Slope(profile, Kelvins, step => Warmer(profile, at, step));
-        double? pressure = Slope(profile, Pascals, step => at with { RawOutletPressure = at.RawOutletPressure + step });
+        double? heat = Slope(profile, search, Share, step => at with { RawAbsorbedHeat = at.RawAbsorbedHeat * (1 + step) });
+        double? flow = Slope(profile, search, Share, step => at with { RawFeedFlow = at.RawFeedFlow * (1 + step) });
+        double? temperature = Slope(profile, search, Kelvins, step => Warmer(profile, at, step));
+        double? pressure = Slope(profile, search, Pascals, step => at with { RawOutletPressure = at.RawOutletPressure + step });
         return heat is { } h && flow is { } f && temperature is { } t && pressure is { } p ? new(h, f, t, p) : null;
     }
 
     private static PassConditions Warmer(PassProfile profile, in PassConditions at, double step) =>
         (at.IsFeedByEnthalpy ? at.WithFeedTemperature(profile.Inlet.Temperature) : at).WithFeedTemperature(Temperature.FromKelvins(profile.Inlet.Temperature.Kelvins + step));
 
-    private static double? Slope(PassProfile profile, double step, Func<double, PassConditions> conditions) =>
-        Onset(profile, conditions(step)) is { } above && Onset(profile, conditions(-step)) is { } below ? (above - below) / (2 * step) : null;
+    private static double? Slope(PassProfile profile, Func<PassProfile, PassNode?> search, double step, Func<double, PassConditions> conditions) =>
+        Onset(profile, search, conditions(step)) is { } above && Onset(profile, search, conditions(-step)) is { } below ? (above - below) / (2 * step) : null;
 
-    private static double? Onset(PassProfile profile, in PassConditions conditions)
+    private static double? Onset(PassProfile profile, Func<PassProfile, PassNode?> search, in PassConditions conditions)
     {
         PassProfile moved = SteadyState.Solve(profile.Pass, conditions, profile.Models, profile.Options.WithTolerance(1e-9));
-        return moved.OnsetRow is > 0 and int row ? moved.Nodes[row].Position : null;
+        return search(moved) is { Position: > 0 } node ? node.Position : null;
     }
 
     /// <summary>The sensitivities in a line, invariant culture.</summary>

@@ -1,4 +1,5 @@
 using System.Globalization;
+using TwoPhase.HeatTransfer;
 using TwoPhase.Passes;
 using TwoPhase.Slip;
 using TwoPhase.Units;
@@ -17,20 +18,21 @@ public sealed class WaterHoldup
 {
     private readonly double _liquid, _vapour, _upstream, _liquidVolume;
 
-    private WaterHoldup(PassProfile profile, VoidFractionModel slip)
+    private WaterHoldup(PassProfile profile, VoidFractionModel slip, NetVapourModel? subcooled = null)
     {
         Profile = profile;
         Slip = slip;
+        Subcooled = subcooled;
         var liquid = new double[profile.Pass.Ducts.Length];
         var vapour = new double[liquid.Length];
         double onset = profile.OnsetRow is >= 0 and int row ? profile.Nodes[row].Position : double.PositiveInfinity;
-        foreach (NodePanel panel in new NodePanels(profile.Nodes))
+        foreach (NodePanel panel in new NodePanels(Standing()))
         {
             double area = profile.Pass.Ducts[panel.Duct].Area;
-            double water = area * panel.Integral(node => LiquidDensity(node, slip)), steam = area * panel.Integral(node => VapourDensity(node, slip));
+            double water = area * panel.Integral(static node => (1 - node.VoidFraction) * node.Flow.LiquidDensity), steam = area * panel.Integral(static node => node.VoidFraction * node.Flow.VapourDensity);
             liquid[panel.Duct] += water;
             vapour[panel.Duct] += steam;
-            _liquidVolume += area * panel.Integral(node => 1 - VoidFraction(node, slip));
+            _liquidVolume += area * panel.Integral(static node => 1 - node.VoidFraction);
             if (panel.Nodes[Panel.Intervals].Position <= onset) _upstream += water + steam;
         }
 
@@ -50,6 +52,18 @@ public sealed class WaterHoldup
     /// <exception cref="ArgumentNullException">An argument is null.</exception>
     public static WaterHoldup Of(PassProfile profile, VoidFractionModel slip) => new(Require.NotNull(profile, nameof(profile)), Require.NotNull(slip, nameof(slip)));
 
+    /// <summary>The holdup with the vapour that stands in liquid which is still subcooled, by Levy's true quality.</summary>
+    /// <remarks>
+    /// <para>In an evaporator pass it moves the water held by less than 1 %, so it is left out unless asked for; see <see cref="NetVapourModel.TrueQuality"/>.</para>
+    /// <para>The density of the liquid stays that of the row; the mean flux around the tube counts.</para>
+    /// </remarks>
+    /// <param name="profile">The steady state of the pass.</param>
+    /// <param name="slip">The slip model.</param>
+    /// <param name="subcooled">Where vapour first stays.</param>
+    /// <exception cref="ArgumentNullException">An argument is null.</exception>
+    public static WaterHoldup Of(PassProfile profile, VoidFractionModel slip, NetVapourModel subcooled) =>
+        new(Require.NotNull(profile, nameof(profile)), Require.NotNull(slip, nameof(slip)), Require.NotNull(subcooled, nameof(subcooled)));
+
     /// <summary>The holdup by every slip model side by side: their spread is the honest uncertainty.</summary>
     /// <param name="profile">The steady state of the pass.</param>
     /// <exception cref="ArgumentNullException"><paramref name="profile"/> is null.</exception>
@@ -60,6 +74,9 @@ public sealed class WaterHoldup
 
     /// <summary>The slip model.</summary>
     public VoidFractionModel Slip { get; }
+
+    /// <summary>Where vapour first stays in subcooled liquid; null when such vapour is left out.</summary>
+    public NetVapourModel? Subcooled { get; }
 
     /// <summary>Liquid standing in the pass.</summary>
     public Mass Liquid => Mass.FromKilograms(_liquid);
@@ -92,11 +109,25 @@ public sealed class WaterHoldup
 
     internal double RawTotal => _liquid + _vapour;
 
-    private static double LiquidDensity(in PassNode node, VoidFractionModel slip) => (1 - VoidFraction(node, slip)) * node.Flow.LiquidDensity;
+    /// <summary>The rows with the void fraction of this slip model.</summary>
+    private PassNode[] Standing()
+    {
+        PassNode[] nodes = Profile.Nodes.ToArray();
+        foreach (ref PassNode node in nodes.AsSpan())
+        {
+            double x = Quality(node);
+            node = node with { VoidFraction = x is > 0 and < 1 ? Slip.VoidFractionCore(node.Flow with { Quality = x }) : x };
+        }
 
-    private static double VapourDensity(in PassNode node, VoidFractionModel slip) => VoidFraction(node, slip) * node.Flow.VapourDensity;
+        return nodes;
+    }
 
-    private static double VoidFraction(in PassNode node, VoidFractionModel slip) => node.Flow.Quality is > 0 and < 1 ? slip.VoidFractionCore(node.Flow) : node.Flow.Quality;
+    private double Quality(in PassNode node)
+    {
+        if (Subcooled is null || node.EquilibriumQuality >= 1) return node.Flow.Quality;
+        double flux = Math.Max(0, node.LinearHeat / Profile.Pass.Ducts[node.Duct].Perimeter);
+        return NetVapourModel.LevyTrueQuality(node.EquilibriumQuality, Subcooled.DepartureCore(WallSolver.Saturated(node), flux));
+    }
 
     /// <summary>The holdup in a line, invariant culture.</summary>
     public override string ToString() => string.Format(

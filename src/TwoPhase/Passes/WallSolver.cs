@@ -1,0 +1,74 @@
+using TwoPhase.Flow;
+using TwoPhase.HeatTransfer;
+using TwoPhase.Steam;
+
+namespace TwoPhase.Passes;
+
+/// <summary>From a node of a profile to the wall around it, SI doubles.</summary>
+internal static class WallSolver
+{
+    public static PassWall At(PassProfile profile, in PassNode node, double fluxPeak)
+    {
+        FlowPattern pattern = FlowPattern.Core(node.Flow);
+        if (Section(profile.Pass, node) is not { } section) return new(Film(profile.Models.Film, node, 0), Unheated(node.Temperature), Applicability.Inside, null, null, pattern);
+
+        TubeWall wall = section.Wall;
+        double linear = LocalHeat(section, node, fluxPeak), flux = Math.Max(0, linear / (Math.PI * node.Flow.Bore)), film = Film(profile.Models.Film, node, flux);
+        FlowState flow = Saturated(node);
+        Applicability applicability = Plain(section, profile.Models.Film.CheckCore(flow, flux));
+        WallTemperatures temperatures = wall.Through(node.Temperature, film, linear);
+        if (!(flux > 0)) return new(film, temperatures, applicability, null, null, pattern);
+
+        bool wet = node.EquilibriumQuality is > 0 and < 1;
+        WallTemperatures? dry = wet ? wall.Through(node.Temperature, FilmModel.DougallRohsenow.CoefficientCore(flow, flux), linear) : null;
+        return new(film, temperatures, applicability, Critical(profile.Models.CriticalQuality, section, flow, flux), dry, pattern);
+    }
+
+    /// <summary>The section of a node; null in the outlet line.</summary>
+    public static TubeSection? Section(Pass pass, in PassNode node) => node.Duct < pass.Sections.Count ? pass.Sections[node.Duct] : null;
+
+    /// <summary>Heat per length of one tube on its hot side [W/m].</summary>
+    public static double LocalHeat(TubeSection section, in PassNode node, double fluxPeak) =>
+        node.LinearHeat / section.ParallelTubes * (section.Zone == HeatZone.Radiant ? fluxPeak : 1);
+
+    /// <summary>The flow with both phases saturated and every property that a heat-transfer model reads.</summary>
+    public static FlowState Saturated(in PassNode node) => FlowStates.At(node.Pressure, node.Flow.Quality, node.Flow.MassFlux, node.Flow.Bore, node.Flow.Inclination);
+
+    /// <summary>h [W/(m²·K)] over the difference between wetted surface and flow.</summary>
+    public static double Film(FilmModel model, in PassNode node, double flux)
+    {
+        if (node.EquilibriumQuality is > 0 and < 1) return model.CoefficientCore(Saturated(node), flux);
+        double alone = OnePhase(node), subcooling = node.Flow.SaturationTemperature - node.Temperature;
+        if (node.EquilibriumQuality >= 1 || !(flux / alone > subcooling)) return alone;
+        double boiling = subcooling + (flux / model.CoefficientCore(Saturated(node), flux));
+        return Math.Max(alone, flux / boiling);
+    }
+
+    /// <summary>h [W/(m²·K)] of the liquid or the dry steam alone, by Gnielinski.</summary>
+    public static double OnePhase(in PassNode node)
+    {
+        PhaseCore phase = Phase(node);
+        return SinglePhaseFilm.GnielinskiCore(new(node.Flow.MassFlux, node.Flow.Bore, Transport.Viscosity(phase.Density, phase.Temperature), Transport.Conductivity(phase), phase.IsobaricHeatCapacity));
+    }
+
+    // A node that stands on the saturation line is the saturated phase, on whichever side round-off puts it.
+    private static PhaseCore Phase(in PassNode node)
+    {
+        WaterCore water = Water.AtPressureEnthalpy(node.Pressure, node.Enthalpy);
+        if (!water.IsWet) return water.Phase;
+        SaturationCore steam = SaturationLine.AtPressure(node.Pressure);
+        return node.EquilibriumQuality < 0.5 ? steam.Liquid : steam.Vapour;
+    }
+
+    private static CriticalQuality Critical(CriticalQualityModel model, TubeSection section, in FlowState flow, double flux)
+    {
+        double mean = model.MeanCore(flow, flux);
+        return new(mean, model.SpreadCore(flow, mean), Plain(section, model.CheckCore(flow, flux)));
+    }
+
+    // Correlations for plain bores in a ribbed one: computed and flagged.
+    private static Applicability Plain(TubeSection section, Applicability found) =>
+        section.IsRibbed ? found.And(Applicability.Inside.Check(ApplicabilityLimits.RibbedBore, 1, 0, 0)) : found;
+
+    private static WallTemperatures Unheated(double temperature) => new(0, temperature, temperature, temperature, temperature);
+}
