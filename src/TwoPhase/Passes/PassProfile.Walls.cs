@@ -20,9 +20,7 @@ public sealed partial class PassProfile
     /// It acts in sections of <see cref="HeatZone.Radiant"/> only. Conduction round the tube is left out, which overstates the hot side.
     /// </param>
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="fluxPeak"/> is outside its limits, or there is no such row.</exception>
-    public PassWall WallAt(int index, double fluxPeak = 1)
-    {
-        Require.Within(fluxPeak, 1, GreatestFluxPeak, "Flux peak", Scale.None, nameof(fluxPeak));
-        return WallSolver.At(this, _nodes[index], fluxPeak);
-    }
+    public PassWall WallAt(int index, double fluxPeak = 1) => WallSolver.At(this, _nodes[index], CheckedFluxPeak(fluxPeak));
+
+    internal static double CheckedFluxPeak(double fluxPeak) => Require.Within(fluxPeak, 1, GreatestFluxPeak, "Flux peak", Scale.None, nameof(fluxPeak));
 }

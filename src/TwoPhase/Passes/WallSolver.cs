@@ -10,11 +10,11 @@ internal static class WallSolver
     public static PassWall At(PassProfile profile, in PassNode node, double fluxPeak)
     {
         FlowPattern pattern = FlowPattern.Core(node.Flow);
-        if (Section(profile.Pass, node) is not { } section) return new(Film(profile.Models.Film, node, 0), Unheated(node.Temperature), Applicability.Inside, null, null, pattern);
+        FlowState flow = Saturated(node);
+        if (Section(profile.Pass, node) is not { } section) return new(Film(profile.Models.Film, node, flow, 0), Unheated(node.Temperature), Applicability.Inside, null, null, pattern);
 
         TubeWall wall = section.Wall;
-        double linear = LocalHeat(section, node, fluxPeak), flux = Math.Max(0, linear / (Math.PI * node.Flow.Bore)), film = Film(profile.Models.Film, node, flux);
-        FlowState flow = Saturated(node);
+        double linear = LocalHeat(section, node, fluxPeak), flux = Math.Max(0, linear / (Math.PI * node.Flow.Bore)), film = Film(profile.Models.Film, node, flow, flux);
         Applicability applicability = Plain(section, profile.Models.Film.CheckCore(flow, flux));
         WallTemperatures temperatures = wall.Through(node.Temperature, film, linear);
         if (!(flux > 0)) return new(film, temperatures, applicability, null, null, pattern);
@@ -28,19 +28,19 @@ internal static class WallSolver
     public static TubeSection? Section(Pass pass, in PassNode node) => node.Duct < pass.Sections.Count ? pass.Sections[node.Duct] : null;
 
     /// <summary>Heat per length of one tube on its hot side [W/m].</summary>
-    public static double LocalHeat(TubeSection section, in PassNode node, double fluxPeak) =>
+    private static double LocalHeat(TubeSection section, in PassNode node, double fluxPeak) =>
         node.LinearHeat / section.ParallelTubes * (section.Zone == HeatZone.Radiant ? fluxPeak : 1);
 
     /// <summary>The flow with both phases saturated and every property that a heat-transfer model reads.</summary>
     public static FlowState Saturated(in PassNode node) => FlowStates.At(node.Pressure, node.Flow.Quality, node.Flow.MassFlux, node.Flow.Bore, node.Flow.Inclination);
 
     /// <summary>h [W/(m²·K)] over the difference between wetted surface and flow.</summary>
-    public static double Film(FilmModel model, in PassNode node, double flux)
+    private static double Film(FilmModel model, in PassNode node, in FlowState saturated, double flux)
     {
-        if (node.EquilibriumQuality is > 0 and < 1) return model.CoefficientCore(Saturated(node), flux);
+        if (node.EquilibriumQuality is > 0 and < 1) return model.CoefficientCore(saturated, flux);
         double alone = OnePhase(node), subcooling = node.Flow.SaturationTemperature - node.Temperature;
         if (node.EquilibriumQuality >= 1 || !(flux / alone > subcooling)) return alone;
-        double boiling = subcooling + (flux / model.CoefficientCore(Saturated(node), flux));
+        double boiling = subcooling + (flux / model.CoefficientCore(saturated, flux));
         return Math.Max(alone, flux / boiling);
     }
 

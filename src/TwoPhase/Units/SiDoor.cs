@@ -152,6 +152,8 @@ internal static class SiDoor
         _ => new Ratio(value, unit).As(RatioUnit.DecimalFraction),
     };
 
+    public static double Si(this MassConcentration quantity) => quantity.As(MassConcentrationUnit.KilogramPerCubicMeter);
+
     public static double Si(this MassFlux quantity) => quantity.Unit switch
     {
         MassFluxUnit.KilogramPerSecondPerSquareMeter => quantity.Value,
