@@ -28,6 +28,10 @@ public sealed partial class QualityMeter
         return x <= HighestQuality ? x : throw Require.OutOfRange(x, "Quality", Scale.None, parameter, "must not be above 2: is it given in per cent?");
     }
 
+    // Fails on NaN.
+    private static bool IsSound(double flow, double pressure, double differential) =>
+        flow > 0 && flow < double.PositiveInfinity && differential > 0 && differential < pressure;
+
     private static ReadingStatus StatusOf(double flow, double pressure, double differential) =>
         double.IsNaN(flow + pressure + differential) && (double.IsNaN(flow) || double.IsNaN(pressure) || double.IsNaN(differential)) ? ReadingStatus.Missing
         : !(flow > 0 && flow < double.PositiveInfinity) ? ReadingStatus.FlowOutOfRange

@@ -1,4 +1,6 @@
 using TwoPhase.Flow;
+using TwoPhase.Numerics;
+using TwoPhase.Steam;
 using TwoPhase.Units;
 using UnitsNet.Units;
 
@@ -20,12 +22,10 @@ public sealed partial class QualityMeter
         for (int i = 0; i < quality.Length;)
         {
 #if NET
-            if (HasLumpedForm && quality.Length - i >= LumpedHomogeneous.Width)
+            if (HasLumpedForm && TwoCurves.IsVectorised)
                 i += LumpedHomogeneous.Batch(_lumpedSquare, flow.Values[i..], toFlow, pressure.Values[i..], toPressure, differential.Values[i..], toDifferential, quality[i..], status[i..]);
-            int end = Math.Min(quality.Length, i + Math.Min(LumpedHomogeneous.Width, quality.Length));
-#else
-            int end = quality.Length;
 #endif
+            int end = Math.Min(quality.Length, i + LumpedHomogeneous.Lanes);
             for (; i < end; i++) quality[i] = SampleCore(toFlow.Map(flow.Values[i]), toPressure.Map(pressure.Values[i]), toDifferential.Map(differential.Values[i]), out status[i]);
         }
     }
@@ -60,15 +60,15 @@ public sealed partial class QualityMeter
     /// <summary>One sample, SI, unchecked: a quality and what it is, or NaN and why not.</summary>
     internal double SampleCore(double flow, double pressure, double differential, out ReadingStatus status)
     {
-        status = StatusOf(flow, pressure, differential);
-        if (status != ReadingStatus.None) return double.NaN;
-        if (HasLumpedForm)
+        if (HasLumpedForm && SaturationTable.Covers(pressure) && IsSound(flow, pressure, differential))
         {
             double lumped = LumpedHomogeneous.Quality(_lumpedSquare, flow, pressure, differential);
             status = StatusOf(lumped);
             return lumped;
         }
 
+        status = StatusOf(flow, pressure, differential);
+        if (status != ReadingStatus.None) return double.NaN;
         MeterSteam steam = MeterSteam.At(pressure, Meter.HasGeometry, Model.NeedsTransport);
         MeterGeometry geometry = Meter.GeometryAt(steam.Temperature);
         QualitySolution solution = SolveQuality(geometry, State(geometry, steam, flow, pressure, differential));

@@ -1,5 +1,6 @@
 using TwoPhase.Flow;
 using TwoPhase.Numerics;
+using TwoPhase.Steam;
 using TwoPhase.Units;
 
 namespace TwoPhase.Metering;
@@ -12,7 +13,7 @@ public sealed partial class QualityMeter
     /// <summary>A reading with its applicability; <see cref="ReadingStatus.NotSolved"/> in place of an exception. SI, arguments checked.</summary>
     private QualityReading ReadCore(double flow, double pressure, double differential)
     {
-        if (HasLumpedForm)
+        if (HasLumpedForm && SaturationTable.Covers(pressure))
         {
             double lumped = LumpedHomogeneous.Quality(_lumpedSquare, flow, pressure, differential);
             return new QualityReading(lumped, flow * flow / (_lumpedSquare * differential), StatusOf(lumped), Applicability.Inside);

@@ -1,4 +1,7 @@
 using System.Runtime.CompilerServices;
+#if NET
+using System.Runtime.Intrinsics;
+#endif
 
 namespace TwoPhase.Numerics;
 
@@ -21,6 +24,18 @@ internal static class OctaveGrid
         place = (2 * BitConverter.Int64BitsToDouble(rest | One)) - 3;
         return (int)(pattern >> (MantissaBits - bits));
     }
+
+#if NET
+    /// <summary>The cells of four numbers, and the place of each inside its own.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static void Locate(Vector256<double> values, int bits, out Vector256<long> cells, out Vector256<double> places)
+    {
+        Vector256<long> patterns = values.AsInt64();
+        Vector256<long> rests = (patterns << bits) & Vector256.Create((1L << MantissaBits) - 1);
+        places = Vector256.FusedMultiplyAdd((rests | Vector256.Create(One)).AsDouble(), Vector256.Create(2.0), Vector256.Create(-3.0));
+        cells = patterns >> (MantissaBits - bits);
+    }
+#endif
 
     /// <summary>Where a cell begins.</summary>
     public static double Start(int cell, int bits) => BitConverter.Int64BitsToDouble((long)cell << (MantissaBits - bits));

@@ -14,16 +14,16 @@ public class LumpedHomogeneousTests
     private static readonly QualityMeter Meter = new(Site, WetSteamModel.Homogeneous);
 
     [Fact]
-    public void Quality_ColumnOverTheRangeOfPlants_IsTheFormulationsWithin2e10()
+    public void Quality_ColumnOverTheSaturationLine_IsTheFormulationsWithin2e11()
     {
-        (double[] flow, double[] pressure, double[] differential) = Samples(0.3, 20.5);
+        (double[] flow, double[] pressure, double[] differential) = Samples(0.05, 20.5);
         double[] quality = new double[Count];
         var status = new ReadingStatus[Count];
         Meter.Quality(Column.Of(flow, MassFlowUnit.TonnePerHour), Column.Of(pressure, PressureUnit.Megapascal), Column.Of(differential, PressureUnit.Kilopascal), quality, status);
         for (int i = 0; i < Count; i++)
         {
             double exact = Exact(flow[i] / 3.6, pressure[i] * 1e6, differential[i] * 1e3);
-            Approx.Absolute(exact, quality[i], 2e-10 * Math.Max(1, Math.Abs(exact)), $"{pressure[i]} MPa");
+            Approx.Absolute(exact, quality[i], 2e-11 * Math.Max(1, Math.Abs(exact)), $"{pressure[i]} MPa");
             Assert.Equal(exact < 0 ? ReadingStatus.SubcooledOutlet : exact > 1 ? ReadingStatus.SuperheatedOutlet : ReadingStatus.WetSteam, status[i]);
         }
     }
@@ -42,6 +42,64 @@ public class LumpedHomogeneousTests
         }
     }
 
+    // A sample answers the same to the last bit wherever it stands: in a full register, among the rest, beside bad neighbours, or through the door.
+    [Fact]
+    public void Quality_ColumnOfAnyLength_IsThatOfTheDoor()
+    {
+        (double[] flow, double[] pressure, double[] differential) = Samples(0.05, 20.5);
+        for (int length = 0; length <= 21; length++)
+        {
+            double[] m = flow[..length], quality = new double[length];
+            for (int bad = length % 4; bad < length; bad += 5) m[bad] = -m[bad];
+            var status = new ReadingStatus[length];
+            Meter.Quality(Column.Of(m, MassFlowUnit.TonnePerHour), Column.Of(pressure.AsSpan(0, length), PressureUnit.Megapascal), Column.Of(differential.AsSpan(0, length), PressureUnit.Kilopascal), quality, status);
+            for (int i = 0; i < length; i++)
+            {
+                double alone = Meter.SampleCore(m[i] * (1 / 3.6), pressure[i] * 1e6, differential[i] * 1e3, out ReadingStatus aloneStatus);
+                Assert.Equal(BitConverter.DoubleToInt64Bits(alone), BitConverter.DoubleToInt64Bits(quality[i]));
+                Assert.Equal(aloneStatus, status[i]);
+                Assert.Equal(m[i] < 0, double.IsNaN(quality[i]));
+            }
+        }
+    }
+
+    // Every combination of what no instrument should send: the status of the column is the first reason that applies, and only a quality is a number.
+    [Fact]
+    public void Quality_ColumnOfExtremes_TellsTheFirstReason()
+    {
+        double[] kinds = [double.NaN, double.NegativeInfinity, -1, -0.0, 0, 5e-324, 1e-200, 611, 612, 65535, 65536, 10e6, 16.6e6, 20e6, 22.064e6, 23e6, 1e200, double.MaxValue, double.PositiveInfinity];
+        var all = (from m in kinds from p in kinds from dp in kinds select (m, p, dp)).ToArray();
+        double[] quality = new double[all.Length];
+        var status = new ReadingStatus[all.Length];
+        Meter.Quality(Column.Of(all.Select(a => a.m).ToArray(), MassFlowUnit.KilogramPerSecond), Column.Of(all.Select(a => a.p).ToArray(), PressureUnit.Pascal), Column.Of(all.Select(a => a.dp).ToArray(), PressureUnit.Pascal), quality, status);
+        for (int i = 0; i < all.Length; i++)
+        {
+            (double m, double p, double dp) = all[i];
+            ReadingStatus expected = double.IsNaN(m) || double.IsNaN(p) || double.IsNaN(dp) ? ReadingStatus.Missing
+                : !(m > 0) || double.IsInfinity(m) ? ReadingStatus.FlowOutOfRange
+                : !(p >= 611.213 && p <= 22.064e6) ? ReadingStatus.PressureOutOfRange
+                : !(dp > 0 && dp < p) ? ReadingStatus.DifferentialOutOfRange
+                : quality[i] < 0 ? ReadingStatus.SubcooledOutlet
+                : quality[i] <= 1 ? ReadingStatus.WetSteam
+                : quality[i] > 1 ? ReadingStatus.SuperheatedOutlet
+                : ReadingStatus.NotSolved;
+            Assert.Equal(expected, status[i]);
+            Assert.Equal(status[i] is not (ReadingStatus.WetSteam or ReadingStatus.SubcooledOutlet or ReadingStatus.SuperheatedOutlet), double.IsNaN(quality[i]));
+        }
+    }
+
+    // The result may take the place of an input.
+    [Fact]
+    public void Quality_ColumnInPlace_IsTheSame()
+    {
+        (double[] flow, double[] pressure, double[] differential) = Samples(5, 12);
+        double[] quality = new double[Count];
+        var status = new ReadingStatus[Count];
+        Meter.Quality(Column.Of(flow, MassFlowUnit.TonnePerHour), Column.Of(pressure, PressureUnit.Megapascal), Column.Of(differential, PressureUnit.Kilopascal), quality, status);
+        Meter.Quality(Column.Of(flow, MassFlowUnit.TonnePerHour), Column.Of(pressure, PressureUnit.Megapascal), Column.Of(differential, PressureUnit.Kilopascal), flow, status);
+        Assert.Equal(quality, flow);
+    }
+
     // One bad sample in a block of good ones spoils nothing but itself, wherever it stands.
     [Theory]
     [InlineData(double.NaN, 10, 40, ReadingStatus.Missing)]
@@ -57,7 +115,7 @@ public class LumpedHomogeneousTests
     {
         (double[] flow, double[] pressure, double[] differential) = Samples(5, 12);
         (flow, pressure, differential) = (flow[..333], pressure[..333], differential[..333]);
-        foreach (int at in new[] { 0, 1, 31, 32, 95, 200, 331, 332 })
+        foreach (int at in new[] { 0, 1, 2, 3, 4, 95, 200, 331, 332 })
         {
             double[] m = (double[])flow.Clone(), p = (double[])pressure.Clone(), dp = (double[])differential.Clone(), quality = new double[333];
             (m[at], p[at], dp[at]) = (badFlow, badPressure, badDifferential);
