@@ -45,6 +45,16 @@ public sealed partial class QualityMeter
 
     private double DifferentialCore(double flow, double pressure, double quality)
     {
+        double differential = TryDifferential(flow, pressure, quality, out Exception? fault);
+        return fault is null ? differential : throw fault;
+    }
+
+    /// <summary>Δp [Pa] that a flow makes; NaN where the meter would choke or the model gives none. SI, quality not so low that no volume is left.</summary>
+    internal double DifferentialOrNaN(double flow, double pressure, double quality) => TryDifferential(flow, pressure, quality, out _);
+
+    private double TryDifferential(double flow, double pressure, double quality, out Exception? fault)
+    {
+        fault = null;
         MeterSteam steam = MeterSteam.At(pressure, Meter.HasGeometry, Model.NeedsTransport);
         MeterGeometry geometry = Meter.GeometryAt(steam.Temperature);
         MeterState state = WithCoefficient(geometry, State(geometry, steam, flow, pressure, 0), quality);
@@ -58,9 +68,15 @@ public sealed partial class QualityMeter
         double low = Math.Min(incompressible, ceiling) / 4;
         double atCeiling = balance.Value(ceiling);
         if (atCeiling < 0)
-            throw Require.OutOfRange(flow, "Mass flow", Scale.KilogramsPerSecond, nameof(flow), $"would need a differential above {Scale.Kilopascals.Text(ceiling)} at a static pressure of {Scale.Kilopascals.Text(pressure)}: the meter chokes before that");
+        {
+            fault = Require.OutOfRange(flow, "Mass flow", Scale.KilogramsPerSecond, nameof(flow), $"would need a differential above {Scale.Kilopascals.Text(ceiling)} at a static pressure of {Scale.Kilopascals.Text(pressure)}: the meter chokes before that");
+            return double.NaN;
+        }
+
         RootResult result = BracketedRoot.TryFind(balance, low, balance.Value(low), ceiling, atCeiling, 1e-16 * incompressible);
-        return Accepted(result) ? result.X : throw NotSolved("differential", flow, pressure, result.X);
+        if (Accepted(result)) return result.X;
+        fault = NotSolved("differential", flow, pressure, result.X);
+        return double.NaN;
     }
 
     private double TotalFlowCore(double pressure, double quality, double differential)

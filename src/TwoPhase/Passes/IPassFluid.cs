@@ -1,3 +1,6 @@
+using TwoPhase.Flow;
+using TwoPhase.HeatTransfer;
+
 namespace TwoPhase.Passes;
 
 /// <summary>
@@ -30,6 +33,18 @@ internal interface IPassFluid
 
     /// <summary>h of liquid at p and T [J/kg], continued above saturation as liquid; NaN where the fluid has none.</summary>
     double LiquidEnthalpy(double pressure, double temperature);
+
+    /// <summary>What one phase alone has to carry heat with, at p and h.</summary>
+    PhaseTransport Transport(double pressure, double enthalpy);
+
+    /// <summary>Film coefficient between wall and one phase [W/(m²·K)].</summary>
+    double Film(in PhaseTransport phase, double massFlux, double bore);
+
+    /// <summary>Film coefficient where both phases flow [W/(m²·K)].</summary>
+    /// <param name="flow">What the flow is there; conductivities and heat capacities are filled in.</param>
+    /// <param name="model">The correlation.</param>
+    /// <param name="heatFlux">q at the inside surface [W/m²], zero or more.</param>
+    double Film(in FlowState flow, FilmModel model, double heatFlux);
 }
 
 /// <summary>Liquid and vapour in equilibrium, or (as <see cref="IPassFluid.SaturatedSlopes"/>) their derivatives by pressure along the line.</summary>
@@ -84,3 +99,9 @@ internal readonly struct FluidPoint
     /// <summary>(∂v/∂p)h [m³/(kg·Pa)].</summary>
     public double VolumeByPressure { get; init; }
 }
+
+/// <summary>One phase alone as its film sees it.</summary>
+/// <param name="Viscosity">μ [Pa·s].</param>
+/// <param name="Conductivity">k [W/(m·K)].</param>
+/// <param name="HeatCapacity">cp [J/(kg·K)].</param>
+internal readonly record struct PhaseTransport(double Viscosity, double Conductivity, double HeatCapacity);

@@ -1,3 +1,5 @@
+using TwoPhase.Flow;
+using TwoPhase.HeatTransfer;
 using TwoPhase.Steam;
 using TwoPhase.Steam.Backward;
 
@@ -70,10 +72,33 @@ internal readonly struct SteamFluid : IPassFluid
         VolumeByPressure = water.VolumeByPressure,
     };
 
-    public double Viscosity(double density, double temperature) => Transport.Viscosity(density, temperature);
+    public double Viscosity(double density, double temperature) => Steam.Transport.Viscosity(density, temperature);
 
     public double LiquidEnthalpy(double pressure, double temperature) =>
         temperature >= Water97.LowestTemperature && temperature <= Water97.Border13Temperature
             ? Region1.At(pressure, temperature).Enthalpy
             : double.NaN;
+
+    public PhaseTransport Transport(double pressure, double enthalpy)
+    {
+        PhaseCore phase = Water.AtPressureEnthalpy(pressure, enthalpy).Phase;
+        return new(Steam.Transport.Viscosity(phase.Density, phase.Temperature), Steam.Transport.Conductivity(phase), phase.IsobaricHeatCapacity);
+    }
+
+    public double Film(in PhaseTransport phase, double massFlux, double bore) =>
+        SinglePhaseFilm.GnielinskiCore(new(massFlux, bore, phase.Viscosity, phase.Conductivity, phase.HeatCapacity));
+
+    public double Film(in FlowState flow, FilmModel model, double heatFlux)
+    {
+        SaturatedHeat heat = SaturationTable.Heat(flow.Pressure);
+        return model.CoefficientCore(
+            flow with
+            {
+                LiquidConductivity = heat.LiquidConductivity,
+                VapourConductivity = heat.VapourConductivity,
+                LiquidHeatCapacity = heat.LiquidHeatCapacity,
+                VapourHeatCapacity = heat.VapourHeatCapacity,
+            },
+            heatFlux);
+    }
 }

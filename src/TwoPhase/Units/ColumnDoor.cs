@@ -45,4 +45,7 @@ internal static class ColumnDoor
 
     public static LinearMap ToSi(this PowerUnit unit) =>
         LinearMap.Through(new Power(0, unit).Si(), new Power(LinearMap.Far, unit).Si());
+
+    public static LinearMap ToSi(this MassUnit unit) =>
+        LinearMap.Through(new Mass(0, unit).Si(), new Mass(LinearMap.Far, unit).Si());
 }
