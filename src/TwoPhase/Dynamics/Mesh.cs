@@ -1,0 +1,40 @@
+using TwoPhase.Passes;
+
+namespace TwoPhase.Dynamics;
+
+/// <summary>Cuts the sections of a pass into cells of about equal volume, each inside one section.</summary>
+internal static class Mesh
+{
+    public static Cell[] Cut(Duct[] ducts, int cells)
+    {
+        double total = ducts.Sum(duct => duct.Area * duct.Length);
+        var list = new List<Cell>(cells + ducts.Length);
+        for (int d = 0; d < ducts.Length; d++)
+        {
+            Duct duct = ducts[d];
+            int count = Math.Max(1, (int)Math.Round(cells * duct.Area * duct.Length / total));
+            for (int i = 0; i < count; i++) list.Add(CellOf(duct, d, (double)i / count, (i + 1.0) / count));
+        }
+
+        return [.. list];
+    }
+
+    private static Cell CellOf(in Duct duct, int index, double from, double to)
+    {
+        double length = duct.Length * (to - from);
+        return new()
+        {
+            Duct = index,
+            Length = length,
+            Start = duct.Start + (duct.Length * from),
+            Volume = duct.Area * length,
+            VolumeBefore = duct.VolumeBefore + (duct.Area * duct.Length * from),
+            Area = duct.Area,
+            Surface = duct.Perimeter * length,
+            Capacity = duct.MetalCapacity * length,
+            HeatShare = duct.HeatShare * (duct.Flux.Cumulated(to) - duct.Flux.Cumulated(from)),
+            WaveFactor = 1,
+            PhaseEnthalpy = double.NaN,
+        };
+    }
+}

@@ -1,0 +1,44 @@
+using TwoPhase.Flow;
+using TwoPhase.HeatTransfer;
+using TwoPhase.Passes;
+using TwoPhase.Steam;
+
+namespace TwoPhase.Dynamics;
+
+/// <summary>Water and steam by the fast surface, and by the formulation where the surface does not reach: what thousands of steps a second need.</summary>
+internal readonly struct SurfaceFluid : IPassFluid
+{
+    private readonly SteamSurface _surface;
+
+    public SurfaceFluid(SteamSurface surface) => _surface = surface;
+
+    public double HighestPressure => default(SteamFluid).HighestPressure;
+
+    public SaturatedPair Saturated(double pressure) => default(SteamFluid).Saturated(pressure);
+
+    public SaturatedPair SaturatedSlopes(double pressure) => default(SteamFluid).SaturatedSlopes(pressure);
+
+    public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated)
+    {
+        SurfacePoint point = _surface.Evaluate(pressure, enthalpy);
+        if (double.IsNaN(point.SpecificVolume)) return default(SteamFluid).At(pressure, enthalpy, saturated);
+        double squared = point.SpecificVolume * point.SpecificVolume;
+        return new()
+        {
+            Temperature = point.Temperature,
+            SpecificVolume = point.SpecificVolume,
+            VolumeByEnthalpy = -squared * point.DensityByEnthalpy,
+            VolumeByPressure = -squared * point.DensityByPressure,
+        };
+    }
+
+    public double Viscosity(double density, double temperature) => default(SteamFluid).Viscosity(density, temperature);
+
+    public double LiquidEnthalpy(double pressure, double temperature) => default(SteamFluid).LiquidEnthalpy(pressure, temperature);
+
+    public PhaseTransport Transport(double pressure, double enthalpy) => default(SteamFluid).Transport(pressure, enthalpy);
+
+    public double Film(in PhaseTransport phase, double massFlux, double bore) => default(SteamFluid).Film(phase, massFlux, bore);
+
+    public double Film(in FlowState flow, FilmModel model, double heatFlux) => default(SteamFluid).Film(flow, model, heatFlux);
+}
