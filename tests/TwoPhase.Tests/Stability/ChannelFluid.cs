@@ -1,5 +1,6 @@
 using TwoPhase.Flow;
 using TwoPhase.Friction;
+using TwoPhase.HeatTransfer;
 using TwoPhase.Passes;
 using TwoPhase.Slip;
 using UnitsNet;
@@ -60,4 +61,7 @@ internal readonly struct ChannelFluid : IPassFluid
     public double Viscosity(double density, double temperature) => 1e-16;
 
     public double LiquidEnthalpy(double pressure, double temperature) => Fluid.LiquidEnthalpy(pressure, temperature);
+    public PhaseTransport Transport(double pressure, double enthalpy) => throw new NotImplementedException();
+    public double Film(in PhaseTransport phase, double massFlux, double bore) => throw new NotImplementedException();
+    public double Film(in FlowState flow, FilmModel model, double heatFlux) => throw new NotImplementedException();
 }
