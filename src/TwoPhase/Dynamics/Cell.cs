@@ -20,8 +20,8 @@ internal struct Cell
     /// <summary>Heat capacity of its metal [J/K].</summary>
     public double Capacity;
 
-    /// <summary>Share of the heat of the pass that it takes up.</summary>
-    public double HeatShare;
+    /// <summary>Share of the heat of the pass that it takes up, now and as the pass has it.</summary>
+    public double HeatShare, OwnShare;
 
     /// <summary>Mass held [kg] and internal energy of that mass [J].</summary>
     public double Mass, Energy;

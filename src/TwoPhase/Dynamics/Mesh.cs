@@ -21,7 +21,7 @@ internal static class Mesh
 
     private static Cell CellOf(in Duct duct, int index, double from, double to)
     {
-        double length = duct.Length * (to - from);
+        double length = duct.Length * (to - from), share = duct.HeatShare * (duct.Flux.Cumulated(to) - duct.Flux.Cumulated(from));
         return new()
         {
             Duct = index,
@@ -32,7 +32,8 @@ internal static class Mesh
             Area = duct.Area,
             Surface = duct.Perimeter * length,
             Capacity = duct.MetalCapacity * length,
-            HeatShare = duct.HeatShare * (duct.Flux.Cumulated(to) - duct.Flux.Cumulated(from)),
+            HeatShare = share,
+            OwnShare = share,
             WaveFactor = 1,
             PhaseEnthalpy = double.NaN,
         };

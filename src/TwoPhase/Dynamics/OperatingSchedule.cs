@@ -4,7 +4,7 @@ using UnitsNet;
 
 namespace TwoPhase.Dynamics;
 
-/// <summary>What is done to a pass in time: feed flow, feed temperature, absorbed heat and outlet pressure, each constant, in steps, in ramps, or from a column of history.</summary>
+/// <summary>What is done to a pass in time: feed flow, feed temperature, absorbed heat, its split along the pass and outlet pressure, each constant, in steps, in ramps, or from a column of history.</summary>
 /// <remarks>Immutable; each method returns a changed copy. Changes of one quantity are added in the order of time. Times count from the start of the run.</remarks>
 public sealed partial class OperatingSchedule
 {
@@ -25,7 +25,7 @@ public sealed partial class OperatingSchedule
     public PassConditions Start { get; }
 
     /// <summary>Time of the last change.</summary>
-    public Duration LastChange => Duration.FromSeconds(Math.Max(Math.Max(_flow.End, _temperature.End), Math.Max(_pressure.End, _heat.End)));
+    public Duration LastChange => Duration.FromSeconds(Math.Max(Math.Max(Math.Max(_flow.End, _temperature.End), Math.Max(_pressure.End, _heat.End)), _split.End));
 
     /// <summary>The conditions at a time; behind a step where one stands.</summary>
     /// <param name="time">Time since the start.</param>

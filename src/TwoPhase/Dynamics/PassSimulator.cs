@@ -61,7 +61,7 @@ public sealed partial class PassSimulator
     /// <summary>The end in words, with place and time; empty while the simulation can go on.</summary>
     public string EndReason { get; private set; } = "";
 
-    /// <summary>Moves on under given conditions: feed flow, feed temperature and heat hold throughout, the outlet pressure goes evenly to its new value.</summary>
+    /// <summary>Moves on under given conditions: feed flow, feed temperature and heat hold throughout, the outlet pressure goes evenly to its new value. The heat stays split as the last run left it.</summary>
     /// <param name="conditions">The conditions.</param>
     /// <param name="duration">How long, greater than zero.</param>
     /// <returns>The pass at the end of that time; where the run ended within it (see <see cref="End"/>), at the last instant before.</returns>
@@ -85,12 +85,14 @@ public sealed partial class PassSimulator
         Require.NotNull(schedule, nameof(schedule));
         double seconds = Require.Positive(duration.Si(), "Duration", Scale.Seconds, nameof(duration));
         int count = (int)Math.Ceiling((seconds / Options.RawSampling) - 1e-9);
+        HeatSplit.Factors split = schedule.Split.For(Pass, nameof(schedule));
         var rows = new List<PassInstant>(count + 1) { Now };
         for (int i = 0; i < count && End == SimulationEnd.None; i++)
         {
             double from = i * Options.RawSampling, to = Math.Min(seconds, from + Options.RawSampling);
             PassConditions conditions = schedule.Over(from, to);
             Check(conditions, nameof(schedule));
+            _channel.Split(split.Over(from, to));
             PassInstant row = AdvanceCore(conditions, to - from);
             if (End == SimulationEnd.None) rows.Add(row);
         }

@@ -36,6 +36,9 @@ internal sealed class TimeCurve
         ? new([.. _times, from, to], [.. _values, _values[^1], value])
         : throw Require.OutOfRange(from, $"Start of a change of {quantity}", Scale.Seconds, parameter, $"must not lie before the end of the change before it, {Scale.Seconds.Text(End)}");
 
+    /// <summary>The curve with a value in place of every knot that has none.</summary>
+    public TimeCurve StartingAt(double value) => new(_times, Array.ConvertAll(_values, knot => double.IsNaN(knot) ? value : knot));
+
     /// <summary>The value at a time; behind a step where one stands.</summary>
     public double At(double time)
     {

@@ -14,6 +14,11 @@ internal static class Simulations
 
     public static Pass MeteredPass { get; } = ExamplePass.Pass.WithMeter(Venturi);
 
+    /// <summary>The pass with the straight lines of flux that suit both recorded transients best: rising to boiling, falling towards the outlet.</summary>
+    public static Pass FittedPass { get; } = MeteredPass.WithHeat(new(
+        new SectionHeat("bank", Ratio.FromPercent(42), new FluxPoint(Ratio.Zero, 1), new FluxPoint(Ratio.FromPercent(100), 2)),
+        new SectionHeat("coil", Ratio.FromPercent(58), new FluxPoint(Ratio.Zero, 3), new FluxPoint(Ratio.FromPercent(100), 1))));
+
     public static PassConditions Start { get; } = SteadyState.FindHeat(MeteredPass, ExamplePass.Conditions, MassFraction.FromPercent(78)).Conditions;
 
     public static SimulatorOptions Homogeneous { get; } = SimulatorOptions.Default.WithModels(new(VoidFractionModel.Homogeneous));
