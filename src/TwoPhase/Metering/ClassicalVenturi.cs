@@ -35,7 +35,7 @@ public sealed class ClassicalVenturi : PrimaryElement
     /// <summary>How the convergent section was made.</summary>
     public ConvergentFinish Finish { get; }
 
-    internal override double CoefficientCore(in MeterGeometry geometry, double reynolds) => _data.Coefficient;
+    internal override CoefficientLaw LawOf(in MeterGeometry geometry) => CoefficientLaw.Constant(_data.Coefficient);
 
     internal override double ExpansibilityCore(in MeterGeometry geometry, double pressure, double differential, double isentropicExponent) =>
         Metering.Expansibility.Nozzle(geometry.DiameterRatio, pressure, differential, isentropicExponent);

@@ -1,4 +1,5 @@
 using TwoPhase.Flow;
+using TwoPhase.Numerics;
 
 namespace TwoPhase.Metering;
 
@@ -15,20 +16,16 @@ public abstract partial class WetSteamModel
     /// </remarks>
     public static WetSteamModel DeLeeuw { get; } = new DeLeeuwModel();
 
-    private sealed class DeLeeuwModel : WetSteamModel
+    private sealed class DeLeeuwModel : ExponentModel
     {
         public override string Name => "de Leeuw";
 
-        public override bool NeedsGeometry => true;
-
-        protected internal override bool NeedsTransport => false;
-
         protected internal override DifferentialTrend Trend => DifferentialTrend.Rising;
 
-        protected internal override double EffectiveDensityCore(in MeterState meter, double quality)
+        private protected override Sloped Exponent(in MeterState meter, double froude)
         {
-            double n = Math.Max(0.41, 0.606 * (1 - Math.Exp(-0.746 * GasFroude(meter, quality))));
-            return DensityFromChisholm(meter, quality, ChisholmCoefficient(meter, n));
+            double below = 0.606 * Math.Exp(-0.746 * froude), n = 0.606 - below;
+            return n > 0.41 ? new(n, 0.746 * below) : new(0.41, 0);
         }
 
         protected internal override Applicability CheckCore(in MeterState meter, double quality) => Applicability.Inside

@@ -71,8 +71,8 @@ public abstract class DifferentialPressureMeter
     /// <summary>Geometry for single-phase flow: a meter that grows with temperature must be told the temperature.</summary>
     internal abstract MeterGeometry SinglePhaseGeometry(Temperature? temperature);
 
-    /// <summary>C [-] at a pipe Reynolds number.</summary>
-    internal abstract double CoefficientCore(in MeterGeometry geometry, double reynolds);
+    /// <summary>C [-] over the pipe Reynolds number.</summary>
+    internal abstract CoefficientLaw LawOf(in MeterGeometry geometry);
 
     /// <summary>ε [-]; arguments trusted.</summary>
     internal abstract double ExpansibilityCore(in MeterGeometry geometry, double pressure, double differential, double isentropicExponent);
@@ -92,14 +92,14 @@ public abstract class DifferentialPressureMeter
     private double IterateReynolds(in MeterGeometry geometry, double viscosity, double flowAtUnitCoefficient)
     {
         const int maximumRounds = 100;
-        double c = CoefficientCore(geometry, double.PositiveInfinity);
-        double last = double.NaN;
+        CoefficientLaw law = LawOf(geometry);
+        double c = law.Limit, last = double.NaN;
         for (int round = 0; round < maximumRounds; round++)
         {
             double flow = c * flowAtUnitCoefficient;
             if (Math.Abs(flow - last) <= 1e-15 * flow) return flow;
             last = flow;
-            c = CoefficientCore(geometry, Reynolds(geometry, flow, viscosity));
+            c = law.At(Reynolds(geometry, flow, viscosity));
         }
 
         throw new ConvergenceException($"The discharge coefficient of the {Name} did not settle in {maximumRounds} rounds; last flow {Scale.KilogramsPerSecond.Text(last)}.");

@@ -44,6 +44,8 @@ internal static class Expansibility
 
     private static double ExpMinusOne(double a)
     {
+        // The usual reading: seven terms are exact to the last bit.
+        if (Math.Abs(a) < 0.02) return a * (1 + (a * (1.0 / 2) * (1 + (a * (1.0 / 3) * (1 + (a * (1.0 / 4) * (1 + (a * (1.0 / 5) * (1 + (a * (1.0 / 6) * (1 + (a * (1.0 / 7)))))))))))));
         double u = Math.Exp(a);
         if (u == 1) return a;
         double v = u - 1;

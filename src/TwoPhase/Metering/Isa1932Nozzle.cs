@@ -26,10 +26,10 @@ public sealed class Isa1932Nozzle : PrimaryElement
 
     internal override bool CoefficientDependsOnReynolds => true;
 
-    internal override double CoefficientCore(in MeterGeometry geometry, double reynolds)
+    internal override CoefficientLaw LawOf(in MeterGeometry geometry)
     {
         double b = geometry.DiameterRatio;
-        return 0.9900 - (0.2262 * Math.Pow(b, 4.1)) - (((0.00175 * b * b) - (0.0033 * Math.Pow(b, 4.15))) * Math.Pow(1e6 / reynolds, 1.15));
+        return CoefficientLaw.Power(0.9900 - (0.2262 * Math.Pow(b, 4.1)), (0.0033 * Math.Pow(b, 4.15)) - (0.00175 * b * b), 1.15);
     }
 
     internal override double ExpansibilityCore(in MeterGeometry geometry, double pressure, double differential, double isentropicExponent) =>

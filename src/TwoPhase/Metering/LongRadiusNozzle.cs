@@ -26,8 +26,8 @@ public sealed class LongRadiusNozzle : PrimaryElement
 
     internal override bool CoefficientDependsOnReynolds => true;
 
-    internal override double CoefficientCore(in MeterGeometry geometry, double reynolds) =>
-        0.9965 - (0.00653 * Math.Sqrt(1e6 * geometry.DiameterRatio / reynolds));
+    internal override CoefficientLaw LawOf(in MeterGeometry geometry) =>
+        CoefficientLaw.Power(0.9965, -0.00653 * Math.Sqrt(geometry.DiameterRatio), 0.5);
 
     internal override double ExpansibilityCore(in MeterGeometry geometry, double pressure, double differential, double isentropicExponent) =>
         Metering.Expansibility.Nozzle(geometry.DiameterRatio, pressure, differential, isentropicExponent);

@@ -19,6 +19,8 @@ public sealed class OrificePlate : PrimaryElement
 {
     private const double Inch = 0.0254, SmallPipe = 0.07112;
 
+    private static readonly double NineteenThousand = Math.Pow(19000 / 1e6, 0.8);   // of A, once 10⁶/Re is taken out
+
     /// <summary>A square-edged orifice plate.</summary>
     /// <param name="pipe">D, bore of the pipe, greater than zero.</param>
     /// <param name="bore">d, bore of the plate, greater than zero and below that of the pipe.</param>
@@ -38,24 +40,27 @@ public sealed class OrificePlate : PrimaryElement
 
     internal override bool CoefficientDependsOnReynolds => true;
 
-    internal override double CoefficientCore(in MeterGeometry geometry, double reynolds)
+    internal override CoefficientLaw LawOf(in MeterGeometry geometry)
     {
         double b = geometry.DiameterRatio, b2 = b * b, b4 = b2 * b2, b35 = b2 * b * Math.Sqrt(b);
-        double pipe = geometry.PipeDiameter, megaRe = 1e6 / reynolds;
+        double tenth = Math.Pow(b, 0.1), b03 = tenth * tenth * tenth, b07 = b03 * b03 * tenth;   // β^0.1, β^0.3, β^0.7
+        double pipe = geometry.PipeDiameter;
         (double l1, double l2) = Tappings switch
         {
             OrificeTappings.Corner => (0.0, 0.0),
             OrificeTappings.DiameterAndHalf => (1.0, 0.47),
             _ => (Inch / pipe, Inch / pipe),
         };
-        double a = Math.Pow(19000 * b / reynolds, 0.8), m2 = 2 * l2 / (1 - b);
-
-        double c = 0.5961 + (0.0261 * b2) - (0.216 * b4 * b4)
-            + (0.000521 * Math.Pow(b * megaRe, 0.7))
-            + ((0.0188 + (0.0063 * a)) * b35 * Math.Pow(megaRe, 0.3))
-            + ((0.043 + (0.080 * Math.Exp(-10 * l1)) - (0.123 * Math.Exp(-7 * l1))) * (1 - (0.11 * a)) * b4 / (1 - b4))
-            - (0.031 * (m2 - (0.8 * Math.Pow(m2, 1.1))) * Math.Pow(b, 1.3));
-        return pipe < SmallPipe ? c + (0.011 * (0.75 - b) * (2.8 - (pipe / Inch))) : c;
+        double a = NineteenThousand * tenth * b07, m2 = 2 * l2 / (1 - b);   // A over (10⁶/Re)^0.8
+        double upstream = (0.043 + (0.080 * Math.Exp(-10 * l1)) - (0.123 * Math.Exp(-7 * l1))) * b4 / (1 - b4);
+        double downstream = -0.031 * (m2 - (0.8 * Math.Pow(m2, 1.1))) * b * b03;
+        double small = pipe < SmallPipe ? 0.011 * (0.75 - b) * (2.8 - (pipe / Inch)) : 0;
+        return CoefficientLaw.Tenths(
+            0.5961 + (0.0261 * b2) - (0.216 * b4 * b4) + upstream + downstream + small,
+            0.0188 * b35,
+            0.000521 * b07,
+            -0.11 * upstream * a,
+            0.0063 * a * b35);
     }
 
     internal override double ExpansibilityCore(in MeterGeometry geometry, double pressure, double differential, double isentropicExponent) =>

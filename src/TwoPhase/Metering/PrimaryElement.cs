@@ -39,7 +39,7 @@ public abstract partial class PrimaryElement : DifferentialPressureMeter
     /// <summary>C, discharge coefficient in single-phase flow [-].</summary>
     /// <param name="reynolds">Re, Reynolds number of the pipe 4 ṁ/(π D μ), greater than zero; infinity is the limit.</param>
     /// <exception cref="ArgumentOutOfRangeException"><paramref name="reynolds"/> is not greater than zero.</exception>
-    public double DischargeCoefficient(double reynolds) => _calibration * CoefficientCore(_geometry, MeterArguments.Reynolds(reynolds, nameof(reynolds)));
+    public double DischargeCoefficient(double reynolds) => _calibration * LawOf(_geometry).At(MeterArguments.Reynolds(reynolds, nameof(reynolds)));
 
     /// <summary>Relative expanded uncertainty (k = 2) of <see cref="DischargeCoefficient"/>.</summary>
     /// <param name="reynolds">Re, Reynolds number of the pipe, greater than zero.</param>
@@ -100,7 +100,7 @@ public abstract partial class PrimaryElement : DifferentialPressureMeter
     /// <summary>Loss of an element without diffuser over its differential, ISO 5167-2:2003, 5.4, eq. (7), and ISO 5167-3:2003, 5.1.8.</summary>
     private protected double LossWithoutDiffuser(double reynolds)
     {
-        double c = CoefficientCore(_geometry, reynolds), beta2 = DiameterRatio * DiameterRatio;
+        double c = LawOf(_geometry).At(reynolds), beta2 = DiameterRatio * DiameterRatio;
         double root = Math.Sqrt(1 - (beta2 * beta2 * (1 - (c * c))));
         return (root - (c * beta2)) / (root + (c * beta2));
     }

@@ -91,8 +91,9 @@ public sealed partial class QualityMeter
         // What a Froude or a Reynolds number does to the flow of the homogeneous mixture stays far inside a factor of four either way.
         double x = Model.Inside(quality);
         double homogeneous = root * Fast.Sqrt(1 / ((x / state.VapourDensity) + ((1 - x) / state.LiquidDensity)));
-        double first = FlowFrom(geometry, state with { TotalMassFlow = homogeneous }, quality, root);
-        var balance = new FlowFixedPoint(this, geometry, state, quality, root);
+        CoefficientLaw law = Meter.LawOf(geometry);
+        double first = FlowFrom(geometry, law, state with { TotalMassFlow = homogeneous }, quality, root);
+        var balance = new FlowFixedPoint(this, geometry, law, state, quality, root);
         RootResult result = BracketedRoot.TryFind(balance, first / 4, first * 4, 1e-16 * first);
         return Accepted(result) ? result.X : throw NotSolved("flow", result.X, pressure, differential);
     }
@@ -119,14 +120,16 @@ public sealed partial class QualityMeter
         PipeDiameter = geometry.PipeDiameter,
         ThroatDiameter = geometry.ThroatDiameter,
         DiameterRatio = geometry.DiameterRatio,
-        DischargeCoefficient = Meter.CoefficientDependsOnReynolds ? double.NaN : Meter.CoefficientCore(geometry, double.PositiveInfinity),
+        DischargeCoefficient = Meter.CoefficientDependsOnReynolds ? double.NaN : Meter.LawOf(geometry).Limit,
         Expansibility = differential > 0 ? Meter.ExpansibilityCore(geometry, pressure, differential, steam.IsentropicExponent) : 1,
     };
 
     /// <summary>The state with the dry coefficient at the Reynolds number of a quality; unchanged for a meter whose coefficient is constant.</summary>
-    private MeterState WithCoefficient(in MeterGeometry geometry, in MeterState state, double quality) => Meter.CoefficientDependsOnReynolds
-        ? state with { DischargeCoefficient = Meter.CoefficientCore(geometry, Reynolds(geometry, state, Model.Inside(quality))) }
-        : state;
+    private MeterState WithCoefficient(in MeterGeometry geometry, in MeterState state, double quality) =>
+        Meter.CoefficientDependsOnReynolds ? WithCoefficient(geometry, Meter.LawOf(geometry), state, quality) : state;
+
+    private MeterState WithCoefficient(in MeterGeometry geometry, in CoefficientLaw law, in MeterState state, double quality) =>
+        state with { DischargeCoefficient = law.At(Reynolds(geometry, state, Model.Inside(quality))) };
 
     /// <summary>Reynolds number of the wet stream: the sum of what liquid and vapour would have alone in the pipe.</summary>
     private static double Reynolds(in MeterGeometry geometry, in MeterState state, double quality)
@@ -136,9 +139,9 @@ public sealed partial class QualityMeter
     }
 
     /// <summary>C/√(2 ve) · √2 times <paramref name="root"/> = ε E A √(2 Δp): the flow that a trial flow implies.</summary>
-    private double FlowFrom(in MeterGeometry geometry, in MeterState trial, double quality, double root)
+    private double FlowFrom(in MeterGeometry geometry, in CoefficientLaw law, in MeterState trial, double quality, double root)
     {
-        MeterState state = WithCoefficient(geometry, trial, quality);
+        MeterState state = WithCoefficient(geometry, law, trial, quality);
         return Model.DischargeCoefficientCore(state, Model.Inside(quality)) * root / Fast.Sqrt(CheckedVolume(state, quality));
     }
 
@@ -159,8 +162,8 @@ public sealed partial class QualityMeter
     }
 
     /// <summary>Zero where a flow implies itself.</summary>
-    private readonly struct FlowFixedPoint(QualityMeter owner, MeterGeometry geometry, MeterState state, double quality, double root) : IScalarFunction
+    private readonly struct FlowFixedPoint(QualityMeter owner, MeterGeometry geometry, CoefficientLaw law, MeterState state, double quality, double root) : IScalarFunction
     {
-        public double Value(double x) => (owner.FlowFrom(geometry, state with { TotalMassFlow = x }, quality, root) / x) - 1;
+        public double Value(double x) => (owner.FlowFrom(geometry, law, state with { TotalMassFlow = x }, quality, root) / x) - 1;
     }
 }

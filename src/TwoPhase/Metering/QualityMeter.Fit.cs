@@ -14,6 +14,6 @@ public sealed partial class QualityMeter
         double p = pressure.Si();
         MeterSteam steam = MeterSteam.At(p, expansion: true, transport: true);
         MeterGeometry geometry = Meter.GeometryAt(steam.Temperature);
-        return Meter.CoefficientCore(geometry, Reynolds(geometry, State(geometry, steam, flow.Si(), p, 0), quality.Si()));
+        return Meter.LawOf(geometry).At(Reynolds(geometry, State(geometry, steam, flow.Si(), p, 0), quality.Si()));
     }
 }

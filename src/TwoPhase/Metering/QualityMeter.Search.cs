@@ -7,10 +7,11 @@ public sealed partial class QualityMeter
     /// <summary>Steps in which the quality of a model of unknown trend is searched for every crossing.</summary>
     private const int SearchSteps = 64;
 
-    /// <summary>Secants after which the usual reading has long converged, and the relative residual at which it has.</summary>
-    private const int SecantSteps = 9;
+    /// <summary>Steps after which the usual reading has long converged.</summary>
+    private const int ShortSteps = 9;
 
-    private const double SecantResidual = 2e-14;
+    /// <summary>Residual from which the next step is the last: where the formula bends at once, its slope is a per cent wrong, and 1e-12 is left.</summary>
+    private const double LastResidual = 1e-10;
 
     /// <summary>Solves 1/(ρe C²) = 2 Δp (ε E A/ṁ)², whose right side the reading gives, for the quality.</summary>
     private QualitySolution SolveQuality(in MeterGeometry geometry, in MeterState state)
@@ -23,8 +24,9 @@ public sealed partial class QualityMeter
             return new QualitySolution(Model.QualityFromVolume(state, target * c * c));
         }
 
+        if (Model is WetSteamModel.ExponentModel sloped && TryNewton(sloped, geometry, state, target, out double quality)) return new QualitySolution(quality);
         var reduced = new ReducedVolume(this, geometry, state, target);
-        if (Model.Trend != DifferentialTrend.Unknown && TrySecant(reduced, out double quality)) return new QualitySolution(quality);
+        if (Model.Trend != DifferentialTrend.Unknown && TryChords(reduced, out quality)) return new QualitySolution(quality);
         double low = Model.LowestQuality, atLow = reduced.Value(low), atDry = reduced.Value(1);
         return Model.Trend == DifferentialTrend.Unknown ? SearchEverywhere(reduced, low, atLow, atDry)
             : atLow >= 0 ? Continued(geometry, state, target, low)
@@ -34,20 +36,22 @@ public sealed partial class QualityMeter
     }
 
     /// <summary>
-    /// The short way for the usual reading: secants from the homogeneous quality, nearly a straight line. Only a root inside the formula's
-    /// range counts, and only where it is the only one; everything else is left to the search between brackets.
+    /// The short way for the usual reading: from the homogeneous quality along the chord to dry steam, then on the parabola through the last three points,
+    /// until what is left is round-off. Only a root inside the formula's range counts, and only where it is the only one; everything else is left to
+    /// the search between brackets.
     /// </summary>
-    private bool TrySecant(in ReducedVolume reduced, out double quality)
+    private bool TryChords(in ReducedVolume reduced, out double quality)
     {
-        double c = double.IsNaN(reduced.State.DischargeCoefficient) ? 1 : reduced.State.DischargeCoefficient, liquid = 1 / reduced.State.LiquidDensity;
-        double slope = ((1 / reduced.State.VapourDensity) - liquid) / (reduced.Target * c * c), lowest = Model.LowestQuality;
-        double before = Fast.Clamp((1 - (liquid / (reduced.Target * c * c))) / slope, lowest + 0.05, 0.95), atBefore = reduced.Value(before);
+        double dry = reduced.Value(1), last = 1, lowest = Model.LowestQuality;
+        double before = Fast.Clamp(reduced.HomogeneousQuality, lowest + 0.05, 0.95), atBefore = reduced.Value(before), slope = (dry - atBefore) / (1 - before);
         quality = before - (atBefore / slope);
-        for (int i = 0; i < SecantSteps && quality > lowest && quality < 1; i++)
+        for (int i = 0; i < ShortSteps && quality > lowest && quality < 1; i++)
         {
-            double here = reduced.Value(quality);
-            if (Math.Abs(here) <= SecantResidual) return Model.Trend == DifferentialTrend.Rising || reduced.Value(1) > Residual;
-            (before, atBefore, quality) = (quality, here, quality - (here * (quality - before) / (here - atBefore)));
+            // The reciprocals wait for nothing that the evaluation yields.
+            double perLast = 1 / (quality - last), perBefore = 1 / (quality - before), here = reduced.Value(quality);
+            double chord = (here - atBefore) * perBefore, curvature = (chord - slope) * perLast;
+            (last, before, atBefore, slope, quality) = (before, quality, here, chord, quality - (here / (chord + (curvature * (quality - before)))));
+            if (Math.Abs(here) <= LastResidual) return quality > lowest && quality < 1 && (Model.Trend == DifferentialTrend.Rising || dry > Residual);
         }
 
         return false;
@@ -135,11 +139,13 @@ public sealed partial class QualityMeter
         public ReadingStatus Status => StatusOf(Quality);
     }
 
-    /// <summary>1/(ρe C²) over its target, less one: zero at the quality sought.</summary>
+    /// <summary>√(1/(ρe C²)) over that of its target, less one: zero at the quality sought, and for most models nearly a straight line.</summary>
     private readonly struct ReducedVolume(QualityMeter owner, in MeterGeometry geometry, in MeterState state, double target) : IScalarFunction
     {
         private readonly MeterGeometry _geometry = geometry;
         private readonly MeterState _state = state;
+        private readonly CoefficientLaw _law = owner.Meter.LawOf(geometry);
+        private readonly double _perRoot = 1 / Fast.Sqrt(target);
 
         public MeterGeometry Geometry => _geometry;
 
@@ -147,14 +153,19 @@ public sealed partial class QualityMeter
 
         public double Target { get; } = target;
 
-        public double Value(double x) => owner.Meter.CoefficientDependsOnReynolds
-            ? Value(owner.WithCoefficient(_geometry, _state, x), x)
-            : Value(_state, x);
-
-        private double Value(in MeterState at, double x)
+        /// <summary>The quality of the homogeneous model, with C in the limit where it depends on the flow.</summary>
+        public double HomogeneousQuality
         {
-            double c = owner.Model.DischargeCoefficientCore(at, x);
-            return (1 / (owner.Model.EffectiveDensityCore(at, x) * c * c * Target)) - 1;
+            get
+            {
+                double liquid = 1 / _state.LiquidDensity, vapour = 1 / _state.VapourDensity;
+                return ((Target * _law.Limit * _law.Limit) - liquid) / (vapour - liquid);
+            }
         }
+
+        public double Value(double x) => _law.IsConstant ? Value(_state, x) : Value(owner.WithCoefficient(_geometry, _law, _state, x), x);
+
+        private double Value(in MeterState at, double x) =>
+            (_perRoot / (owner.Model.DischargeCoefficientCore(at, x) * Fast.Sqrt(owner.Model.EffectiveDensityCore(at, x)))) - 1;
     }
 }

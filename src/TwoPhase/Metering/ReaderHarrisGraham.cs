@@ -1,4 +1,5 @@
 using TwoPhase.Flow;
+using TwoPhase.Numerics;
 
 namespace TwoPhase.Metering;
 
@@ -21,41 +22,43 @@ public abstract partial class WetSteamModel
     internal static WetSteamModel ReaderHarrisGrahamWith(double surfaceTensionFactor) =>
         new ReaderHarrisGrahamModel(FormattableString.Invariant($"Reader-Harris and Graham, H = {surfaceTensionFactor}"), surfaceTensionFactor);
 
-    private sealed class ReaderHarrisGrahamModel(string name, double surfaceTensionFactor) : WetSteamModel
+    private sealed class ReaderHarrisGrahamModel(string name, double surfaceTensionFactor) : ExponentModel
     {
+        private readonly double _perFroude = 0.8 / surfaceTensionFactor;
+
         public override string Name => name;
-
-        public override bool NeedsGeometry => true;
-
-        protected internal override bool NeedsTransport => false;
 
         protected internal override DifferentialTrend Trend => DifferentialTrend.RisingThenFalling;
 
-        protected internal override double EffectiveDensityCore(in MeterState meter, double quality)
+        protected internal override double DischargeCoefficientCore(in MeterState meter, double quality) => Coefficient(meter, new StateTerms(meter), default, quality).Value;
+
+        private protected override Sloped Exponent(in MeterState meter, double froude)
         {
-            double beta2 = meter.DiameterRatio * meter.DiameterRatio;
-            double n = Math.Max(0.583 - (0.18 * beta2) - (0.578 * Math.Exp(-0.8 / surfaceTensionFactor * GasFroude(meter, quality))), 0.392 - (0.18 * beta2));
-            return DensityFromChisholm(meter, quality, ChisholmCoefficient(meter, n));
+            double shape = 0.18 * meter.DiameterRatio * meter.DiameterRatio, below = 0.578 * Math.Exp(-_perFroude * froude), n = 0.583 - below;
+            return n > 0.392 ? new(n - shape, _perFroude * below) : new(0.392 - shape, 0);
         }
 
-        protected internal override double DischargeCoefficientCore(in MeterState meter, double quality)
+        internal override Sloped Coefficient(in MeterState meter, in StateTerms terms, in Sloped dry, double quality)
         {
-            double wetness = Math.Min(1, Numerics.Fast.Sqrt(LockhartMartinelli(meter, quality) / 0.016));
-            return 1 - (0.0463 * Math.Exp(-0.05 * ThroatFroude(meter, quality)) * wetness);
+            double throat = 0.05 * ThroatFroude(meter, terms.Froude), wet = 0.0463 * Math.Exp(-throat * quality);
+            double wetness = (1 - quality) / quality * terms.RootRatio / 0.016;
+            if (wetness >= 1) return new(1 - wet, throat * wet);
+            double nearlyDry = wet * Fast.Sqrt(wetness);
+            return new(1 - nearlyDry, nearlyDry * (throat + (1 / (2 * quality * (1 - quality)))));
         }
 
         protected internal override Applicability CheckCore(in MeterState meter, double quality) => Applicability.Inside
             .Check(ApplicabilityLimits.Quality, quality, 0, 1)
             .Check(ApplicabilityLimits.LockhartMartinelli, LockhartMartinelli(meter, quality), 0, 0.3)
-            .Check(ApplicabilityLimits.Froude, ThroatFroude(meter, quality), 3, double.PositiveInfinity)
+            .Check(ApplicabilityLimits.Froude, ThroatFroude(meter, GasFroude(meter, quality)), 3, double.PositiveInfinity)
             .Check(ApplicabilityLimits.DensityRatio, meter.VapourDensity / meter.LiquidDensity, 0.02, 1)
             .Check(ApplicabilityLimits.DiameterRatio, meter.DiameterRatio, 0.4, 0.75)
             .Check(ApplicabilityLimits.Bore, meter.PipeDiameter, 0.050, double.PositiveInfinity);
 
-        private static double ThroatFroude(in MeterState meter, double quality)
+        private static double ThroatFroude(in MeterState meter, double froude)
         {
             double beta = meter.DiameterRatio;
-            return GasFroude(meter, quality) / (beta * beta * Numerics.Fast.Sqrt(beta));
+            return froude / (beta * beta * Fast.Sqrt(beta));
         }
     }
 }

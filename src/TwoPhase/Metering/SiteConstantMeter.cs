@@ -54,7 +54,7 @@ public sealed class SiteConstantMeter : DifferentialPressureMeter
 
     internal override MeterGeometry SinglePhaseGeometry(Temperature? temperature) => _geometry;
 
-    internal override double CoefficientCore(in MeterGeometry geometry, double reynolds) => 1;
+    internal override CoefficientLaw LawOf(in MeterGeometry geometry) => CoefficientLaw.Constant(1);
 
     internal override double ExpansibilityCore(in MeterGeometry geometry, double pressure, double differential, double isentropicExponent) => 1;
 

@@ -1,4 +1,5 @@
 using TwoPhase.Flow;
+using TwoPhase.Numerics;
 
 namespace TwoPhase.Metering;
 
@@ -15,28 +16,18 @@ public abstract partial class WetSteamModel
     /// </remarks>
     public static WetSteamModel StevenOrifice { get; } = new StevenOrificeModel();
 
-    private sealed class StevenOrificeModel : WetSteamModel
+    private sealed class StevenOrificeModel : ExponentModel
     {
         private static readonly double LimitRoot = 1 / Math.Sqrt(2);
 
         public override string Name => "Steven, orifice (ISO/TR 11583)";
 
-        public override bool NeedsGeometry => true;
-
-        protected internal override bool NeedsTransport => false;
-
         protected internal override DifferentialTrend Trend => DifferentialTrend.Rising;
 
-        protected internal override double EffectiveDensityCore(in MeterState meter, double quality)
+        private protected override Sloped Exponent(in MeterState meter, double froude)
         {
-            double froude = GasFroude(meter, quality), n = 0.214;
-            if (froude > 1.5)
-            {
-                double root = LimitRoot - (0.3 / Numerics.Fast.Sqrt(froude));
-                n = Math.Max(n, root * root);
-            }
-
-            return DensityFromChisholm(meter, quality, ChisholmCoefficient(meter, n));
+            double below = 0.3 / Fast.Sqrt(froude), root = LimitRoot - below, n = root * root;
+            return froude > 1.5 && n > 0.214 ? new(n, root * below / froude) : new(0.214, 0);
         }
 
         protected internal override Applicability CheckCore(in MeterState meter, double quality) => Applicability.Inside

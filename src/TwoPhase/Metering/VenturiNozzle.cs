@@ -24,10 +24,10 @@ public sealed class VenturiNozzle : PrimaryElement
     /// <inheritdoc/>
     public override string Name => "Venturi nozzle";
 
-    internal override double CoefficientCore(in MeterGeometry geometry, double reynolds)
+    internal override CoefficientLaw LawOf(in MeterGeometry geometry)
     {
         double b2 = geometry.DiameterRatio * geometry.DiameterRatio;
-        return 0.9858 - (0.196 * b2 * b2 * Math.Sqrt(geometry.DiameterRatio));
+        return CoefficientLaw.Constant(0.9858 - (0.196 * b2 * b2 * Math.Sqrt(geometry.DiameterRatio)));
     }
 
     internal override double ExpansibilityCore(in MeterGeometry geometry, double pressure, double differential, double isentropicExponent) =>

@@ -11,7 +11,7 @@ namespace TwoPhase.Tests.Metering;
 public class WetSteamModelTests
 {
     // Steam at 10 MPa, rounded so that the test needs no steam properties; a 77.9 mm pipe with a 49 mm Venturi throat.
-    private static readonly MeterState Reference = new()
+    internal static readonly MeterState Reference = new()
     {
         Pressure = 10e6,
         LiquidDensity = 688.4,
