@@ -58,7 +58,7 @@ public sealed partial class OperatingSchedule
     private OperatingSchedule RampShare(string? section, Duration from, Duration over, Ratio to)
     {
         double value = Require.Within(to.Si(), 0, 1, ShareOf(section), Scale.None, nameof(to));
-        return Changed(copy => copy._split = copy._split.With(section, Ramp(copy._split.Of(section), from, over, value, ShareOf(section)), nameof(section)));
+        return Changed(copy => copy._split = copy._split.With(section, copy._split.Of(section).Ramp(from, over, value, ShareOf(section)), nameof(section)));
     }
 
     private OperatingSchedule WithShare(string? section, Column<DurationUnit> time, Column<RatioUnit> share)

@@ -48,7 +48,7 @@ public sealed partial class OperatingSchedule
     public OperatingSchedule RampFeedFlow(Duration from, Duration over, MassFlow to)
     {
         double value = Require.Positive(to.Si(), "Feed flow", Scale.KilogramsPerSecond, nameof(to));
-        return Changed(copy => copy._flow = Ramp(copy._flow, from, over, value, "feed flow"));
+        return Changed(copy => copy._flow = copy._flow.Ramp(from, over, value, "feed flow"));
     }
 
     /// <summary>A step of the feed temperature.</summary>
@@ -66,7 +66,7 @@ public sealed partial class OperatingSchedule
     {
         CheckFeed(nameof(to));
         double value = Require.Positive(to.Si(), "Feed temperature", Scale.Celsius, nameof(to));
-        return Changed(copy => copy._temperature = Ramp(copy._temperature, from, over, value, "feed temperature"));
+        return Changed(copy => copy._temperature = copy._temperature.Ramp(from, over, value, "feed temperature"));
     }
 
     /// <summary>A step of the outlet pressure; a run spreads it over one of its steps.</summary>
@@ -82,7 +82,7 @@ public sealed partial class OperatingSchedule
     public OperatingSchedule RampOutletPressure(Duration from, Duration over, Pressure to)
     {
         double value = Require.Positive(to.Si(), "Outlet pressure", Scale.Megapascals, nameof(to));
-        return Changed(copy => copy._pressure = Ramp(copy._pressure, from, over, value, "outlet pressure"));
+        return Changed(copy => copy._pressure = copy._pressure.Ramp(from, over, value, "outlet pressure"));
     }
 
     /// <summary>A step of the absorbed heat.</summary>
@@ -98,7 +98,7 @@ public sealed partial class OperatingSchedule
     public OperatingSchedule RampAbsorbedHeat(Duration from, Duration over, Power to)
     {
         double value = Require.NotNegative(to.Si(), "Absorbed heat", Scale.Megawatts, nameof(to));
-        return Changed(copy => copy._heat = Ramp(copy._heat, from, over, value, "absorbed heat"));
+        return Changed(copy => copy._heat = copy._heat.Ramp(from, over, value, "absorbed heat"));
     }
 
     /// <summary>A step of the firing, the heat taken as proportional to it.</summary>
@@ -114,8 +114,11 @@ public sealed partial class OperatingSchedule
     public OperatingSchedule RampFiring(Duration from, Duration over, Ratio ofStart)
     {
         double value = Require.NotNegative(ofStart.Si(), "Firing over that at the start", Scale.None, nameof(ofStart)) * Start.RawAbsorbedHeat;
-        return Changed(copy => copy._heat = Ramp(copy._heat, from, over, value, "absorbed heat"));
+        return Changed(copy => copy._heat = copy._heat.Ramp(from, over, value, "absorbed heat"));
     }
+
+    /// <summary>Whether the feed flow ever changes.</summary>
+    internal bool MovesFeedFlow => _flow.Range() != (Start.RawFeedFlow, Start.RawFeedFlow);
 
     /// <summary>Means over an interval, which keep mass and heat whole, and the pressure at its end.</summary>
     internal PassConditions Over(double from, double to) => Start with
@@ -125,12 +128,6 @@ public sealed partial class OperatingSchedule
         RawOutletPressure = _pressure.At(to),
         RawAbsorbedHeat = _heat.Mean(from, to),
     };
-
-    private static TimeCurve Ramp(TimeCurve curve, Duration from, Duration over, double value, string quantity)
-    {
-        double start = Require.NotNegative(from.Si(), $"Start of a change of {quantity}", Scale.Seconds, nameof(from));
-        return curve.Then(start, start + Require.NotNegative(over.Si(), $"Length of a change of {quantity}", Scale.Seconds, nameof(over)), value, quantity, nameof(from));
-    }
 
     private void CheckFeed(string parameter)
     {

@@ -32,5 +32,5 @@ public sealed partial class PassHistory
         foreach (PassInstant row in _rows) writer.WriteLine(string.Join(",", HistoryColumn.All.Select(column => Cell(column.Raw(row)))));
     }
 
-    private static string Cell(double value) => double.IsNaN(value) ? "" : value.ToString("G9", CultureInfo.InvariantCulture);
+    internal static string Cell(double value) => double.IsNaN(value) ? "" : value.ToString("G9", CultureInfo.InvariantCulture);
 }

@@ -91,14 +91,27 @@ public sealed partial class PassSimulator
         {
             double from = i * Options.RawSampling, to = Math.Min(seconds, from + Options.RawSampling);
             PassConditions conditions = schedule.Over(from, to);
-            Check(conditions, nameof(schedule));
-            _channel.Split(split.Over(from, to));
-            PassInstant row = AdvanceCore(conditions, to - from);
+            PassInstant row = Advance(conditions, split, from, to);
             if (End == SimulationEnd.None) rows.Add(row);
         }
 
         return new(rows, End == SimulationEnd.None ? SimulationEnd.Completed : End, EndReason);
     }
+
+    /// <summary>ρ of the feed at a pressure in front of the pass [kg/m³].</summary>
+    internal double FeedDensity(in PassConditions conditions, double pressure) =>
+        1 / _fluid.At(pressure, FeedEnthalpy(conditions, pressure), _fluid.Saturated(pressure)).SpecificVolume;
+
+    /// <summary>Moves on through a part of a schedule.</summary>
+    internal PassInstant Advance(in PassConditions conditions, HeatSplit.Factors split, double from, double to)
+    {
+        Check(conditions, "schedule");
+        _channel.Split(split.Over(from, to));
+        return AdvanceCore(conditions, to - from);
+    }
+
+    internal void StopForLackOfFeed() =>
+        (End, EndReason) = (SimulationEnd.FlowStagnated, FormattableString.Invariant($"The feed of pass '{Pass.Name}' came to a stand at {_time:G6} s: its valve passes nothing."));
 
     private PassInstant AdvanceCore(in PassConditions conditions, double seconds)
     {

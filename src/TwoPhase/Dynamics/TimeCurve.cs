@@ -1,4 +1,5 @@
 using TwoPhase.Units;
+using UnitsNet;
 
 namespace TwoPhase.Dynamics;
 
@@ -38,6 +39,13 @@ internal sealed class TimeCurve
 
     /// <summary>The curve with a value in place of every knot that has none.</summary>
     public TimeCurve StartingAt(double value) => new(_times, Array.ConvertAll(_values, knot => double.IsNaN(knot) ? value : knot));
+
+    /// <summary>The curve with a ramp that a user asks for.</summary>
+    public TimeCurve Ramp(Duration from, Duration over, double value, string quantity)
+    {
+        double start = Require.NotNegative(from.Si(), $"Start of a change of {quantity}", Scale.Seconds, nameof(from));
+        return Then(start, start + Require.NotNegative(over.Si(), $"Length of a change of {quantity}", Scale.Seconds, nameof(over)), value, quantity, nameof(from));
+    }
 
     /// <summary>The value at a time; behind a step where one stands.</summary>
     public double At(double time)
