@@ -23,7 +23,7 @@ internal sealed class LimitQuantity
 
     public IQuantity Difference(double value) => _difference(value);
 
-    public string LevelText(double value) => _levelScale.Text(value, "G5");
+    public string LevelText(double value) => _levelScale.Text(value, "G4");
 
     public string DifferenceText(double value) => (value > 0 ? "+" : "") + _differenceScale.Text(value, "G3");
 }

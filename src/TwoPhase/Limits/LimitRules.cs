@@ -1,9 +1,7 @@
 using TwoPhase.Flow;
 using TwoPhase.Metering;
-using TwoPhase.Numerics;
 using TwoPhase.Passes;
 using TwoPhase.Units;
-using UnitsNet;
 
 namespace TwoPhase.Limits;
 
@@ -71,9 +69,12 @@ internal static class LimitRules
         return figure.Above(1, worst.Wall.Pattern.StratificationMargin, worst.Node, $"{worst.Wall.Pattern.Regime}; about the factor by which flow may fall before the top of the tube runs dry");
     }
 
-    // The map takes both phases for turbulent; with less vapour than that, in the first hair's breadth of boiling, bubbles flow and no tube top is dry.
-    private static bool IsMapped(in FlowState flow) =>
-        flow.Quality is > 0 and < 1 && Math.Abs(flow.Inclination) <= FlatEnough && flow.MassFlux * flow.Quality * flow.Bore / flow.VapourViscosity > FrictionFactor.TransitionReynolds;
+    // The map takes both phases for turbulent. With less vapour than that, in the first hair's breadth of boiling, bubbles flow and no tube top is dry; with less
+    // liquid, in the last, dryout is the question.
+    private static bool IsMapped(in FlowState flow) => flow.Quality is > 0 and < 1 && Math.Abs(flow.Inclination) <= FlatEnough
+        && Reynolds(flow, flow.Quality, flow.VapourViscosity) > FrictionFactor.TransitionReynolds && Reynolds(flow, 1 - flow.Quality, flow.LiquidViscosity) > FrictionFactor.TransitionReynolds;
+
+    private static double Reynolds(in FlowState flow, double share, double viscosity) => flow.MassFlux * share * flow.Bore / viscosity;
 
     private static LimitFigure Metal(IReadOnlyList<HeatedRow> rows, SiteLimits site)
     {
@@ -106,21 +107,9 @@ internal static class LimitRules
         if (profile.Pass.Meter is not { } meter) return figure.NotApplicable("the pass has no meter at its outlet");
         if (double.IsNaN(site.RawDifferential.High)) return figure.NotApplicable("no transmitter range is given");
         PassNode outlet = profile.Nodes[^1];
-        return Differential(meter, profile, outlet) is { } differential
-            ? Between(figure, differential, site.RawDifferential, outlet)
-            : figure.NotApplicable("the meter chokes at this flow, pressure and quality, or its model has no answer");
-    }
-
-    private static double? Differential(QualityMeter meter, PassProfile profile, in PassNode outlet)
-    {
-        try
-        {
-            return meter.Differential(profile.Conditions.FeedFlow, Pressure.FromPascals(outlet.Pressure), MassFraction.FromDecimalFractions(outlet.EquilibriumQuality)).Si();
-        }
-        catch (Exception error) when (error is ArgumentOutOfRangeException or ConvergenceException)
-        {
-            return null;
-        }
+        if (outlet.EquilibriumQuality < 0) return figure.NotApplicable("the outlet is subcooled, where no wet-steam model holds");
+        double differential = meter.DifferentialOrNaN(profile.Conditions.RawFeedFlow, outlet.Pressure, outlet.EquilibriumQuality);
+        return differential > 0 ? Between(figure, differential, site.RawDifferential, outlet) : figure.NotApplicable("the meter chokes at this flow, pressure and quality, or its model has no answer");
     }
 
     private static LimitFigure Flow(PassProfile profile, SiteLimits site)

@@ -81,8 +81,16 @@ internal readonly struct SteamFluid : IPassFluid
 
     public PhaseTransport Transport(double pressure, double enthalpy)
     {
-        PhaseCore phase = Water.AtPressureEnthalpy(pressure, enthalpy).Phase;
+        WaterCore water = Water.AtPressureEnthalpy(pressure, enthalpy);
+        PhaseCore phase = water.IsWet ? Nearer(water) : water.Phase;
         return new(Steam.Transport.Viscosity(phase.Density, phase.Temperature), Steam.Transport.Conductivity(phase), phase.IsobaricHeatCapacity);
+    }
+
+    // What stands on the saturation line is the phase that it stands beside, on whichever side round-off puts it.
+    private static PhaseCore Nearer(in WaterCore wet)
+    {
+        SaturationCore steam = SaturationLine.AtPressure(wet.Pressure);
+        return wet.Quality < 0.5 ? steam.Liquid : steam.Vapour;
     }
 
     public double Film(in PhaseTransport phase, double massFlux, double bore) =>

@@ -7,6 +7,8 @@ namespace TwoPhase.Passes;
 /// <summary>From a node of a profile to the wall around it, SI doubles.</summary>
 internal static class WallSolver
 {
+    private static SteamFluid Fluid => default;
+
     public static PassWall At(PassProfile profile, in PassNode node, double fluxPeak)
     {
         FlowPattern pattern = FlowPattern.Core(node.Flow);
@@ -32,7 +34,22 @@ internal static class WallSolver
         node.LinearHeat / section.ParallelTubes * (section.Zone == HeatZone.Radiant ? fluxPeak : 1);
 
     /// <summary>The flow with both phases saturated and every property that a heat-transfer model reads.</summary>
-    public static FlowState Saturated(in PassNode node) => FlowStates.At(node.Pressure, node.Flow.Quality, node.Flow.MassFlux, node.Flow.Bore, node.Flow.Inclination);
+    public static FlowState Saturated(in PassNode node)
+    {
+        SaturatedPair pair = Fluid.Saturated(node.Pressure);
+        SaturatedHeat heat = SaturationTable.Heat(node.Pressure);
+        return node.Flow with
+        {
+            LiquidDensity = 1 / pair.LiquidVolume,
+            VapourDensity = 1 / pair.VapourVolume,
+            LiquidViscosity = pair.LiquidViscosity,
+            VapourViscosity = pair.VapourViscosity,
+            LiquidConductivity = heat.LiquidConductivity,
+            VapourConductivity = heat.VapourConductivity,
+            LiquidHeatCapacity = heat.LiquidHeatCapacity,
+            VapourHeatCapacity = heat.VapourHeatCapacity,
+        };
+    }
 
     /// <summary>h [W/(m²·K)] over the difference between wetted surface and flow.</summary>
     private static double Film(FilmModel model, in PassNode node, in FlowState saturated, double flux)
@@ -45,20 +62,7 @@ internal static class WallSolver
     }
 
     /// <summary>h [W/(m²·K)] of the liquid or the dry steam alone, by Gnielinski.</summary>
-    public static double OnePhase(in PassNode node)
-    {
-        PhaseCore phase = Phase(node);
-        return SinglePhaseFilm.GnielinskiCore(new(node.Flow.MassFlux, node.Flow.Bore, Transport.Viscosity(phase.Density, phase.Temperature), Transport.Conductivity(phase), phase.IsobaricHeatCapacity));
-    }
-
-    // A node that stands on the saturation line is the saturated phase, on whichever side round-off puts it.
-    private static PhaseCore Phase(in PassNode node)
-    {
-        WaterCore water = Water.AtPressureEnthalpy(node.Pressure, node.Enthalpy);
-        if (!water.IsWet) return water.Phase;
-        SaturationCore steam = SaturationLine.AtPressure(node.Pressure);
-        return node.EquilibriumQuality < 0.5 ? steam.Liquid : steam.Vapour;
-    }
+    public static double OnePhase(in PassNode node) => Fluid.Film(Fluid.Transport(node.Pressure, node.Enthalpy), node.Flow.MassFlux, node.Flow.Bore);
 
     private static CriticalQuality Critical(CriticalQualityModel model, TubeSection section, in FlowState flow, double flux)
     {

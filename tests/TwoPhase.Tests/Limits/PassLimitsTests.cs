@@ -172,6 +172,8 @@ public class PassLimitsTests
     {
         PassLimits limits = PassLimits.Of(SteadyState.Solve(ExamplePass.Pass, ExamplePass.Conditions.WithAbsorbedHeat(Power.Zero)), Site);
         Assert.Null(limits.Critical);
+        LimitFinding differential = Row(PassLimits.Of(SteadyState.Solve(ExamplePass.Pass.WithMeter(Meter), ExamplePass.Conditions.WithAbsorbedHeat(Power.Zero)), Site), LimitKind.Differential);
+        Assert.Contains("subcooled", differential.Reason, StringComparison.Ordinal);
         Assert.Equal(LimitStatus.NotApplicable, Row(limits, LimitKind.Stratification).Status);
         Assert.Contains("no section takes heat", Row(limits, LimitKind.MetalTemperature).Reason, StringComparison.Ordinal);
         Assert.Equal(3, limits.Count(row => row.Kind == LimitKind.CriticalQuality && row.Status == LimitStatus.NotApplicable));

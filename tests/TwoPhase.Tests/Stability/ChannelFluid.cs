@@ -61,7 +61,10 @@ internal readonly struct ChannelFluid : IPassFluid
     public double Viscosity(double density, double temperature) => 1e-16;
 
     public double LiquidEnthalpy(double pressure, double temperature) => Fluid.LiquidEnthalpy(pressure, temperature);
-    public PhaseTransport Transport(double pressure, double enthalpy) => throw new NotImplementedException();
-    public double Film(in PhaseTransport phase, double massFlux, double bore) => throw new NotImplementedException();
-    public double Film(in FlowState flow, FilmModel model, double heatFlux) => throw new NotImplementedException();
+
+    public PhaseTransport Transport(double pressure, double enthalpy) => Fluid.Transport(pressure, enthalpy);
+
+    public double Film(in PhaseTransport phase, double massFlux, double bore) => Fluid.Film(phase, massFlux, bore);
+
+    public double Film(in FlowState flow, FilmModel model, double heatFlux) => Fluid.Film(flow, model, heatFlux);
 }
