@@ -19,6 +19,7 @@ internal sealed class Run(string? generatorFile, string? historyFile, string fol
 
         var faults = new SampleFaults();
         IReadOnlyList<PassSummary> passes = [];
+        IReadOnlyList<Margins> margins = [];
         IAnsiConsole console = AnsiConsole.Create(new AnsiConsoleSettings { Out = new AnsiConsoleOutput(output), Ansi = isTerminal ? AnsiSupport.Detect : AnsiSupport.No, Interactive = isTerminal ? InteractionSupport.Detect : InteractionSupport.No });
         if (!isTerminal) console.Profile.Width = 150;
         WithProgress(console, isTerminal, (reading, inferring, drawing) =>
@@ -26,13 +27,20 @@ internal sealed class Run(string? generatorFile, string? historyFile, string fol
             HistoryTable table = HistoryReader.Read(history, site.History, site.Tags, faults, reading);
             passes = Comparison.Of(PassSeries.From(site.Generator, table, faults, history, inferring));
             drawing?.Report(0.3);
-            Figures.Write(folder, passes, faults);
+            margins = Margins.Of(passes, site.Limits);
+            Figures.Write(folder, passes, margins, faults);
             drawing?.Report(0.6);
             Pictures.Write(folder, site.Generator.Name, passes);
-            if (passes.LastOrDefault(pass => pass.Interior is not null) is { } calmest) ProfilePicture.Write(folder, calmest);
+            if (margins.Count == 0) return;
+            Margins calmest = margins[^1];
+            ProfilePicture.Write(folder, calmest.Pass);
+            WallPicture.Write(folder, calmest);
+            CharacteristicPicture.Write(folder, calmest);
+            drawing?.Report(0.7);
+            MapPicture.Write(folder, calmest);
         });
         if (generatorFile is null) console.WriteLine("Demonstration: generator, tags and history are invented.");
-        Screen.Write(console, site.Generator.Name, passes, faults, folder);
+        Screen.Write(console, site.Generator.Name, passes, margins, faults, folder);
     }
 
     private string Demo(Site site)

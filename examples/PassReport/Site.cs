@@ -1,6 +1,7 @@
 using System.Text.Json;
 using PassReport.History;
 using TwoPhase.Json;
+using TwoPhase.Limits;
 using TwoPhase.Metering;
 using TwoPhase.Passes;
 using TwoPhase.Units;
@@ -12,11 +13,13 @@ internal sealed class Site
 {
     private static readonly JsonSerializerOptions Options = new(JsonSerializerDefaults.Web) { UnmappedMemberHandling = System.Text.Json.Serialization.JsonUnmappedMemberHandling.Disallow };
 
-    private Site(SteamGenerator generator, HistorySettings history) => (Generator, History) = (generator, history);
+    private Site(SteamGenerator generator, HistorySettings history, SiteLimits limits) => (Generator, History, Limits) = (generator, history, limits);
 
     public SteamGenerator Generator { get; }
 
     public HistorySettings History { get; }
+
+    public SiteLimits Limits { get; }
 
     /// <summary>Every tag that the report reads, once.</summary>
     public IReadOnlyList<Tag> Tags =>
@@ -48,7 +51,7 @@ internal sealed class Site
         }
 
         for (int i = 0; i < generator.Passes.Count; i++) CheckPass(generator, i, file);
-        return new Site(generator, Settings(json, file));
+        return new Site(generator, Settings<HistorySettings>(json, file, "history"), ToLimits(Settings<LimitSettings>(json, file, "limits"), file));
     }
 
     private static void CheckPass(SteamGenerator generator, int index, string file)
@@ -65,17 +68,30 @@ internal sealed class Site
         }
     }
 
-    private static HistorySettings Settings(string json, string file)
+    private static SiteLimits ToLimits(LimitSettings settings, string file)
     {
-        using var document = JsonDocument.Parse(json, new() { CommentHandling = JsonCommentHandling.Skip, AllowTrailingCommas = true });
-        if (!document.RootElement.TryGetProperty("history", out JsonElement history)) return new HistorySettings();
         try
         {
-            return history.Deserialize<HistorySettings>(Options) ?? new HistorySettings();
+            return settings.ToLimits();
+        }
+        catch (ArgumentException error)
+        {
+            throw new FileFault(file, "$.limits", error.Message);
+        }
+    }
+
+    private static T Settings<T>(string json, string file, string member)
+        where T : class, new()
+    {
+        using var document = JsonDocument.Parse(json, new() { CommentHandling = JsonCommentHandling.Skip, AllowTrailingCommas = true });
+        if (!document.RootElement.TryGetProperty(member, out JsonElement settings)) return new T();
+        try
+        {
+            return settings.Deserialize<T>(Options) ?? new T();
         }
         catch (JsonException error)
         {
-            throw new FileFault(file, "$.history" + (error.Path is { Length: > 1 } path ? path[1..] : ""), error.Message.Split(" Path:")[0].TrimEnd('.'));
+            throw new FileFault(file, "$." + member + (error.Path is { Length: > 1 } path ? path[1..] : ""), error.Message.Split(" Path:")[0].TrimEnd('.'));
         }
     }
 }

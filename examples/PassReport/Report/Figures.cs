@@ -7,7 +7,7 @@ namespace PassReport.Report;
 /// <summary>The full figures as CSV: the history of quality, the passes, the moves, and the samples that were skipped.</summary>
 internal static class Figures
 {
-    public static void Write(string folder, IReadOnlyList<PassSummary> passes, SampleFaults faults)
+    public static void Write(string folder, IReadOnlyList<PassSummary> passes, IReadOnlyList<Margins> margins, SampleFaults faults)
     {
         Quality(Path.Combine(folder, "quality.csv"), [.. passes.OrderBy(pass => pass.Name, StringComparer.OrdinalIgnoreCase)]);
         Table(Path.Combine(folder, "passes.csv"), ["pass", "flow_kg_s", "pressure_Pa_abs", "differential_Pa", "quality", "apart_from_middle", "wander_at_rest", "share_moving", "share_unread", "attention_points", "heat_W", "boils_from_m", "water_held_kg", "water_upstream_of_boiling_kg", "residence_s", "pressure_drop_Pa", "model", "model_quality", "model_inside_range", "model_exceeds"],
@@ -19,6 +19,7 @@ internal static class Figures
             ])));
         Table(Path.Combine(folder, "moves.csv"), ["pass", "start", "end", "cause", "quality_before", "quality_after", "overshoot", "peak_time"],
             passes.SelectMany(pass => pass.Moves.Select(move => new[] { pass.Name, Iso(move.Start), Iso(move.End), move.Cause, Full(move.Before), Full(move.After), Full(move.Overshoot), Iso(move.PeakTime) })));
+        Table(Path.Combine(folder, "limits.csv"), LimitTable.Heading, LimitTable.Rows(margins));
         Table(Path.Combine(folder, "faults.csv"), ["row", "column", "fault", "text"],
             faults.Entries.Select(entry => new[] { entry.Row.ToString(CultureInfo.InvariantCulture), entry.Column, SampleFaults.Words(entry.Fault), entry.Text }));
     }

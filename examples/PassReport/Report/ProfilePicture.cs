@@ -1,16 +1,12 @@
 using ScottPlot;
-using SkiaSharp;
 using TwoPhase.Passes;
+using static PassReport.Report.Panels;
 
 namespace PassReport.Report;
 
 /// <summary>One pass from inlet to outlet: enthalpy, quality, void fraction and the liquid that stands there, against length and against volume.</summary>
 internal static class ProfilePicture
 {
-    private const int Width = 1200, Height = 1000;
-
-    private static readonly Color Ink = Color.FromHex("#222222"), Line = Color.FromHex("#0072B2"), Boiling = Color.FromHex("#D55E00");
-
     public static void Write(string folder, PassSummary pass)
     {
         Interior interior = pass.Interior!;
@@ -28,15 +24,15 @@ internal static class ProfilePicture
         {
             // The legend stands where the curve does not: under one that rises, above one that falls.
             Alignment free = values[^1] > values[0] ? Alignment.LowerRight : Alignment.UpperRight;
-            plots.Add(Draw(length, values, label, interior.Onset?.Position.Meters, free));
-            plots.Add(Draw(volume, values, label, interior.Onset is { } onset ? onset.ShareOfVolume.DecimalFractions * volume[^1] : null, free));
+            plots.Add(One(length, values, label, interior.Onset?.Position.Meters, free));
+            plots.Add(One(volume, values, label, interior.Onset is { } onset ? onset.ShareOfVolume.DecimalFractions * volume[^1] : null, free));
         }
 
         plots[0].Title($"{pass.Name}, at rest as it reads: against length", 16);
         plots[1].Title("against water-side volume", 16);
         plots[^2].XLabel("Length from the inlet [m]");
         plots[^1].XLabel("Volume from the inlet [m³]");
-        Save(folder, plots);
+        Save(folder, "profile", plots, 2, 1200, 1000);
     }
 
     // Whatever is not vapour: the liquid held is total less vapour, both per volume of tube.
@@ -48,35 +44,17 @@ internal static class ProfilePicture
         return point.Density.KilogramsPerCubicMeter - (alpha * vapour);
     }
 
-    private static Plot Draw(double[] x, double[] y, string label, double? onset, Alignment legendAt)
+    private static Plot One(double[] x, double[] y, string label, double? onset, Alignment legendAt)
     {
-        var plot = new Plot();
-        plot.Font.Set(Fonts.Sans);
-        plot.Axes.Color(Ink);
-        plot.Grid.MajorLineColor = Ink.WithAlpha(0.12);
-        plot.Add.ScatterLine(x, y, Line).LineWidth = 2;
+        Plot plot = New(label);
+        Draw(plot, x, y, Main, LinePattern.Solid);
         if (onset is { } at)
         {
-            ScottPlot.Plottables.VerticalLine line = plot.Add.VerticalLine(at, 2, Boiling, LinePattern.Dashed);
-            line.LegendText = "boiling begins";
-            plot.ShowLegend(legendAt).FontSize = 12;
+            plot.Add.VerticalLine(at, 2, Accent, LinePattern.Dashed).LegendText = "boiling begins";
+            plot.ShowLegend(legendAt);
         }
 
-        plot.YLabel(label);
-        plot.Axes.Left.Label.FontSize = plot.Axes.Bottom.Label.FontSize = 14;
-        plot.Axes.Left.MinimumSize = 80;
         plot.Axes.SetLimitsX(0, x[^1]);
         return plot;
-    }
-
-    private static void Save(string folder, List<Plot> plots)
-    {
-        var picture = new Multiplot { Layout = new ScottPlot.MultiplotLayouts.Grid(plots.Count / 2, 2) };
-        picture.RemovePlot(picture.GetPlot(0));
-        foreach (Plot plot in plots) picture.AddPlot(plot);
-        picture.SavePng(Path.Combine(folder, "profile.png"), Width, Height);
-        using FileStream file = File.Create(Path.Combine(folder, "profile.svg"));
-        using SKCanvas svg = SKSvgCanvas.Create(new SKRect(0, 0, Width, Height), file);
-        picture.Render(svg, new PixelRect(0, Width, Height, 0));
     }
 }

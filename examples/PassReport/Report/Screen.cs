@@ -7,7 +7,7 @@ namespace PassReport.Report;
 /// <summary>The report on the screen: verdict, one row a pass, cautions.</summary>
 internal static class Screen
 {
-    public static void Write(IAnsiConsole console, string generator, IReadOnlyList<PassSummary> passes, SampleFaults faults, string folder)
+    public static void Write(IAnsiConsole console, string generator, IReadOnlyList<PassSummary> passes, IReadOnlyList<Margins> margins, SampleFaults faults, string folder)
     {
         DateTimeOffset[] times = passes[0].Series.Times;
         console.WriteLine($"{generator}, {Time(times[0])} to {Time(times[^1])} ({Length(times[^1] - times[0])}, {Words.Count(times.Length, "row", "rows")})");
@@ -26,6 +26,12 @@ internal static class Screen
         // A steady state says nothing of a pass that is not in one.
         if (passes.Where(pass => pass.IsMovingNow && pass.Series.Pass.Sections.Count > 0).Select(pass => pass.Name).ToArray() is { Length: > 0 } moving)
             console.WriteLine($"What stands inside {Listed(moving)} is left out: still moving.");
+
+        if (margins.Count > 0)
+        {
+            console.WriteLine();
+            LimitTable.Write(console, margins);
+        }
 
         console.WriteLine();
         foreach (string caution in Verdict.Cautions(passes)) console.WriteLine("- " + caution);

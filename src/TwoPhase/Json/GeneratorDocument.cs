@@ -16,6 +16,9 @@ internal sealed class GeneratorDocument
     /// <summary>Settings of a program that reads this generator's histories; not read here.</summary>
     public JsonElement? History { get; set; }
 
+    /// <summary>Limits that a program holds the passes to; not read here.</summary>
+    public JsonElement? Limits { get; set; }
+
     public SiteDocument? Site { get; set; }
 
     public Dictionary<string, string>? Tags { get; set; }

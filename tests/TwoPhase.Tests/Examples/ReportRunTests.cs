@@ -40,11 +40,17 @@ public sealed class ReportRunTests : IDisposable
         string[] move = File.ReadAllLines(Out("moves.csv"))[1].Split(',');
         Assert.InRange(double.Parse(move[6], CultureInfo.InvariantCulture), 0.02, 0.12);
         Assert.Contains("Boils from", output, StringComparison.Ordinal);
+        Assert.Contains("never a substitute for tube-skin thermocouples or trips", output, StringComparison.Ordinal);
+        Assert.Contains("It is for you to confirm", output, StringComparison.Ordinal);
+        string[] limits = File.ReadAllLines(Out("limits.csv"));
+        Assert.StartsWith("pass,limit,status,", limits[0], StringComparison.Ordinal);
+        Assert.Contains(limits, line => line.Contains("critical quality", StringComparison.Ordinal) && line.Contains("Indicator", StringComparison.Ordinal));
+        Assert.Contains(limits, line => line.Contains("metal temperature", StringComparison.Ordinal) && line.Contains("no limit of metal temperature is given", StringComparison.Ordinal));
         string[] heading = File.ReadAllLines(Out("passes.csv"))[0].Split(','), row = File.ReadAllLines(Out("passes.csv"))[1].Split(',');
 
         // What the model that made the readings holds at the end: 1550.68 kg.
         Assert.InRange(double.Parse(row[Array.IndexOf(heading, "water_held_kg")], CultureInfo.InvariantCulture), 1550.68 * 0.9, 1550.68 * 1.1);
-        foreach (string name in new[] { "quality", "inputs", "models", "profile" })
+        foreach (string name in new[] { "quality", "inputs", "models", "profile", "walls", "characteristic", "map" })
         {
             Assert.True(new FileInfo(Out(name + ".png")).Length > 5000);
             Assert.StartsWith("<?xml", File.ReadAllText(Out(name + ".svg")), StringComparison.Ordinal);
@@ -137,6 +143,9 @@ public sealed class ReportRunTests : IDisposable
 
     [Theory]
     [InlineData("\"throat\": \"49 mm\"", "\"throat\": \"90 mm\"", "g.json: $.passes[0].meter.throat: ")]
+    [InlineData("\"name\": \"Two\",", "\"name\": \"Two\", \"limits\": { \"outletQuality\": 80 },", "g.json, $.limits: Limit of outlet quality = 80 must lie between 0 and 1")]
+    [InlineData("\"name\": \"Two\",", "\"name\": \"Two\", \"limits\": { \"quality\": 0.8 },", "g.json, $.limits")]
+    [InlineData("\"name\": \"Two\",", "\"name\": \"Two\", \"limits\": { \"solids\": [{ \"name\": \"silica\", \"feed\": -1, \"outlet\": 3 }] },", "Feed concentration of 'silica' = -1 mg/L")]
     [InlineData("\"name\": \"Two\",", "\"name\": \"Two\"", "g.json: line 3, column ")]
     [InlineData("\"zone\": \"Europe/Berlin\"", "\"zone\": \"Nowhere/Town\"", "time zone 'Nowhere/Town'")]
     [InlineData("\"zone\"", "\"zoom\"", "g.json, $.history")]
