@@ -15,6 +15,7 @@ internal sealed partial class Channel<TFluid>
         double face = FeedEnthalpy;
         foreach (ref Cell cell in _cells.AsSpan())
         {
+            cell.Head = 0;
             face += cell.HeatShare * Heat / feedFlow;
             (cell.Outflow, cell.OutEnthalpy, cell.HeatToWater) = (feedFlow, face, cell.HeatShare * Heat);
             cell.FlowEnthalpy = face - (Rise(cell) / 2);
