@@ -39,8 +39,8 @@ internal readonly struct Duct
     /// <summary>K of return bends per length [1/m].</summary>
     public double BendLoss { get; init; }
 
-    /// <summary>Radius of the bends over bore [-].</summary>
-    public double BendRatio { get; init; }
+    /// <summary>Chisholm's B of one return bend [-].</summary>
+    public double BendB { get; init; }
 
     /// <summary>K of everything else per length [1/m].</summary>
     public double OtherLoss { get; init; }

@@ -45,7 +45,6 @@ internal static class LocalFlow
         double gradient = wet ? friction.GradientCore(flow, duct.Roughness)
             : x == 0 ? FrictionFactor.GradientCore(massFlux, duct.Bore, liquidDensity, liquidViscosity, duct.Roughness)
             : FrictionFactor.GradientCore(massFlux, duct.Bore, vapourDensity, vapourViscosity, duct.Roughness);
-        double volume = (x / vapourDensity) + ((1 - x) / liquidDensity), dynamic = massFlux * massFlux / 2;
         return new()
         {
             Enthalpy = enthalpy,
@@ -53,7 +52,7 @@ internal static class LocalFlow
             EquilibriumQuality = equilibrium,
             VoidFraction = alpha,
             Friction = gradient * duct.FrictionMultiplier,
-            Fittings = dynamic * volume * (duct.OtherLoss + duct.BendLoss),
+            Fittings = LocalLoss.Core(flow, duct.OtherLoss, 1) + LocalLoss.Core(flow, duct.BendLoss, duct.BendB),
             Gravity = SiDoor.StandardGravity * duct.Rise * ((alpha * vapourDensity) + ((1 - alpha) * liquidDensity)),
             Flow = flow,
         };

@@ -1,3 +1,5 @@
+using TwoPhase.Friction;
+
 namespace TwoPhase.Passes;
 
 // The pass laid out for the solvers: its sections, then the outlet line as one more.
@@ -39,7 +41,7 @@ public sealed partial class Pass
             Roughness = section.RawRoughness,
             FrictionMultiplier = section.FrictionMultiplier,
             BendLoss = section.ReturnBends * section.BendLossCoefficient / section.RawLength,
-            BendRatio = section.RawBendRadius / section.RawFreeBore,
+            BendB = section.BendLossCoefficient > 0 ? LocalLoss.BendBCore(section.BendLossCoefficient, section.RawBendRadius / section.RawFreeBore) : 1,
             OtherLoss = section.LossCoefficient / section.RawLength,
             Rise = section.RawRise / section.RawLength,
             Inclination = section.RawInclination,

@@ -60,10 +60,10 @@ public sealed partial class TubeSection
     /// <summary>Radius of a return bend, to the centre line; zero without bends.</summary>
     public Length BendRadius => Length.FromMeters(_bendRadius);
 
-    /// <summary>Loss coefficient K of one return bend for one phase: Δp = K G² / (2 ρ).</summary>
+    /// <summary>Loss coefficient K of one return bend for one phase: Δp = K G² / (2 ρ). Where both phases flow, <see cref="Friction.LocalLoss.BendB"/> gives what a bend has more than homogeneous flow.</summary>
     public double BendLossCoefficient => _bendLoss;
 
-    /// <summary>Loss coefficient K of everything else in the section (entrance, exit, restrictor), on its own mass flux.</summary>
+    /// <summary>Loss coefficient K of everything else in the section (entrance, exit, restrictor), on its own mass flux; both phases as homogeneous flow.</summary>
     public double LossCoefficient => _lossCoefficient;
 
     /// <summary>Roughness of the bore.</summary>
