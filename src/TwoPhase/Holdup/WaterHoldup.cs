@@ -29,10 +29,10 @@ public sealed class WaterHoldup
         foreach (NodePanel panel in new NodePanels(Standing()))
         {
             double area = profile.Pass.Ducts[panel.Duct].Area;
-            double water = area * panel.Integral(static node => (1 - node.VoidFraction) * node.Flow.LiquidDensity), steam = area * panel.Integral(static node => node.VoidFraction * node.Flow.VapourDensity);
+            double water = area * panel.Integral(static (in PassNode node) => (1 - node.VoidFraction) * node.Flow.LiquidDensity), steam = area * panel.Integral(static (in PassNode node) => node.VoidFraction * node.Flow.VapourDensity);
             liquid[panel.Duct] += water;
             vapour[panel.Duct] += steam;
-            _liquidVolume += area * panel.Integral(static node => 1 - node.VoidFraction);
+            _liquidVolume += area * panel.Integral(static (in PassNode node) => 1 - node.VoidFraction);
             if (panel.Nodes[Panel.Intervals].Position <= onset) _upstream += water + steam;
         }
 

@@ -26,7 +26,8 @@ internal interface IPassFluid
     /// <param name="pressure">p [Pa].</param>
     /// <param name="enthalpy">h [J/kg].</param>
     /// <param name="saturated">Both phases at the same pressure.</param>
-    FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated);
+    /// <param name="near">T of a state close by [K], which spares a search; 0 for none.</param>
+    FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated, double near = 0);
 
     /// <summary>μ of one phase [Pa·s].</summary>
     double Viscosity(double density, double temperature);

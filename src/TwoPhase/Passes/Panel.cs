@@ -22,4 +22,14 @@ internal static class Panel
     /// <summary>Simpson's rule over the same nodes; its distance from Boole's bounds the error of the latter on smooth functions.</summary>
     public static double Simpson(double spacing, double f0, double f1, double f2, double f3, double f4) =>
         spacing / 3 * (f0 + (4 * (f1 + f3)) + (2 * f2) + f4);
+
+    /// <summary>The quartic through five values, <paramref name="at"/> spacings from the first: Newton's forward differences.</summary>
+    public static double Quartic(double at, double f0, double f1, double f2, double f3, double f4)
+    {
+        double second = f2 - (2 * f1) + f0, third = f3 - (3 * f2) + (3 * f1) - f0, fourth = f4 - (4 * f3) + (6 * f2) - (4 * f1) + f0;
+        return f0 + (at * (f1 - f0 + ((at - 1) / 2 * (second + ((at - 2) / 3 * (third + ((at - 3) / 4 * fourth)))))));
+    }
+
+    /// <summary>The parabola through three values, <paramref name="at"/> spacings from the first.</summary>
+    public static double Parabola(double at, double f0, double f1, double f2) => f0 + (at * (f1 - f0 + ((at - 1) / 2 * (f2 - (2 * f1) + f0))));
 }

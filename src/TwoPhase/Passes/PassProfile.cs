@@ -87,11 +87,11 @@ public sealed partial class PassProfile : IReadOnlyList<ProfilePoint>
         double friction = 0, fittings = 0, gravity = 0, heat = 0, mass = 0, residual = 0;
         foreach (NodePanel panel in new NodePanels(_nodes))
         {
-            friction += panel.Integral(static node => node.Friction);
-            fittings += panel.Integral(static node => node.Fittings);
-            gravity += panel.Integral(static node => node.Gravity);
-            heat += panel.Integral(static node => node.LinearHeat);
-            mass += panel.Integral(static node => node.Density) * Pass.Ducts[panel.Duct].Area;
+            friction += panel.Integral(static (in PassNode node) => node.Friction);
+            fittings += panel.Integral(static (in PassNode node) => node.Fittings);
+            gravity += panel.Integral(static (in PassNode node) => node.Gravity);
+            heat += panel.Integral(static (in PassNode node) => node.LinearHeat);
+            mass += panel.Integral(static (in PassNode node) => node.Density) * Pass.Ducts[panel.Duct].Area;
         }
 
         foreach (ref readonly PassNode node in Nodes) residual = Math.Max(residual, MassResidual(node));
@@ -106,7 +106,7 @@ public sealed partial class PassProfile : IReadOnlyList<ProfilePoint>
         double x = node.Flow.Quality, alpha = node.VoidFraction, flux = node.Flow.MassFlux;
         double vapour = alpha > 0 ? alpha * node.Flow.VapourDensity * (flux * x / (alpha * node.Flow.VapourDensity)) : 0;
         double liquid = alpha < 1 ? (1 - alpha) * node.Flow.LiquidDensity * (flux * (1 - x) / ((1 - alpha) * node.Flow.LiquidDensity)) : 0;
-        Duct duct = Pass.Ducts[node.Duct];
+        ref readonly Duct duct = ref Pass.Ducts[node.Duct];
         return Math.Abs(((vapour + liquid) * duct.Area / (Conditions.RawFeedFlow * duct.FlowShare)) - 1);
     }
 }

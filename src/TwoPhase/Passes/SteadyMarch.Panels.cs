@@ -4,16 +4,22 @@ namespace TwoPhase.Passes;
 internal partial struct SteadyMarch<TFluid>
 {
     private const int GreatestSweeps = 16, GreatestAims = 24;
-    private const double SweepTolerance = 1e-10, BoundaryTolerance = 1e-11;
+    private const double BoundaryTolerance = 1e-11, OnBoundary = 1e-9;
+
+    // A panel of one phase that is to end where boiling begins or ends may miss that by so much and stay of one phase: some friction
+    // models have an infinite slope in quality on the other side, on which no iteration comes to rest.
+    private const double OnePhaseEdge = 1e-6;
 
     /// <summary>Fills the four nodes above the last one.</summary>
-    private Attempt Try(in Piece piece, double done, double length)
+    private Attempt Try(in Piece piece, double done, double length, double sweepTolerance)
     {
         Reserve();
         double spacing = length / Panel.Intervals;
         PassNode[] nodes = Nodes;
         int first = Count - 1;
-        double p1 = Guess(spacing), p2 = Guess(2 * spacing), p3 = Guess(3 * spacing), p4 = Guess(4 * spacing);
+        double p1 = Guess(spacing, length), p2 = Guess(2 * spacing, length), p3 = Guess(3 * spacing, length), p4 = Guess(length, length);
+        _known = default;
+        _edge = nodes[first].EquilibriumQuality is < -OnBoundary or > 1 + OnBoundary ? OnePhaseEdge : 0;
         for (int sweep = 0; sweep < GreatestSweeps; sweep++)
         {
             if ((Outside(p1) ?? Outside(p2) ?? Outside(p3) ?? Outside(p4)) is { } outside) return new(length, outside);
@@ -28,12 +34,15 @@ internal partial struct SteadyMarch<TFluid>
             p3 = Next(nodes[first + 3], _momentumSum + Panel.Integral(3, spacing, f0, f1, f2, f3, f4), ref worst);
             p4 = Next(nodes[first + 4], sum, ref worst);
             if (double.IsNaN(worst)) return new(length, Trouble(nodes[first + 1]) ?? Trouble(nodes[first + 4]) ?? Choked);
-            if (worst > SweepTolerance) continue;
+            if (worst > sweepTolerance) continue;
             for (int j = 1; j <= Panel.Intervals; j++)
             {
                 if (Trouble(nodes[first + j]) is { } trouble) return new(length, trouble);
             }
 
+            // The last correction is too small to move anything but the pressure.
+            (nodes[first + 1].Pressure, nodes[first + 2].Pressure, nodes[first + 3].Pressure, nodes[first + 4].Pressure) = (p1, p2, p3, p4);
+            _known = new(first, spacing, 0);
             return Judge(piece, length, sum, f0, f1, f2, f3, f4);
         }
 
@@ -54,25 +63,27 @@ internal partial struct SteadyMarch<TFluid>
         return new(length, null) { MomentumSum = sum, PressureError = pressureError, MassError = massError, Quality = quality };
     }
 
-    // The quadratic through the last three nodes, or the slope where there are none of this kind.
-    private readonly double Guess(double distance)
+    // The polynomial through the nodes of the panel before, or of one that was too long; the slope where there are none. A long reach
+    // would blow up the round-off of a quartic.
+    private readonly double Guess(double distance, double length)
     {
-        ref readonly PassNode node = ref Last;
-        if (_spacing == 0) return node.Pressure + (distance * node.Loss);
-        double before = Nodes[Count - 2].Pressure, earlier = Nodes[Count - 3].Pressure;
-        double slope = (node.Pressure - before) / _spacing, bend = (node.Pressure - (2 * before) + earlier) / (2 * _spacing * _spacing);
-        return node.Pressure + (distance * (slope + ((distance + _spacing) * bend)));
+        if (_known.Spacing == 0) return Last.Pressure + (distance * Last.Loss);
+        ReadOnlySpan<PassNode> nodes = Nodes.AsSpan(_known.First, Panel.Intervals + 1);
+        double at = _known.Offset + (distance / _known.Spacing);
+        return length > 1.5 * Panel.Intervals * _known.Spacing
+            ? Panel.Parabola(at - 2, nodes[2].Pressure, nodes[3].Pressure, nodes[4].Pressure)
+            : Panel.Quartic(at, nodes[0].Pressure, nodes[1].Pressure, nodes[2].Pressure, nodes[3].Pressure, nodes[4].Pressure);
     }
 
     private readonly void Place(in Piece piece, int index, double done, double pressure) =>
-        Nodes[index] = At(piece.Duct, piece.End - done, pressure, piece.EnthalpyAt(done), piece.LinearHeatAt(done));
+        Place(index, piece.Duct, piece.End - done, pressure, piece.EnthalpyAt(done), piece.LinearHeatAt(done));
 
     // Newton for p + G² vM(p) = sum, with vM ~ 1/p.
     private readonly double Next(in PassNode node, double sum, ref double worst)
     {
         double momentum = Momentum(node), pressure = node.Pressure;
         double change = (sum - momentum - pressure) / (1 - (momentum / pressure));
-        double relative = momentum < 0.9 * pressure ? Math.Abs(change) / pressure : double.NaN;
+        double relative = IsChoked(momentum, pressure) ? double.NaN : Math.Abs(change) / pressure;
         worst = double.IsNaN(worst) || relative <= worst ? worst : relative;
         return pressure + change;
     }
@@ -82,14 +93,16 @@ internal partial struct SteadyMarch<TFluid>
     {
         int first = Count - 1;
         double start = Nodes[first].EquilibriumQuality;
-        double reference = Math.Abs(start) < 1e-9 || Math.Abs(start - 1) < 1e-9 ? Nodes[first + 1].EquilibriumQuality : start;
+        double reference = Math.Abs(start) < OnBoundary || Math.Abs(start - 1) < OnBoundary ? Nodes[first + 1].EquilibriumQuality : start;
         for (int j = 1; j <= Panel.Intervals; j++)
         {
             double quality = Nodes[first + j].EquilibriumQuality;
             double? boundary = reference <= 0 ? (quality > 0 ? 0 : null) : reference >= 1 ? (quality < 1 ? 1 : null) : quality < 0 ? 0 : quality > 1 ? 1 : null;
             if (boundary is not { } phaseEnd || Math.Abs(quality - phaseEnd) <= BoundaryTolerance) continue;
             double before = Nodes[first + j - 1].EquilibriumQuality - phaseEnd, after = quality - phaseEnd, spacing = attempt.Length / Panel.Intervals;
-            double distance = spacing * (j - 1 + (before / (before - after)));
+            double share = before / (before - after);
+            if (j > 1) share += share * (1 - share) * (Nodes[first + j - 2].EquilibriumQuality - phaseEnd - (2 * before) + after) / (2 * (after - before));
+            double distance = spacing * (j - 1 + share);
             return distance > 1e-12 * piece.Length ? new(distance, phaseEnd) : null;
         }
 
@@ -97,12 +110,12 @@ internal partial struct SteadyMarch<TFluid>
     }
 
     /// <summary>The panel that ends exactly where the phase does, by the secant method.</summary>
-    private Attempt Aim(in Piece piece, double done, Crossing crossing, in Attempt tried)
+    private Attempt Aim(in Piece piece, double done, Crossing crossing, double tried)
     {
         double length = Math.Min(crossing.Distance, piece.Length - done);
         for (int i = 0; i < GreatestAims; i++)
         {
-            Attempt attempt = Try(piece, done, length);
+            Attempt attempt = Try(piece, done, length, LeastSweepTolerance);
             if (attempt.Trouble is not null) return attempt;
             double end = Nodes[Count - 1 + Panel.Intervals].EquilibriumQuality - crossing.Boundary;
             double before = Nodes[Count - 2 + Panel.Intervals].EquilibriumQuality - crossing.Boundary;
@@ -111,10 +124,13 @@ internal partial struct SteadyMarch<TFluid>
             length = Math.Min(Math.Max(length + change, length / 4), piece.Length - done);
         }
 
-        return tried;
+        return Try(piece, done, tried, _sweepTolerance);
     }
 
     private readonly record struct Crossing(double Distance, double Boundary);
+
+    /// <summary>Five nodes whose pressures are known, and where among them the last accepted one stands; none while the spacing is zero.</summary>
+    private readonly record struct KnownNodes(int First, double Spacing, int Offset);
 
     /// <summary>A panel tried: what is wrong with it, or how good it is.</summary>
     private readonly record struct Attempt(double Length, string? Trouble)

@@ -9,7 +9,11 @@ internal partial struct SteadyMarch<TFluid>
     private const string Choked = "the flow chokes: no pressure upstream carries this mass flux through the section";
     private const string Critical = "pressure upstream rises to the critical pressure";
     private const string Vacuum = "pressure upstream falls to nothing";
+    private const string Endless = "the grid would need more than 100 000 rows";
     private const string Beyond = "the enthalpy lies outside the steam formulation";
+
+    // With vM ~ 1/p the flow chokes where G² vM reaches p.
+    private static bool IsChoked(double momentum, double pressure) => momentum >= 0.9 * pressure;
 
     private readonly string? Outside(double pressure) =>
         !(pressure < _fluid.HighestPressure) ? Critical : pressure > 0 ? null : Vacuum;

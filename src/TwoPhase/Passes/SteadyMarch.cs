@@ -13,19 +13,27 @@ namespace TwoPhase.Passes;
 internal partial struct SteadyMarch<TFluid>
     where TFluid : struct, IPassFluid
 {
-    // At least so many panels, so that the rows also make a smooth picture.
-    private const int LeastPanels = 12;
+    // At least so many panels, so that the rows also make a smooth picture; fewer where none is drawn.
+    private const int LeastPanels = 12, LeastUndrawnPanels = 4;
+
+    private const int GreatestRows = 100_000;
+
+    // Pressures stand when a sweep moves them by less, relative.
+    private const double LeastSweepTolerance = 1e-10;
 
     private readonly TFluid _fluid;
     private readonly Duct[] _ducts;
     private readonly PassModels _models;
     private readonly SteadyOptions _options;
-    private double _tolerance, _massScale, _massFlux, _momentumSum, _spacing;
+    private double _tolerance, _sweepTolerance, _massScale, _massFlux, _momentumSum;
+    private KnownNodes _known;
+    private bool _isDrawn;
+    private double _edge, _step;
 
     public SteadyMarch(in TFluid fluid, Duct[] ducts, PassModels models, SteadyOptions options, PassNode[] buffer)
     {
         _fluid = fluid;
-        _ducts = ducts;
+        _ducts = Counted(ducts, options);
         _models = models;
         _options = options;
         Nodes = buffer;
@@ -58,9 +66,14 @@ internal partial struct SteadyMarch<TFluid>
 
     private readonly double TotalLength => _ducts[^1].End;
 
-    public void Run(double outletEnthalpy, double tolerance)
+    /// <summary>Marches from the outlet to the inlet.</summary>
+    /// <param name="outletEnthalpy">h at the end of the last section [J/kg].</param>
+    /// <param name="tolerance">Bound of the grid error.</param>
+    /// <param name="isDrawn">Whether its rows are wanted, and not only its inlet.</param>
+    public void Run(double outletEnthalpy, double tolerance, bool isDrawn)
     {
-        (Count, PressureError, MassError, _tolerance) = (0, 0, 0, tolerance);
+        (_isDrawn, _step) = (isDrawn, double.PositiveInfinity);
+        (Count, PressureError, MassError, _tolerance, _sweepTolerance) = (0, 0, 0, tolerance, Math.Max(LeastSweepTolerance, tolerance / 5));
         _massScale = _ducts[^1].VolumeAfter / (4 * _fluid.Saturated(OutletPressure).LiquidVolume);
         double pressure = OutletPressure, mixed = outletEnthalpy, massFluxBehind = double.NaN;
         for (int i = _ducts.Length - 1; i >= 0; i--)
@@ -85,39 +98,40 @@ internal partial struct SteadyMarch<TFluid>
         double[] corner = duct.Flux.Position;
         double end = duct.LinearHeat(Heat, Exchanged, corner.Length - 1);
         Reserve();
-        Nodes[Count] = At(index, duct.End, pressure, enthalpy, end);
-        if (Trouble(Nodes[Count]) is { } trouble) throw NoSolution(index, duct.End, trouble);
-        (_momentumSum, _spacing) = (pressure + Momentum(Nodes[Count]), 0);
+        _edge = 0;
+        Place(Count, index, duct.End, pressure, enthalpy, end);
+        if ((Trouble(Nodes[Count]) ?? (IsChoked(Momentum(Nodes[Count]), pressure) ? Choked : null)) is { } trouble) throw NoSolution(index, duct.End, trouble);
+        (_momentumSum, _known) = (pressure + Momentum(Nodes[Count]), default);
         Count++;
-        double step = double.PositiveInfinity;
         for (int k = corner.Length - 2; k >= 0; k--)
         {
             double begin = duct.LinearHeat(Heat, Exchanged, k), length = duct.Length * (corner[k + 1] - corner[k]);
             var piece = new Piece(index, duct.Start + (duct.Length * corner[k + 1]), length, enthalpy, end, begin, Flow * duct.FlowShare);
-            Climb(piece, ref step);
+            Climb(piece);
             (enthalpy, end) = (piece.EnthalpyAt(length), begin);
         }
     }
 
-    private void Climb(in Piece piece, ref double step)
+    private void Climb(in Piece piece)
     {
-        double done = 0, longest = TotalLength / LeastPanels, shortest = longest * 1e-8;
+        double done = 0, longest = TotalLength / (_isDrawn ? LeastPanels : LeastUndrawnPanels), shortest = longest * 1e-8;
         while (done < piece.Length)
         {
             double left = piece.Length - done;
-            double length = left / Math.Ceiling((left / Math.Min(step, longest)) - 1e-9);
-            Attempt attempt = Try(piece, done, length);
-            if (attempt.Trouble is null && CrossingIn(attempt, piece) is { } crossing) attempt = Aim(piece, done, crossing, attempt);
+            double length = left / Math.Ceiling((left / Math.Min(_step, longest)) - 1e-9);
+            Attempt attempt = Try(piece, done, length, _sweepTolerance);
+            if (attempt.Trouble is null && CrossingIn(attempt, piece) is { } crossing) attempt = Aim(piece, done, crossing, length);
+            if (Count > GreatestRows) throw NoSolution(piece.Duct, piece.End - done, Endless);
             if (attempt.Trouble is not null && attempt.Length <= shortest) throw NoSolution(piece.Duct, piece.End - done, attempt.Trouble);
 
             double scale = attempt.Trouble is null ? Math.Min(4, Math.Max(0.2, 0.9 * Math.Pow(attempt.Quality, 0.2))) : 0.5;
             if (attempt.Trouble is not null || (attempt.Quality < 1 && attempt.Length > shortest))
             {
-                step = attempt.Length * Math.Min(scale, 0.9);
+                _step = attempt.Length * Math.Min(scale, 0.9);
                 continue;
             }
 
-            step = attempt.AtBoundary ? Math.Max(step, attempt.Length) : attempt.Length * scale;
+            _step = attempt.AtBoundary ? Math.Max(_step, attempt.Length) : attempt.Length * scale;
             done = attempt.Length >= left * (1 - 1e-12) ? piece.Length : done + attempt.Length;
             Accept(attempt);
         }
@@ -125,11 +139,10 @@ internal partial struct SteadyMarch<TFluid>
 
     private void Accept(in Attempt attempt)
     {
-        ref readonly PassNode end = ref Nodes[Count - 1 + Panel.Intervals];
         PressureError += attempt.PressureError;
         MassError += attempt.MassError;
         _momentumSum = attempt.MomentumSum;
-        _spacing = attempt.AtBoundary ? 0 : attempt.Length / Panel.Intervals;
+        _known = attempt.AtBoundary ? default : _known with { Offset = Panel.Intervals };
         Count += Panel.Intervals;
     }
 
@@ -143,22 +156,29 @@ internal partial struct SteadyMarch<TFluid>
         }
     }
 
+    // What does not count is taken off the ducts.
+    private static Duct[] Counted(Duct[] ducts, SteadyOptions options) => options.Friction && options.Gravity ? ducts : Array.ConvertAll(ducts, duct => duct with
+    {
+        FrictionMultiplier = options.Friction ? duct.FrictionMultiplier : 0,
+        BendLoss = options.Friction ? duct.BendLoss : 0,
+        OtherLoss = options.Friction ? duct.OtherLoss : 0,
+        Rise = options.Gravity ? duct.Rise : 0,
+    });
+
     private readonly double Momentum(in PassNode node) =>
         _options.Acceleration ? node.Flow.MassFlux * node.Flow.MassFlux * node.MomentumVolume : 0;
 
-    private readonly PassNode At(int index, double position, double pressure, double enthalpy, double linearHeat)
+    private readonly void Place(int index, int duct, double position, double pressure, double enthalpy, double linearHeat)
     {
-        ref readonly Duct duct = ref _ducts[index];
-        PassNode node = LocalFlow.At(_fluid, _models.Slip, _models.Friction, duct, _massFlux, pressure, enthalpy);
-        return node with
-        {
-            Duct = index,
-            Position = position,
-            Volume = duct.VolumeBefore + (duct.Area * (position - duct.Start)),
-            LinearHeat = linearHeat,
-            Friction = _options.Friction ? node.Friction : 0,
-            Fittings = _options.Friction ? node.Fittings : 0,
-            Gravity = _options.Gravity ? node.Gravity : 0,
-        };
+        ref readonly Duct at = ref _ducts[duct];
+        ref PassNode node = ref Nodes[index];
+
+        // The sweep before was at the same enthalpy.
+        double near = node.Enthalpy == enthalpy ? node.Temperature : 0;
+        node = LocalFlow.At(_fluid, _models.Slip, _models.Friction, at, _massFlux, pressure, enthalpy, near, _edge);
+        node.Duct = duct;
+        node.Position = position;
+        node.Volume = at.VolumeBefore + (at.Area * (position - at.Start));
+        node.LinearHeat = linearHeat;
     }
 }

@@ -11,7 +11,10 @@ internal ref struct SteadySolver<TFluid>
     where TFluid : struct, IPassFluid
 {
     private const int GreatestRounds = 60;
-    private const double CoarseTolerance = 1e-4, InletTolerance = 1e-9;
+    private const double InletTolerance = 1e-9;
+
+    // The inlet is found on coarse grids; so near that one march on the fine grid meets it.
+    private const double RoughTolerance = 1e-2, RoughMiss = 1e-3, CoarseTolerance = 1e-6, CoarseMiss = 1e-5;
 
     private readonly TFluid _fluid;
     private readonly Pass _pass;
@@ -38,24 +41,33 @@ internal ref struct SteadySolver<TFluid>
         bool direct = _given.IsFeedByEnthalpy && _pass.Interchanger is null;
         var feed = new Secant(FeedEnthalpy(_given.RawOutletPressure));
         var exchange = new Secant(0);
-        bool fine = direct;
+        Grid grid = direct ? Grid.Fine : Grid.Rough;
         for (int round = 0; round < GreatestRounds; round++)
         {
             double leaving = Aim(target, feed.Value, wanted);
             _march.Exchanged = exchange.Value;
-            _march.Run(leaving, fine ? _options.Tolerance : Math.Max(CoarseTolerance, _options.Tolerance));
+            _march.Run(leaving, Math.Max(_options.Tolerance, Tolerance(grid)), grid == Grid.Fine);
             double feedMiss = direct ? 0 : FeedEnthalpy(_march.Last.Pressure) - feed.Value;
             double exchangeMiss = _pass.Interchanger is { } exchanger ? InterchangerHeat(exchanger) - exchange.Value : 0;
             double scale = Math.Max(Math.Abs(leaving - feed.Value), outlet.LatentHeat / 10);
             double miss = Math.Max(Math.Abs(feedMiss), Math.Abs(exchangeMiss) / _march.Flow) / scale;
-            if (fine && miss <= InletTolerance) return Profile();
-            fine = miss < 1e-5;
+            if (grid == Grid.Fine && miss <= InletTolerance) return Profile();
+            bool near = grid == Grid.Rough ? miss < RoughMiss : grid == Grid.Coarse && miss < CoarseMiss;
+            if (near)
+            {
+                // Another grid has another error, which would spoil the secant.
+                (grid, feed, exchange) = (grid + 1, new(feed.Value + feedMiss), new(exchange.Value + exchangeMiss));
+                continue;
+            }
+
             feed.Improve(feedMiss);
             exchange.Improve(exchangeMiss);
         }
 
         throw new ConvergenceException($"The inlet state of pass '{_pass.Name}' did not settle within {GreatestRounds} rounds; last inlet {Scale.Megapascals.Text(_march.Last.Pressure)}, {Scale.KilojoulesPerKilogram.Text(feed.Value)}.");
     }
+
+    private static double Tolerance(Grid grid) => grid switch { Grid.Rough => RoughTolerance, Grid.Coarse => CoarseTolerance, _ => 0 };
 
     /// <summary>Sets flow and heat of the march and returns the outlet enthalpy.</summary>
     private double Aim(SteadyTarget target, double feed, double wanted)
@@ -124,6 +136,13 @@ internal ref struct SteadySolver<TFluid>
         Require.Below(_given.RawOutletPressure, _fluid.HighestPressure, $"Outlet pressure of section '{outlet}'", Scale.Megapascals, "conditions");
         if (_given.RawAbsorbedHeat > 0 && _pass.Heat is null) throw new ArgumentException($"Absorbed heat {Scale.Megawatts.Text(_given.RawAbsorbedHeat)} is given, but no section of pass '{_pass.Name}' is heated.", "conditions");
         if (double.IsNaN(FeedEnthalpy(_given.RawOutletPressure))) throw Require.OutOfRange(_given.RawFeedTemperature, $"Feed temperature of section '{first}'", Scale.Celsius, "conditions", "lies outside liquid water of the steam formulation");
+    }
+
+    private enum Grid
+    {
+        Rough = 0,
+        Coarse = 1,
+        Fine = 2,
     }
 
     /// <summary>A value to be found by what it misses: first by its own correction, then by secants.</summary>

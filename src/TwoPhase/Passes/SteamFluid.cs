@@ -8,6 +8,13 @@ namespace TwoPhase.Passes;
 /// <summary>Water and steam by IAPWS-IF97.</summary>
 internal readonly struct SteamFluid : IPassFluid
 {
+    // h at 560 to 610 °C, by the pressure: well inside region 2.
+    private const double HottestVapour = 3.6e6;
+
+    // So far [K] the slopes alone are good to 1e-10 of T; Newton gets there in one step or two.
+    private const double SlopeReach = 2e-3;
+    private const int GreatestSteps = 8;
+
     public double HighestPressure => Water97.CriticalPressure;
 
     public SaturatedPair Saturated(double pressure)
@@ -43,21 +50,41 @@ internal readonly struct SteamFluid : IPassFluid
         };
     }
 
-    public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated) =>
-        enthalpy < saturated.LiquidEnthalpy && saturated.Temperature <= Water97.Border13Temperature
-            ? Liquid(pressure, enthalpy)
-            : Point(Water.AtPressureEnthalpy(pressure, enthalpy));
-
-    // The phase is known: region 1, whose backward equation is good to 25 mK, one Newton step, and the rest by the slopes.
-    private static FluidPoint Liquid(double pressure, double enthalpy)
+    public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated, double near = 0)
     {
-        double guess = Backward1.TemperatureFromEnthalpy(pressure, enthalpy);
-        PhaseCore phase = Region1.At(pressure, guess);
-        phase = Region1.At(pressure, guess + ((enthalpy - phase.Enthalpy) / phase.IsobaricHeatCapacity));
-        double rest = enthalpy - phase.Enthalpy, temperature = phase.Temperature + (rest * phase.TemperatureByEnthalpy);
-        return temperature < Water97.LowestTemperature - 1e-6 ? default : new()
+        if (saturated.Temperature <= Water97.Border13Temperature)
         {
-            Temperature = temperature,
+            if (enthalpy < saturated.LiquidEnthalpy) return Liquid(pressure, enthalpy, near);
+            if (enthalpy > saturated.VapourEnthalpy && enthalpy < HottestVapour) return Vapour(pressure, enthalpy, near);
+        }
+
+        return Point(Water.AtPressureEnthalpy(pressure, enthalpy));
+    }
+
+    // The phase is known: its region, from a state close by or from the backward equation, which is good to 25 mK.
+    private static FluidPoint Liquid(double pressure, double enthalpy, double near)
+    {
+        PhaseCore phase = Region1.At(pressure, near > 0 ? near : Backward1.TemperatureFromEnthalpy(pressure, enthalpy));
+        for (int i = 0; i < GreatestSteps && Math.Abs(Step(phase, enthalpy)) > SlopeReach; i++) phase = Region1.At(pressure, phase.Temperature + Step(phase, enthalpy));
+        FluidPoint point = Near(phase, enthalpy);
+        return point.Temperature < Water97.LowestTemperature - 1e-6 ? default : point;
+    }
+
+    private static FluidPoint Vapour(double pressure, double enthalpy, double near)
+    {
+        PhaseCore phase = Region2.At(pressure, near > 0 ? near : Backward2.TemperatureFromEnthalpy(pressure, enthalpy));
+        for (int i = 0; i < GreatestSteps && Math.Abs(Step(phase, enthalpy)) > SlopeReach; i++) phase = Region2.At(pressure, phase.Temperature + Step(phase, enthalpy));
+        return Near(phase, enthalpy);
+    }
+
+    private static double Step(in PhaseCore phase, double enthalpy) => (enthalpy - phase.Enthalpy) / phase.IsobaricHeatCapacity;
+
+    private static FluidPoint Near(in PhaseCore phase, double enthalpy)
+    {
+        double rest = enthalpy - phase.Enthalpy;
+        return new()
+        {
+            Temperature = phase.Temperature + (rest * phase.TemperatureByEnthalpy),
             SpecificVolume = phase.SpecificVolume + (rest * phase.VolumeByEnthalpy),
             VolumeByEnthalpy = phase.VolumeByEnthalpy,
             VolumeByPressure = phase.VolumeByPressure,

@@ -75,7 +75,7 @@ public class SteadyStateClosedFormTests
     private static double Held(PassProfile profile)
     {
         double sum = 0;
-        foreach (NodePanel panel in new NodePanels(profile.Nodes)) sum += panel.Integral(node => node.Density) * Area;
+        foreach (NodePanel panel in new NodePanels(profile.Nodes)) sum += panel.Integral((in PassNode node) => node.Density) * Area;
         return sum;
     }
 }

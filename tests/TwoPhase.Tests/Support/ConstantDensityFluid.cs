@@ -35,7 +35,7 @@ internal readonly struct ConstantDensityFluid : IPassFluid
 
     public SaturatedPair SaturatedSlopes(double pressure) => new() { Pressure = 1 };
 
-    public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated)
+    public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated, double near = 0)
     {
         const double slope = ((1 / VapourDensity) - (1 / LiquidDensity)) / Latent;
         double above = enthalpy - SaturatedEnthalpy;
