@@ -18,10 +18,10 @@ internal readonly struct SurfaceFluid : IPassFluid
 
     public SaturatedPair SaturatedSlopes(double pressure) => default(SteamFluid).SaturatedSlopes(pressure);
 
-    public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated)
+    public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated, double near = 0)
     {
         SurfacePoint point = _surface.Evaluate(pressure, enthalpy);
-        if (double.IsNaN(point.SpecificVolume)) return default(SteamFluid).At(pressure, enthalpy, saturated);
+        if (double.IsNaN(point.SpecificVolume)) return default(SteamFluid).At(pressure, enthalpy, saturated, near);
         double squared = point.SpecificVolume * point.SpecificVolume;
         return new()
         {

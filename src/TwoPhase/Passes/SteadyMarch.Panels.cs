@@ -23,10 +23,10 @@ internal partial struct SteadyMarch<TFluid>
         for (int sweep = 0; sweep < GreatestSweeps; sweep++)
         {
             if ((Outside(p1) ?? Outside(p2) ?? Outside(p3) ?? Outside(p4)) is { } outside) return new(length, outside);
-            Place(piece, first + 1, done + spacing, p1);
-            Place(piece, first + 2, done + (2 * spacing), p2);
-            Place(piece, first + 3, done + (3 * spacing), p3);
-            Place(piece, first + 4, done + (4 * spacing), p4);
+            Place(piece, first + 1, done + spacing, p1, sweep);
+            Place(piece, first + 2, done + (2 * spacing), p2, sweep);
+            Place(piece, first + 3, done + (3 * spacing), p3, sweep);
+            Place(piece, first + 4, done + (4 * spacing), p4, sweep);
             double f0 = nodes[first].Loss, f1 = nodes[first + 1].Loss, f2 = nodes[first + 2].Loss, f3 = nodes[first + 3].Loss, f4 = nodes[first + 4].Loss;
             double worst = 0, sum = _momentumSum + Panel.Boole(spacing, f0, f1, f2, f3, f4);
             p1 = Next(nodes[first + 1], _momentumSum + Panel.Integral(1, spacing, f0, f1, f2, f3, f4), ref worst);
@@ -75,8 +75,9 @@ internal partial struct SteadyMarch<TFluid>
             : Panel.Quartic(at, nodes[0].Pressure, nodes[1].Pressure, nodes[2].Pressure, nodes[3].Pressure, nodes[4].Pressure);
     }
 
-    private readonly void Place(in Piece piece, int index, double done, double pressure) =>
-        Place(index, piece.Duct, piece.End - done, pressure, piece.EnthalpyAt(done), piece.LinearHeatAt(done));
+    // The sweep before was at the same enthalpy.
+    private readonly void Place(in Piece piece, int index, double done, double pressure, int sweep) =>
+        Place(index, piece.Duct, piece.End - done, pressure, piece.EnthalpyAt(done), piece.LinearHeatAt(done), sweep > 0 ? Nodes[index].Temperature : 0);
 
     // Newton for p + G² vM(p) = sum, with vM ~ 1/p.
     private readonly double Next(in PassNode node, double sum, ref double worst)

@@ -21,6 +21,9 @@ internal partial struct SteadyMarch<TFluid>
     // Pressures stand when a sweep moves them by less, relative.
     private const double LeastSweepTolerance = 1e-10;
 
+    // Regions of the steam formulation differ where they meet, so that there p + G² vM steps over what it should be.
+    private const double StepTolerance = 1e-6;
+
     private readonly TFluid _fluid;
     private readonly Duct[] _ducts;
     private readonly PassModels _models;
@@ -99,7 +102,7 @@ internal partial struct SteadyMarch<TFluid>
         double end = duct.LinearHeat(Heat, Exchanged, corner.Length - 1);
         Reserve();
         _edge = 0;
-        Place(Count, index, duct.End, pressure, enthalpy, end);
+        Place(Count, index, duct.End, pressure, enthalpy, end, 0);
         if ((Trouble(Nodes[Count]) ?? (IsChoked(Momentum(Nodes[Count]), pressure) ? Choked : null)) is { } trouble) throw NoSolution(index, duct.End, trouble);
         (_momentumSum, _known) = (pressure + Momentum(Nodes[Count]), default);
         Count++;
@@ -119,7 +122,7 @@ internal partial struct SteadyMarch<TFluid>
         {
             double left = piece.Length - done;
             double length = left / Math.Ceiling((left / Math.Min(_step, longest)) - 1e-9);
-            Attempt attempt = Try(piece, done, length, _sweepTolerance);
+            Attempt attempt = Try(piece, done, length, length > shortest ? _sweepTolerance : StepTolerance);
             if (attempt.Trouble is null && CrossingIn(attempt, piece) is { } crossing) attempt = Aim(piece, done, crossing, length);
             if (Count > GreatestRows) throw NoSolution(piece.Duct, piece.End - done, Endless);
             if (attempt.Trouble is not null && attempt.Length <= shortest) throw NoSolution(piece.Duct, piece.End - done, attempt.Trouble);
@@ -168,13 +171,10 @@ internal partial struct SteadyMarch<TFluid>
     private readonly double Momentum(in PassNode node) =>
         _options.Acceleration ? node.Flow.MassFlux * node.Flow.MassFlux * node.MomentumVolume : 0;
 
-    private readonly void Place(int index, int duct, double position, double pressure, double enthalpy, double linearHeat)
+    private readonly void Place(int index, int duct, double position, double pressure, double enthalpy, double linearHeat, double near)
     {
         ref readonly Duct at = ref _ducts[duct];
         ref PassNode node = ref Nodes[index];
-
-        // The sweep before was at the same enthalpy.
-        double near = node.Enthalpy == enthalpy ? node.Temperature : 0;
         node = LocalFlow.At(_fluid, _models.Slip, _models.Friction, at, _massFlux, pressure, enthalpy, near, _edge);
         node.Duct = duct;
         node.Position = position;

@@ -14,14 +14,14 @@ internal readonly struct LossSplit
         double before = 0, heated = 0, behind = 0, momentum = 0, length = 0;
         foreach (NodePanel panel in new NodePanels(nodes))
         {
-            double middle = panel.Nodes[2].Position, loss = panel.Integral(static node => node.Friction + node.Fittings);
-            Transit += panel.Integral(static node => 1 / (node.HomogeneousVolume * node.Flow.MassFlux));
+            double middle = panel.Nodes[2].Position, loss = panel.Integral(static (in PassNode node) => node.Friction + node.Fittings);
+            Transit += panel.Integral(static (in PassNode node) => 1 / (node.HomogeneousVolume * node.Flow.MassFlux));
             if (middle < nodes[first].Position) before += loss;
             else if (middle > nodes[last].Position) behind += loss;
             else
             {
                 heated += loss;
-                momentum += panel.Integral(static node => node.HomogeneousVolume);
+                momentum += panel.Integral(static (in PassNode node) => node.HomogeneousVolume);
                 length += panel.Nodes[Panel.Intervals].Position - panel.Nodes[0].Position;
             }
         }

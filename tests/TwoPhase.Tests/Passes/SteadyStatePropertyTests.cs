@@ -47,6 +47,29 @@ public class SteadyStatePropertyTests
         return true;
     }
 
+    // At 800 °C two regions of IAPWS-IF97 meet, and the volume steps by 1e-4: at this flow a node falls just there.
+    [Fact]
+    public void Solve_WhereRegionsOfTheFormulationMeet_StepsOver()
+    {
+        PassConditions conditions = ExamplePass.Conditions.WithFeedFlow(MassFlow.FromKilogramsPerSecond(0.5 * Math.Pow(12, 0.625) * 0.999));
+        PassProfile profile = SteadyState.Solve(ExamplePass.Pass, conditions, null, SteadyOptions.Default.WithTolerance(1e-9));
+        Assert.InRange(profile.Outlet.Temperature.DegreesCelsius, 800, 860);
+        Assert.True(profile.Audit.GridError < 1e-8, profile.Audit.ToString());
+    }
+
+    // A thread keeps its nodes for the next pass: nothing of the last one may show.
+    [Fact]
+    public void Solve_AfterAnotherPass_IsTheSameToTheLastDigit()
+    {
+        PassConditions other = ExamplePass.Conditions.WithFeedTemperature(Temperature.FromDegreesCelsius(172)).WithOutletPressure(Pressure.FromMegapascals(9));
+        double first = SteadyState.Solve(ExamplePass.Pass, ExamplePass.Conditions).Inlet.Pressure.Pascals;
+        foreach (double megawatts in new[] { 0, 5.5, 8.2, 12 })
+        {
+            SteadyState.Solve(ExamplePass.Pass, other.WithAbsorbedHeat(Power.FromMegawatts(megawatts)));
+            Assert.Equal(first, SteadyState.Solve(ExamplePass.Pass, ExamplePass.Conditions).Inlet.Pressure.Pascals);
+        }
+    }
+
     // Water: Δp = K G²/(2 ρ). Wet steam: enthalpy stays, so the quality at the tube end follows from the pressure there.
     [Theory]
     [InlineData(0)]

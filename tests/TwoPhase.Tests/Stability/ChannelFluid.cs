@@ -56,7 +56,7 @@ internal readonly struct ChannelFluid : IPassFluid
 
     public SaturatedPair SaturatedSlopes(double pressure) => Fluid.SaturatedSlopes(pressure);
 
-    public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated) => Fluid.At(pressure, enthalpy, saturated);
+    public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated, double near = 0) => Fluid.At(pressure, enthalpy, saturated, near);
 
     public double Viscosity(double density, double temperature) => 1e-16;
 
