@@ -15,6 +15,8 @@ internal readonly struct Scale
     public static readonly Scale KilogramsPerSecond = new("kg/s", 1);
     public static readonly Scale KilogramsPerCubicMetre = new("kg/m³", 1);
     public static readonly Scale KilogramsPerSquareMetreSecond = new("kg/(m²·s)", 1);
+    public static readonly Scale MegajoulesPerCubicMetre = new("MJ/m³", 1e-6);
+    public static readonly Scale CubicMetresPerSecond = new("m³/s", 1);
     public static readonly Scale CubicMetres = new("m³", 1);
     public static readonly Scale Metres = new("m", 1);
     public static readonly Scale Millimetres = new("mm", 1e3);

@@ -116,6 +116,8 @@ internal static class SiDoor
         _ => new SpecificEnergy(value, unit).As(SpecificEnergyUnit.JoulePerKilogram),
     };
 
+    public static double Si(this EnergyDensity quantity) => quantity.As(EnergyDensityUnit.JoulePerCubicMeter);
+
     public static double Si(this SpecificEntropy quantity) => quantity.Unit switch
     {
         SpecificEntropyUnit.JoulePerKilogramKelvin => quantity.Value,
