@@ -10,10 +10,10 @@ public sealed partial class QualityEstimator
     // learnt anew; and what is never known better.
     private const double MotionShare = 0.08, StirTime = 90, LingerShare = 0.02, LingerTime = 900, Floor = 3e-4;
 
-    // A state of trust is left at this part of what it is entered at, so that it does not flicker.
-    private const double Leave = 0.6;
+    // A state of trust is left at this part of what it is entered at, and motion must last, and be over, for so long [s], so that it does not flicker.
+    private const double Leave = 0.6, Persist = 30;
 
-    private double _stir, _linger;
+    private double _stir, _linger, _lastMoving = double.NegativeInfinity;
 
     private QualityEstimate Judge(DateTimeOffset time, double now, double elapsed, OperatingState state)
     {
@@ -80,8 +80,9 @@ public sealed partial class QualityEstimator
         bool moves = Math.Abs(motion) > tolerance / 2 * (wasMoving ? Leave : 1);
         if (!moves) _moved = double.NaN;
         else if (double.IsNaN(_moved)) _moved = now;
+        if (now - _moved > Persist) _lastMoving = now;
         if (Math.Abs(_error) > tolerance * (wasFalse ? Leave : 1)) return _error > 0 ? Trust.ReadsHigh : Trust.ReadsLow;
-        return moves || _running < _shadow.Residence ? Trust.Settling : Trust.Believable;
+        return now - _lastMoving < Persist || _running < _shadow.Residence ? Trust.Settling : Trust.Believable;
     }
 
     // By the water's way through the pass since it began to move, or since the shadow began.

@@ -210,7 +210,7 @@ public sealed partial class QualityEstimator
         if (!first && learnt > 0) _heat.KeepBase(known, learnt);
         (_heatInShadow, _running, _coasting, _error, _motion, _stir, _linger) = (factor, 0, 0, 0, 0, 0, 0);
         _laggedDifferential = Math.Log(_shadow.Differential);
-        (_moved, _disagreesSince) = (double.NaN, double.NaN);
+        (_moved, _lastMoving, _disagreesSince) = (double.NaN, double.NegativeInfinity, double.NaN);
     }
 
     private void ShiftClock(double by)
@@ -222,5 +222,6 @@ public sealed partial class QualityEstimator
         _differential.Shift(by);
         _disagreesSince += by;
         _moved += by;
+        _lastMoving += by;
     }
 }
