@@ -1,3 +1,4 @@
+using TwoPhase.Units;
 using UnitsNet;
 
 namespace TwoPhase.Limits;
@@ -5,9 +6,9 @@ namespace TwoPhase.Limits;
 /// <summary>What one step of one input does to the margin of a limit.</summary>
 public readonly record struct LimitEffect
 {
-    private readonly LimitQuantity? _quantity;
+    private readonly QuantityScale? _quantity;
 
-    internal LimitEffect(LimitInput input, double change, LimitQuantity quantity) => (Input, RawChange, _quantity) = (input, change, quantity);
+    internal LimitEffect(LimitInput input, double change, QuantityScale quantity) => (Input, RawChange, _quantity) = (input, change, quantity);
 
     /// <summary>The input, and with it the step.</summary>
     public LimitInput Input { get; }

@@ -1,9 +1,10 @@
 using TwoPhase.Passes;
+using TwoPhase.Units;
 
 namespace TwoPhase.Limits;
 
 /// <summary>One limit as it is found, SI doubles.</summary>
-internal readonly record struct LimitFigure(LimitKind Kind, string Name, LimitQuantity Quantity)
+internal readonly record struct LimitFigure(LimitKind Kind, string Name, QuantityScale Quantity)
 {
     public LimitStatus Status { get; init; }
 

@@ -25,7 +25,7 @@ internal static class LimitRules
     {
         PassNode outlet = profile.Nodes[^1];
         string reason = site.IsOutletQualityConfirmed ? "" : "the usual figure for plain bores, not confirmed by the site";
-        return new LimitFigure(LimitKind.OutletQuality, "outlet quality", LimitQuantity.Quality).Below(site.RawQuality, outlet.EquilibriumQuality, outlet, reason);
+        return new LimitFigure(LimitKind.OutletQuality, "outlet quality", QuantityScale.Quality).Below(site.RawQuality, outlet.EquilibriumQuality, outlet, reason);
     }
 
     private static IEnumerable<LimitFigure> Solids(PassProfile profile, SiteLimits site)
@@ -35,13 +35,13 @@ internal static class LimitRules
         if (site.Solids.Count == 0)
         {
             string factor = x < 1 ? $"; the outlet water is concentrated {Scale.None.Text(1 / (1 - Math.Max(x, 0)), "F2")} times" : "";
-            yield return new LimitFigure(LimitKind.Solids, "solids", LimitQuantity.Quality).NotApplicable("no limit of dissolved solids, silica or hardness is given" + factor);
+            yield return new LimitFigure(LimitKind.Solids, "solids", QuantityScale.Quality).NotApplicable("no limit of dissolved solids, silica or hardness is given" + factor);
         }
 
         foreach (SolidsLimit solids in site.Solids)
         {
             string reason = x >= 1 ? "no water is left to carry them" : solids.TextAt(Math.Max(x, 0));
-            yield return new LimitFigure(LimitKind.Solids, solids.Name, LimitQuantity.Quality).Below(solids.RawGreatestQuality, x, outlet, reason);
+            yield return new LimitFigure(LimitKind.Solids, solids.Name, QuantityScale.Quality).Below(solids.RawGreatestQuality, x, outlet, reason);
         }
     }
 
@@ -53,7 +53,7 @@ internal static class LimitRules
 
         LimitFigure One(string name, CriticalPlace? found)
         {
-            var figure = new LimitFigure(LimitKind.CriticalQuality, name, LimitQuantity.Quality);
+            var figure = new LimitFigure(LimitKind.CriticalQuality, name, QuantityScale.Quality);
             return found is { } place
                 ? figure.Below(place.RawCritical, place.RawQuality, place.Node, $"{place}; {critical!.Applicability}") with { Status = LimitStatus.Indicator }
                 : figure.NotApplicable("no heated tube carries two phases");
@@ -62,7 +62,7 @@ internal static class LimitRules
 
     private static LimitFigure Stratification(IReadOnlyList<HeatedRow> rows)
     {
-        var figure = new LimitFigure(LimitKind.Stratification, "stratification", LimitQuantity.Ratio);
+        var figure = new LimitFigure(LimitKind.Stratification, "stratification", QuantityScale.Ratio);
         HeatedRow[] flat = [.. rows.Where(row => IsMapped(row.Node.Flow))];
         if (flat.Length == 0) return figure.NotApplicable("no heated tube within 10° of the horizontal carries two phases");
         HeatedRow worst = flat.Aggregate((best, row) => row.Wall.Pattern.StratificationMargin < best.Wall.Pattern.StratificationMargin ? row : best);
@@ -78,7 +78,7 @@ internal static class LimitRules
 
     private static LimitFigure Metal(IReadOnlyList<HeatedRow> rows, SiteLimits site)
     {
-        var figure = new LimitFigure(LimitKind.MetalTemperature, "metal temperature", LimitQuantity.Temperature);
+        var figure = new LimitFigure(LimitKind.MetalTemperature, "metal temperature", QuantityScale.Temperature);
         if (double.IsNaN(site.RawMetal)) return figure.NotApplicable("no limit of metal temperature is given");
         if (rows.Count == 0) return figure.NotApplicable("no section takes heat");
         HeatedRow hottest = rows.Aggregate((best, row) => row.Metal > best.Metal ? row : best);
@@ -87,7 +87,7 @@ internal static class LimitRules
 
     private static LimitFigure Erosion(PassProfile profile, SiteLimits site)
     {
-        var figure = new LimitFigure(LimitKind.ErosionalVelocity, "erosional velocity", LimitQuantity.Speed);
+        var figure = new LimitFigure(LimitKind.ErosionalVelocity, "erosional velocity", QuantityScale.Speed);
         if (site.ErosionFactor is not { } factor) return figure.NotApplicable("no factor C is given");
         PassNode worst = profile.Nodes[0];
         foreach (ref readonly PassNode node in profile.Nodes)
@@ -103,7 +103,7 @@ internal static class LimitRules
 
     private static LimitFigure Differential(PassProfile profile, SiteLimits site)
     {
-        var figure = new LimitFigure(LimitKind.Differential, "meter differential", LimitQuantity.Differential);
+        var figure = new LimitFigure(LimitKind.Differential, "meter differential", QuantityScale.Differential);
         if (profile.Pass.Meter is not { } meter) return figure.NotApplicable("the pass has no meter at its outlet");
         if (double.IsNaN(site.RawDifferential.High)) return figure.NotApplicable("no transmitter range is given");
         PassNode outlet = profile.Nodes[^1];
@@ -114,7 +114,7 @@ internal static class LimitRules
 
     private static LimitFigure Flow(PassProfile profile, SiteLimits site)
     {
-        var figure = new LimitFigure(LimitKind.FeedFlow, "feed flow", LimitQuantity.Flow);
+        var figure = new LimitFigure(LimitKind.FeedFlow, "feed flow", QuantityScale.Flow);
         return double.IsNaN(site.RawFlow.High) ? figure.NotApplicable("no range of feed flow is given") : Between(figure, profile.Conditions.RawFeedFlow, site.RawFlow, profile.Nodes[0]);
     }
 

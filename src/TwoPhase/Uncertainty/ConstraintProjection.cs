@@ -42,8 +42,8 @@ internal sealed class ConstraintProjection
 
     public bool[] IsObservable { get; }
 
-    public double?[] Unmeasured(Vector<double> adjusted) =>
-        _back is null ? [] : Observable(_back * (_c - (_a * adjusted)));
+    /// <summary>The unmeasured of least norm; those that are not observable might be others.</summary>
+    public double[] Nearest(Vector<double> adjusted) => _back is null ? [] : (_back * (_c - (_a * adjusted))).ToArray();
 
     public double?[] UnmeasuredUncertainties(Matrix<double> adjustedCovariance)
     {
@@ -52,5 +52,6 @@ internal sealed class ConstraintProjection
         return Observable((gain * adjustedCovariance * gain.Transpose()).Diagonal().Map(value => Math.Sqrt(Math.Max(value, 0))));
     }
 
-    private double?[] Observable(Vector<double> values) => [.. values.Select((value, j) => IsObservable[j] ? value : (double?)null)];
+    /// <summary>Null in the place of each that is not observable.</summary>
+    public double?[] Observable(IEnumerable<double> values) => [.. values.Select((value, j) => IsObservable[j] ? value : (double?)null)];
 }

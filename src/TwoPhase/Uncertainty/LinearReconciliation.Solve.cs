@@ -45,7 +45,8 @@ public sealed partial class LinearReconciliation
         MeasurementTests = [.. Enumerable.Range(0, count).Select(j => IsRedundant[j] ? forces[j] / Math.Sqrt(_information[j, j]) : 0)];
         Biases = [.. Enumerable.Range(0, count).Select(j => IsRedundant[j] ? new BiasEstimate(forces[j] / _information[j, j], 1 / Math.Sqrt(_information[j, j])) : new BiasEstimate(0, double.PositiveInfinity))];
         AdjustmentTests = [.. Enumerable.Range(0, count).Select(j => AdjustmentTest(Adjustments[j], covariance[j, j], _adjustedCovariance[j, j]))];
-        Unmeasured = projection.Unmeasured(adjusted);
+        NearestUnmeasured = projection.Nearest(adjusted);
+        Unmeasured = projection.Observable(NearestUnmeasured);
         UnmeasuredUncertainties = projection.UnmeasuredUncertainties(_adjustedCovariance);
     }
 

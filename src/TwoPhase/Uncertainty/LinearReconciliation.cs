@@ -36,6 +36,9 @@ public sealed partial class LinearReconciliation
     /// <summary>z, the unmeasured quantities; null where the measurements do not determine one.</summary>
     public IReadOnlyList<double?> Unmeasured { get; }
 
+    /// <summary>z of least norm, for a step from a guess: a quantity that is not determined then moves as little as the constraints allow.</summary>
+    internal IReadOnlyList<double> NearestUnmeasured { get; }
+
     /// <summary>Standard uncertainties of the unmeasured quantities, k = 1; null where they are not determined.</summary>
     public IReadOnlyList<double?> UnmeasuredUncertainties { get; }
 
