@@ -13,7 +13,7 @@ namespace TwoPhase.Uncertainty;
 internal sealed class NonlinearReconciliation
 {
     private const int MostSteps = 60;
-    private const double Settled = 1e-10;
+    private const double Settled = 1e-10, LongestMove = 0.2;   // in units of the scales; a longer step would leave what the slopes are good for
 
     private readonly double[] _values, _scales;
     private readonly int[] _place;   // among the measured, or the complement of that among the unmeasured
@@ -45,27 +45,23 @@ internal sealed class NonlinearReconciliation
         for (int step = 1; step <= MostSteps; step++)
         {
             double[][] slopes = [.. balances.Select(balance => balance.Slopes(values, scales))];
+            double[] imbalances = [.. balances.Select(balance => -balance.At(values))];
+            if (!imbalances.All(Fast.IsFinite) || !slopes.All(row => row.All(Fast.IsFinite))) throw Unsettled(step, change);
             LinearReconciliation linear = LinearReconciliation.Solve(
                 [.. measured.Select((quantity, i) => (readings[i] - values[quantity]) / scales[quantity])],
                 scaled,
                 Columns(slopes, measured),
-                [.. balances.Select(balance => -balance.At(values))],
+                imbalances,
                 Columns(slopes, unmeasured));
 
-            change = 0;
-            for (int i = 0; i < measured.Length; i++) Move(measured[i], linear.Adjusted[i]);
-            for (int i = 0; i < unmeasured.Length; i++) Move(unmeasured[i], linear.NearestUnmeasured[i]);
+            change = Math.Max(linear.Adjusted.Max(Math.Abs), linear.NearestUnmeasured.Select(Math.Abs).DefaultIfEmpty().Max());
+            double share = Math.Min(1, LongestMove / change);
+            for (int i = 0; i < measured.Length; i++) values[measured[i]] += share * linear.Adjusted[i] * scales[measured[i]];
+            for (int i = 0; i < unmeasured.Length; i++) values[unmeasured[i]] += share * linear.NearestUnmeasured[i] * scales[unmeasured[i]];
             if (change <= Settled) return new(values, scales, Places(measured, unmeasured), linear);
-            if (!Fast.IsFinite(change)) break;
         }
 
-        throw new ConvergenceException($"The reconciliation has not settled after {MostSteps} steps; the last moved a value by {Scale.None.Text(change, "G3")} of its scale. The readings are far from any state that the balances allow.");
-
-        void Move(int quantity, double by)
-        {
-            change = double.IsNaN(by) ? double.NaN : Math.Max(change, Math.Abs(by));
-            values[quantity] += by * scales[quantity];
-        }
+        throw Unsettled(MostSteps, change);
     }
 
     /// <summary>Index among the measured; null where a quantity is not measured.</summary>
@@ -77,6 +73,9 @@ internal sealed class NonlinearReconciliation
     /// <summary>Standard uncertainty of the adjusted or inferred value; NaN where it is not determined.</summary>
     public double Uncertainty(int quantity) =>
         _scales[quantity] * (_place[quantity] >= 0 ? Linear.AdjustedUncertainties[_place[quantity]] : Linear.UnmeasuredUncertainties[~_place[quantity]] ?? double.NaN);
+
+    private static ConvergenceException Unsettled(int step, double change) =>
+        new($"The reconciliation has not settled after {step} steps; the last moved a value by {Scale.None.Text(change, "G3")} of its scale. The readings are far from any state that the balances allow.");
 
     private static double[,] Columns(double[][] slopes, int[] quantities)
     {
