@@ -45,6 +45,10 @@ internal sealed class SteamRatios : IRatioSuite
         const int count = ColumnLength;
         double[] pressure = Yardsticks.Fill(count, 0.5, 16, 20), ts = new double[count], hl = new double[count], hg = new double[count], vl = new double[count], vg = new double[count];
         var status = new SaturationStatus[count];
+
+        // Touched once, so that no call is charged with the operating system's first pages.
+        foreach (double[] results in new[] { ts, hl, hg, vl, vg }) Array.Fill(results, double.NaN);
+        Array.Fill(status, SaturationStatus.Missing);
         return () => Saturation.FromPressure(
             Column.Of(pressure, PressureUnit.Megapascal),
             Column.Into(ts, TemperatureUnit.DegreeCelsius),

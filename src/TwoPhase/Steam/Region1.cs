@@ -12,7 +12,7 @@ internal static partial class Region1
     {
         double pi = pressure * (1 / 16.53e6), tau = 1386 / temperature;
         double a = 7.1 - pi, b = tau - 1.222;
-        PowerSum sum = Sum(a, b);
+        PowerSum sum = Sum(PowerRow.Base(a), PowerRow.Base(b));
         double byPi = -pi / a, byTau = tau / b;
         return PhaseCore.FromGibbs(
             pressure,

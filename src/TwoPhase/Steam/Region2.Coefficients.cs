@@ -1,4 +1,5 @@
 using System.Runtime.CompilerServices;
+using TwoPhase.Numerics;
 
 namespace TwoPhase.Steam;
 
@@ -9,12 +10,12 @@ internal static partial class Region2
 
     // Equation (16) of R7-97(2012) with Table 10 as printed, without its ln π: Σ n τ^J.
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    private static PowerRow Ideal(double t)
+    private static PowerRow Ideal(Spread t)
     {
-        double t2 = t * t, t3 = t2 * t, tm1 = 1 / t, tm2 = tm1 * tm1, tm3 = tm2 * tm1, tm4 = tm3 * tm1, tm5 = tm4 * tm1;
+        Spread t2 = t * t, t3 = t2 * t, tm1 = PowerRow.Base(1) / t, tm2 = tm1 * tm1, tm3 = tm2 * tm1, tm4 = tm3 * tm1, tm5 = tm4 * tm1;
 
         return PowerRow
-            .Of(StableN1, 0, 1)
+            .Of(StableN1)
             .And(StableN2, 1, t)
             .And(-0.56087911283020e-2, -5, tm5)
             .And(0.71452738081455e-1, -4, tm4)
@@ -26,18 +27,18 @@ internal static partial class Region2
     }
 
     // Equation (17) with Table 11 as printed: Σ n π^I (τ − 0.5)^J, one row for each exponent I.
-    [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    private static PowerSum Residual(double a, double b)
+    [MethodImpl(Fast.Hot)]
+    private static PowerSum Residual(Spread a, Spread b)
     {
-        double a2 = a * a, a3 = a2 * a, a4 = a3 * a, a5 = a4 * a, a6 = a5 * a, a7 = a6 * a, a8 = a7 * a, a9 = a8 * a, a10 = a9 * a, a16 = a10 * a6,
-               a18 = a16 * a2, a20 = a18 * a2, a21 = a20 * a, a22 = a21 * a, a23 = a22 * a, a24 = a23 * a;
-        double b2 = b * b, b3 = b2 * b, b4 = b3 * b, b6 = b4 * b2, b7 = b6 * b, b8 = b7 * b, b10 = b8 * b2, b11 = b10 * b, b13 = b11 * b2,
-               b14 = b13 * b, b16 = b14 * b2, b20 = b16 * b4, b21 = b20 * b, b25 = b21 * b4, b26 = b25 * b, b29 = b26 * b3, b35 = b29 * b6,
-               b36 = b35 * b, b39 = b36 * b3, b40 = b39 * b, b48 = b40 * b8, b50 = b48 * b2, b53 = b50 * b3, b57 = b53 * b4, b58 = b57 * b;
+        Spread a2 = a * a, a3 = a2 * a, a4 = a2 * a2, a5 = a4 * a, a6 = a4 * a2, a7 = a4 * a3, a8 = a4 * a4, a9 = a8 * a, a10 = a8 * a2, a16 = a8 * a8,
+               a18 = a16 * a2, a20 = a16 * a4, a21 = a16 * a5, a22 = a16 * a6, a23 = a16 * a7, a24 = a16 * a8;
+        Spread b2 = b * b, b3 = b2 * b, b4 = b2 * b2, b6 = b4 * b2, b7 = b4 * b3, b8 = b4 * b4, b10 = b8 * b2, b11 = b8 * b3, b13 = b10 * b3,
+               b14 = b8 * b6, b16 = b8 * b8, b20 = b16 * b4, b21 = b14 * b7, b25 = b14 * b11, b26 = b16 * b10, b29 = b16 * b13, b32 = b16 * b16, b35 = b32 * b3,
+               b36 = b32 * b4, b39 = b32 * b7, b40 = b32 * b8, b48 = b32 * b16, b50 = b25 * b25, b53 = b32 * b21, b57 = b32 * b25, b58 = b32 * b26;
 
         var sum = default(PowerSum);
         sum.Add(1, a, PowerRow
-            .Of(-0.17731742473213e-2, 0, 1)
+            .Of(-0.17731742473213e-2)
             .And(-0.17834862292358e-1, 1, b)
             .And(-0.45996013696365e-1, 2, b2)
             .And(-0.57581259083432e-1, 3, b3)
@@ -49,7 +50,7 @@ internal static partial class Region2
             .And(-0.43797295650573e-1, 7, b7)
             .And(-0.26674547914087e-4, 36, b36));
         sum.Add(3, a3, PowerRow
-            .Of(0.20481737692309e-7, 0, 1)
+            .Of(0.20481737692309e-7)
             .And(0.43870667284435e-6, 1, b)
             .And(-0.32277677238570e-4, 3, b3)
             .And(-0.15033924542148e-2, 6, b6)
@@ -65,7 +66,7 @@ internal static partial class Region2
             .And(-0.21171472321355e-2, 16, b16)
             .And(-0.23895741934104e2, 35, b35));
         sum.Add(7, a7, PowerRow
-            .Of(-0.59059564324270e-17, 0, 1)
+            .Of(-0.59059564324270e-17)
             .And(-0.12621808899101e-5, 11, b11)
             .And(-0.38946842435739e-1, 25, b25));
         sum.Add(8, a8, PowerRow

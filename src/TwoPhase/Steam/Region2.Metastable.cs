@@ -13,20 +13,20 @@ internal static partial class Region2
         // The ideal part is that of stable vapour with two coefficients adjusted (note to Table 10).
         const double n1 = -0.96937268393049e1 - StableN1, n2 = 0.10087275970006e2 - StableN2;
         double pi = pressure * 1e-6, tau = 540 / temperature;
-        PowerRow ideal = Ideal(tau).And(n1, 0, 1).And(n2, 1, tau);
-        return FromParts(pressure, temperature, ideal, MetastableResidual(pi, tau - 0.5));
+        PowerRow ideal = Ideal(PowerRow.Base(tau)).And(n1).And(n2, 1, PowerRow.Base(tau));
+        return FromParts(pressure, temperature, ideal, MetastableResidual(PowerRow.Base(pi), PowerRow.Base(tau - 0.5)));
     }
 
     // Equation (19) with Table 16 as printed: Σ n π^I (τ − 0.5)^J.
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    private static PowerSum MetastableResidual(double a, double b)
+    private static PowerSum MetastableResidual(Spread a, Spread b)
     {
-        double a2 = a * a, a3 = a2 * a, a4 = a3 * a, a5 = a4 * a;
-        double b2 = b * b, b4 = b2 * b2, b5 = b4 * b, b7 = b5 * b2, b9 = b7 * b2, b10 = b9 * b, b11 = b10 * b, b16 = b11 * b5;
+        Spread a2 = a * a, a3 = a2 * a, a4 = a2 * a2, a5 = a4 * a;
+        Spread b2 = b * b, b4 = b2 * b2, b5 = b4 * b, b7 = b5 * b2, b8 = b4 * b4, b9 = b8 * b, b10 = b8 * b2, b11 = b9 * b2, b16 = b8 * b8;
 
         var sum = default(PowerSum);
         sum.Add(1, a, PowerRow
-            .Of(-0.73362260186506e-2, 0, 1)
+            .Of(-0.73362260186506e-2)
             .And(-0.88223831943146e-1, 2, b2)
             .And(-0.72334555213245e-1, 5, b5)
             .And(-0.40813178534455e-2, 11, b11));

@@ -11,7 +11,7 @@ internal static partial class Region2
     public static PhaseCore At(double pressure, double temperature)
     {
         double pi = pressure * 1e-6, tau = 540 / temperature;
-        return FromParts(pressure, temperature, Ideal(tau), Residual(pi, tau - 0.5));
+        return FromParts(pressure, temperature, Ideal(PowerRow.Base(tau)), Residual(PowerRow.Base(pi), PowerRow.Base(tau - 0.5)));
     }
 
     [MethodImpl(MethodImplOptions.AggressiveInlining)]

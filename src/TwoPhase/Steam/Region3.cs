@@ -11,7 +11,7 @@ internal static partial class Region3
     public static PhaseCore At(double density, double temperature)
     {
         double delta = density / Water97.CriticalDensity, tau = Water97.CriticalTemperature / temperature;
-        PowerSum sum = Sum(delta, tau);
+        PowerSum sum = Sum(PowerRow.Base(delta), PowerRow.Base(tau));
         return PhaseCore.FromHelmholtz(
             density,
             temperature,

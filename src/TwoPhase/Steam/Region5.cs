@@ -11,8 +11,8 @@ internal static class Region5
     public static PhaseCore At(double pressure, double temperature)
     {
         double pi = pressure * 1e-6, tau = 1000 / temperature;
-        PowerSum sum = Residual(pi, tau);
-        PowerRow ideal = Ideal(tau);
+        PowerSum sum = Residual(PowerRow.Base(pi), PowerRow.Base(tau));
+        PowerRow ideal = Ideal(PowerRow.Base(tau));
         return PhaseCore.FromGibbs(
             pressure,
             temperature,
@@ -26,12 +26,12 @@ internal static class Region5
 
     // Equation (33) with Table 37 as printed, without its ln π: Σ n τ^J.
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    private static PowerRow Ideal(double t)
+    private static PowerRow Ideal(Spread t)
     {
-        double t2 = t * t, tm1 = 1 / t, tm2 = tm1 * tm1, tm3 = tm2 * tm1;
+        Spread t2 = t * t, tm1 = PowerRow.Base(1) / t, tm2 = tm1 * tm1, tm3 = tm2 * tm1;
 
         return PowerRow
-            .Of(-0.13179983674201e2, 0, 1)
+            .Of(-0.13179983674201e2)
             .And(0.68540841634434e1, 1, t)
             .And(-0.24805148933466e-1, -3, tm3)
             .And(0.36901534980333, -2, tm2)
@@ -41,10 +41,10 @@ internal static class Region5
 
     // Equation (34) with Table 38 as printed: Σ n π^I τ^J.
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    private static PowerSum Residual(double a, double b)
+    private static PowerSum Residual(Spread a, Spread b)
     {
-        double a2 = a * a, a3 = a2 * a;
-        double b2 = b * b, b3 = b2 * b, b4 = b3 * b, b7 = b4 * b3, b9 = b7 * b2;
+        Spread a2 = a * a, a3 = a2 * a;
+        Spread b2 = b * b, b3 = b2 * b, b4 = b3 * b, b7 = b4 * b3, b9 = b7 * b2;
 
         var sum = default(PowerSum);
         sum.Add(1, a, PowerRow
