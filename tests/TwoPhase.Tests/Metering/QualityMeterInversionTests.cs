@@ -59,6 +59,41 @@ public class QualityMeterInversionTests
         }
     });
 
+    // Below its lowest quality every model goes on at the homogeneous slope, here until half of its volume is left.
+    [Property(MaxTest = 25)]
+    public Property Directions_ContinuedBelowTheFormula_StillInvert() => Prop.ForAll(Cases(0, 0.5).ToArbitrary(), c =>
+    {
+        TwoPhase.Steam.Saturation steam = TwoPhase.Steam.Saturation.FromPressure(c.Pressure);
+        MeterState state = new() { LiquidDensity = steam.Liquid.Density.KilogramsPerCubicMeter, VapourDensity = steam.Vapour.Density.KilogramsPerCubicMeter };
+        double slope = (1 / state.VapourDensity) - (1 / state.LiquidDensity);
+        foreach (QualityMeter meter in Meters(c))
+        {
+            // A model of the Froude number has the volume of water at x = 0.
+            double low = meter.Model.LowestQuality, atLow = meter.Model.NeedsGeometry ? 1 / state.LiquidDensity : 1 / WetSteamModelTests.Density(meter.Model, state, low);
+            double x = low - (c.Quality.DecimalFractions * atLow / slope);
+            MassFraction quality = MassFraction.FromDecimalFractions(x);
+            Pressure differential = meter.Differential(c.Flow, c.Pressure, quality);
+            Approx.Relative(c.Flow.KilogramsPerSecond, meter.TotalFlow(c.Pressure, quality, differential).KilogramsPerSecond, 2e-12, meter.ToString());
+            QualityReading reading = meter.Quality(c.Flow, c.Pressure, differential);
+            Approx.Absolute(x, reading.Quality.DecimalFractions, 1e-10, meter.ToString());
+            Assert.Equal(reading.Quality.DecimalFractions < 0 ? ReadingStatus.SubcooledOutlet : ReadingStatus.WetSteam, reading.Status);
+        }
+    });
+
+    // The formula and its continuation meet at both ends: a quality 1e-12 to either side has the same differential. C of ISO/TR 11583 goes as the root of 1 − x.
+    [Property(MaxTest = 25)]
+    public Property Differential_AtBothEndsOfTheFormula_IsContinuous() => Prop.ForAll(Cases(0, 1).ToArbitrary(), c =>
+    {
+        foreach (QualityMeter meter in Meters(c))
+        {
+            foreach (double end in new[] { meter.Model.LowestQuality, 1 })
+            {
+                double At(double x) => meter.Differential(c.Flow, c.Pressure, MassFraction.FromDecimalFractions(x)).Pascals;
+                Approx.Relative(At(end - 1e-12), At(end + 1e-12), 1e-6, meter.ToString());
+            }
+        }
+    });
+
     [Property(MaxTest = 25)]
     public Property Quality_OfASmallerDifferential_IsLower() => Prop.ForAll(Cases(0.1, 0.9).ToArbitrary(), c =>
     {
@@ -94,8 +129,21 @@ public class QualityMeterInversionTests
         Approx.Absolute(c.Quality.DecimalFractions, large.Quality(c.Flow * 4, c.Pressure, differential).Quality.DecimalFractions, 1e-11);
     });
 
+    // The same Froude number in a tube of another size: flow as the diameter to the power of 2.5.
+    [Property(MaxTest = 50)]
+    public Property EffectiveDensity_LargerTubeAtTheSameFroudeNumber_Stays() => Prop.ForAll(WetSteamModelTests.States().ToArbitrary(), Gen.Choose(5, 40).ToArbitrary(), Gen.Choose(10, 100).ToArbitrary(), (state, tenths, percent) =>
+    {
+        double scale = tenths / 10.0, x = percent / 100.0;
+        MeterState larger = state with { PipeDiameter = scale * state.PipeDiameter, ThroatDiameter = scale * state.ThroatDiameter, TotalMassFlow = Math.Pow(scale, 2.5) * state.TotalMassFlow };
+        foreach (WetSteamModel model in WetSteamModel.All)
+        {
+            Approx.Relative(WetSteamModelTests.Density(model, state, x), WetSteamModelTests.Density(model, larger, x), 1e-12, model.Name);
+            Approx.Relative(model.DischargeCoefficientCore(state, x), model.DischargeCoefficientCore(larger, x), 1e-12, model.Name);
+        }
+    });
+
     [Property(MaxTest = 25)]
-    public Property Quality_ImperialAndSiDoors_Agree() => Prop.ForAll(Cases(0.1, 0.9).ToArbitrary(), c =>
+    public Property Directions_ImperialAndSiDoors_Agree() => Prop.ForAll(Cases(0.1, 0.9).ToArbitrary(), c =>
     {
         var meter = new QualityMeter(new ClassicalVenturi(c.Pipe, c.Throat, ConvergentFinish.Machined), WetSteamModel.ReaderHarrisGraham);
         var imperial = new QualityMeter(new ClassicalVenturi(Length.FromInches(c.Pipe.Meters / 0.0254), Length.FromInches(c.Throat.Meters / 0.0254), ConvergentFinish.Machined), WetSteamModel.ReaderHarrisGraham);
@@ -107,6 +155,12 @@ public class QualityMeterInversionTests
             Pressure.FromPoundsForcePerSquareInch(c.Pressure.Pascals / psi),
             Pressure.FromPoundsForcePerSquareInch(differential.Pascals / psi));
         Approx.Absolute(si.Quality.DecimalFractions, other.Quality.DecimalFractions, 1e-12);
+
+        MassFraction quality = MassFraction.FromPercent(100 * c.Quality.DecimalFractions);
+        Pressure back = imperial.Differential(MassFlow.FromPoundsPerHour(c.Flow.KilogramsPerSecond * 3600 / 0.45359237), Pressure.FromPoundsForcePerSquareInch(c.Pressure.Pascals / psi), quality);
+        Approx.Relative(differential.Pascals, back.Pascals, 1e-12);
+        MassFlow total = imperial.TotalFlow(Pressure.FromPoundsForcePerSquareInch(c.Pressure.Pascals / psi), quality, Pressure.FromPoundsForcePerSquareInch(differential.Pascals / psi));
+        Approx.Relative(c.Flow.KilogramsPerSecond, total.KilogramsPerSecond, 2e-12);
     });
 
     private static double Slope(QualityMeter meter, in Case c)
