@@ -16,7 +16,7 @@ public readonly record struct StabilityNumbers
 {
     /// <summary>Subcooling number 4 + 2√3 = 7.464 up to which no flow of a bare channel has two others at the same pressure drop.</summary>
     /// <remarks>
-    /// <para>With s = boiling length's complement λ/L, Δp ~ s² + (Nsub/2) s (1 − s)²; its slope 2 s + (Nsub/2)(1 − s)(1 − 3 s) touches zero at s = 1/√3.</para>
+    /// <para>With s = λ/L, λ the length up to where boiling begins, Δp ~ s² + (Nsub/2) s (1 − s)²; its slope 2 s + (Nsub/2)(1 − s)(1 − 3 s) touches zero at s = 1/√3.</para>
     /// <para>Range: uniform heat, homogeneous flow, friction only, one friction factor, constant pressure.</para>
     /// <para>Accuracy: exact for that channel. Inlet throttling raises it; bends, slip and acceleration move it either way.</para>
     /// <para>Source: follows from the definitions above; the excursion itself: Ledinegg, Die Wärme 61, 891-898 (1938).</para>
