@@ -12,7 +12,7 @@ internal sealed partial class Channel<TFluid>
     // Times nearer to each other than this are the same [s]; sums of steps miss their end by round-off.
     private const double Instant = 1e-7;
 
-    private double _feedFlow, _heat, _shift = 1;
+    private double _feedFlow, _heat;
 
     /// <summary>Lag of the pressure profile behind the flow [s]; 0 for none.</summary>
     public double HeadLag { get; set; } = 10;
@@ -34,6 +34,7 @@ internal sealed partial class Channel<TFluid>
         while (end - Time > Instant)
         {
             double next = Math.Min(end, Stretch * (Math.Floor((Time + Instant) / Stretch) + 1));
+            Absorb(next - Time);
             AimPressure(OutletPressure);
             RenewFilms();
             while (next - Time > Instant)
@@ -50,22 +51,11 @@ internal sealed partial class Channel<TFluid>
         return true;
     }
 
-    /// <summary>Splits the heat anew: each duct's own share times its factor.</summary>
-    public void Split(ReadOnlySpan<double> factors)
-    {
-        foreach (ref Cell cell in _cells.AsSpan())
-        {
-            double share = cell.OwnShare * factors[cell.Duct];
-            if (cell.HeatShare > 0) _shift = Math.Max(_shift, share / cell.HeatShare);
-            cell.HeatShare = share;
-        }
-    }
-
     // A step of feed or heat drives the flow up everywhere at once, and by no more than it rises itself.
     private double LongestAllowed(double feedFlow)
     {
-        double quickening = Math.Max(1, Math.Max(feedFlow / _feedFlow, (_heat > 0 ? Heat / _heat : 1) * _shift));
-        (_feedFlow, _heat, _shift) = (feedFlow, Heat, 1);
+        double quickening = Math.Max(1, Math.Max(feedFlow / _feedFlow, (_heat > 0 ? AbsorbedHeat / _heat : 1) * _shift));
+        (_feedFlow, _heat, _shift) = (feedFlow, AbsorbedHeat, 1);
         return Math.Min(LongestStep, Courant / (CourantRate * quickening));
     }
 }

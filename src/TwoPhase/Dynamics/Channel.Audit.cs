@@ -26,7 +26,7 @@ internal sealed partial class Channel<TFluid>
     private void Book(double step, double feedFlow)
     {
         _massIn += step * feedFlow;
-        _energyIn += step * ((feedFlow * FeedEnthalpy) + Heat);
+        _energyIn += step * ((feedFlow * FeedEnthalpy) + AbsorbedHeat);
         _massOut += step * Outlet.Outflow;
         _energyOut += step * Outlet.Outflow * Outlet.OutEnthalpy;
     }

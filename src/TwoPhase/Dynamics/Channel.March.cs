@@ -86,7 +86,7 @@ internal sealed partial class Channel<TFluid>
     // Over a step with the water at one temperature: Tw → T + Q/UA + (Tw − T − Q/UA) exp(−UA t/C).
     private void Warm(ref Cell cell, double step)
     {
-        double fire = Heat * cell.HeatShare, end = cell.RestingWall(fire);
+        double fire = AbsorbedHeat * cell.HeatShare, end = cell.RestingWall(fire);
         if (!MetalStores || cell.Capacity <= 0)
         {
             cell.HeatToWater = fire;

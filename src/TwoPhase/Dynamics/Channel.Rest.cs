@@ -12,6 +12,7 @@ internal sealed partial class Channel<TFluid>
     public bool Rest(double feedFlow, double outletPressure)
     {
         OutletPressure = outletPressure;
+        RestHeat();
         double face = FeedEnthalpy;
         foreach (ref Cell cell in _cells.AsSpan())
         {

@@ -33,7 +33,7 @@ internal sealed partial class Channel<TFluid>
     /// <summary>The cells from inlet to outlet.</summary>
     public ReadOnlySpan<Cell> Cells => _cells;
 
-    /// <summary>Heat of the fire on the pass [W], spread by the shares of the cells.</summary>
+    /// <summary>Heat that the fire asks for [W], at rest what the pass takes up.</summary>
     public double Heat { get; set; }
 
     /// <summary>Enthalpy of the feed [J/kg].</summary>

@@ -21,6 +21,7 @@ internal sealed class HistoryColumn(string name, string heading, Type unit, Func
         new(nameof(PassInstant.BoilingOnset), "boiling_onset_m", typeof(LengthUnit), row => row.RawOnset),
         new(nameof(PassInstant.OutletTemperature), "outlet_temperature_K", typeof(TemperatureUnit), row => row.RawOutletTemperature),
         new(nameof(PassInstant.HottestMetal), "hottest_metal_K", typeof(TemperatureUnit), row => row.RawHottestMetal),
+        new(nameof(PassInstant.AbsorbedHeat), "absorbed_heat_W", typeof(PowerUnit), row => row.RawAbsorbedHeat),
     ];
 
     public string Name => name;
@@ -44,6 +45,7 @@ internal sealed class HistoryColumn(string name, string heading, Type unit, Func
         RawOnset = values[9],
         RawOutletTemperature = values[10],
         RawHottestMetal = values[11],
+        RawAbsorbedHeat = values[12],
     };
 
     /// <summary>The line from SI to a unit of this column.</summary>
@@ -60,6 +62,7 @@ internal sealed class HistoryColumn(string name, string heading, Type unit, Func
         PressureUnit pressure => pressure.ToSi(),
         MassUnit mass => mass.ToSi(),
         LengthUnit length => length.ToSi(),
+        PowerUnit power => power.ToSi(),
         _ => ((TemperatureUnit)unit).ToSi(),
     };
 }

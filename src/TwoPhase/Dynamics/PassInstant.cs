@@ -12,6 +12,9 @@ public readonly record struct PassInstant
     /// <summary>ṁin, feed flow.</summary>
     public MassFlow FeedFlow => MassFlow.FromKilogramsPerSecond(RawFeedFlow);
 
+    /// <summary>Heat that the pass takes up: what the fire asks for, behind its lags.</summary>
+    public Power AbsorbedHeat => Power.FromWatts(RawAbsorbedHeat);
+
     /// <summary>ṁout, flow through the meter.</summary>
     public MassFlow OutletFlow => MassFlow.FromKilogramsPerSecond(RawOutletFlow);
 
@@ -54,6 +57,8 @@ public readonly record struct PassInstant
     internal double RawTime { get; init; }
 
     internal double RawFeedFlow { get; init; }
+
+    internal double RawAbsorbedHeat { get; init; }
 
     internal double RawOutletFlow { get; init; }
 

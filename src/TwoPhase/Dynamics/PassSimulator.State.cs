@@ -51,6 +51,7 @@ public sealed partial class PassSimulator
         {
             RawTime = _time,
             RawFeedFlow = Conditions.RawFeedFlow,
+            RawAbsorbedHeat = _channel.AbsorbedHeat,
             RawOutletFlow = outlet.Outflow,
             RawTrueQuality = quality,
             RawIndicatedQuality = indicated,

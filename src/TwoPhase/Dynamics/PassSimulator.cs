@@ -36,7 +36,7 @@ public sealed partial class PassSimulator
         if (pass.Ducts.Length == 0) throw new ArgumentException($"Pass '{pass.Name}' has no section: its simulation needs its tubes.", nameof(pass));
         if (pass.Interchanger is not null) throw new ArgumentException($"Pass '{pass.Name}' has a feed interchanger, which the simulator does not model.", nameof(pass));
         Check(initial, nameof(initial));
-        _channel = new(_fluid, pass.Ducts, Options.Models, Options.Cells) { MetalStores = Options.MetalStoresHeat, HeadLag = Options.RawPressureLag };
+        _channel = new(_fluid, pass.Ducts, Options.Models, Options.Cells) { MetalStores = Options.MetalStoresHeat, HeadLag = Options.RawPressureLag, HeatLags = Options.HeatLags };
         _meter = new(Options.Meter ?? pass.Meter, Options.Lags);
         Conditions = initial;
         Rest(initial);

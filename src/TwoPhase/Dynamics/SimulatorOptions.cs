@@ -39,6 +39,9 @@ public sealed class SimulatorOptions
     /// <summary>Lags of the instruments; none unless given.</summary>
     public SensorLags Lags { get; private set; }
 
+    /// <summary>Lags of the absorbed heat behind the fire; none unless given.</summary>
+    public HeatLags HeatLags { get; private set; }
+
     internal double RawPressureLag => _pressureLag;
 
     internal double RawSampling => _sampling;
@@ -92,6 +95,10 @@ public sealed class SimulatorOptions
     /// <summary>With instruments that lag.</summary>
     /// <param name="lags">The lags.</param>
     public SimulatorOptions WithLags(SensorLags lags) => Changed(copy => copy.Lags = lags);
+
+    /// <summary>With heat that lags behind the fire; the absorbed heat of conditions and schedules is then what the fire asks for.</summary>
+    /// <param name="lags">The lags.</param>
+    public SimulatorOptions WithHeatLags(HeatLags lags) => Changed(copy => copy.HeatLags = lags);
 
     private SimulatorOptions Changed(Action<SimulatorOptions> change)
     {
