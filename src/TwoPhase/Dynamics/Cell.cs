@@ -40,14 +40,26 @@ internal struct Cell
     /// <summary>Pressure over that at the outlet [Pa], and where friction, weight and acceleration would have it now.</summary>
     public double Head, HeadTarget;
 
+    /// <summary>By how much its pressure over that at the outlet changes in this inner step [Pa], and its pressure changed in the last [Pa/s].</summary>
+    public double HeadChange, PressureRate;
+
+    /// <summary>Loss from its middle to that of the next, or to the outlet [Pa], the outflow at which that was found [kg/s], and the loss of half of it per outflow [Pa·s/kg].</summary>
+    public double Drop, DropFlow, Resistance;
+
+    /// <summary>Mass that it lets go per pressure [kg/Pa], and what comes out of it for each kilogram that comes in.</summary>
+    public double Store, Swelling;
+
+    /// <summary>How its outflow will follow: change [kg/s] at head zero, and less for each pascal of head.</summary>
+    public double Follow, FollowHead;
+
     /// <summary>Both phases at its pressure.</summary>
     public SaturatedPair Steam;
 
     /// <summary>Specific enthalpy of what it holds, and of what flows, at its middle [J/kg].</summary>
     public double HeldEnthalpy, FlowEnthalpy;
 
-    /// <summary>Change of the flowing enthalpy from face to face [J/kg].</summary>
-    public double Slope;
+    /// <summary>Change of the flowing enthalpy from face to face [J/kg], and its size as a boundary in the cell sees it.</summary>
+    public double Slope, Spread;
 
     /// <summary>Flowing quality where it holds both phases, else 0 or 1, and void fraction.</summary>
     public double FlowQuality, VoidFraction;

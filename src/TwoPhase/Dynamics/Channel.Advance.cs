@@ -36,13 +36,14 @@ internal sealed partial class Channel<TFluid>
             double next = Math.Min(end, Stretch * (Math.Floor((Time + Instant) / Stretch) + 1));
             Absorb(next - Time);
             AimPressure(OutletPressure);
+            FindStores();
             RenewFilms();
             while (next - Time > Instant)
             {
                 double left = next - Time, step = left / Math.Max(1, Math.Ceiling((left / LongestAllowed(feedFlow)) - 1e-9));
                 Time += step;
                 OutletPressure = from + ((outletPressure - from) * ((Time - start) / duration));
-                Step(step, feedFlow, OutletPressure, HeadLag);
+                Step(step, feedFlow, OutletPressure);
                 if (Stagnant >= 0) return false;
                 Book(step, feedFlow);
             }

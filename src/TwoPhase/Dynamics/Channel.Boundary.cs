@@ -7,11 +7,18 @@ namespace TwoPhase.Dynamics;
 // walks from cell to cell: a jump would be taken for a change of volume, and leave as a shock.
 internal sealed partial class Channel<TFluid>
 {
+    // A profile that stands about a boundary turns no faster than new water comes in: were it to jump with the limiter, the cell's volume would.
+    private static double SpreadOf(in Cell cell, double step)
+    {
+        double wanted = Math.Abs(cell.Slope);
+        return cell.Boundary == Boundary.None ? wanted : cell.Spread + (Math.Min(1, step * cell.Outflow / cell.Mass) * (wanted - cell.Spread));
+    }
+
     private void FindBoundary(ref Cell cell)
     {
         cell.Boundary = Boundary.None;
         SaturatedPair steam = cell.Steam;
-        double spread = Math.Abs(cell.Slope), boiling = cell.HeldEnthalpy - steam.LiquidEnthalpy, dew = cell.HeldEnthalpy - steam.VapourEnthalpy;
+        double spread = cell.Spread, boiling = cell.HeldEnthalpy - steam.LiquidEnthalpy, dew = cell.HeldEnthalpy - steam.VapourEnthalpy;
         if (boiling > -spread / 2 && boiling < 2 * spread) Place(ref cell, Boundary.Boiling, new() { Spread = spread, Below = 1, Above = HeldByFlow(cell, Boundary.Boiling, spread) }, boiling);
         else if (dew < spread / 2 && dew > -2 * spread) Place(ref cell, Boundary.Dew, new() { Spread = spread, Below = HeldByFlow(cell, Boundary.Dew, spread), Above = 1 }, dew);
     }

@@ -9,15 +9,17 @@ internal sealed partial class Channel<TFluid>
     // Nearer to saturation than this the tangent stands for the chord [J/kg].
     private const double Beside = 1e3;
 
-    private void Decompose(double step, double outletPressure, double headShare)
+    private void Decompose(double step, double outletPressure)
     {
         for (int i = 0; i < _cells.Length; i++)
         {
             ref Cell cell = ref _cells[i];
-            cell.Head += headShare * (cell.HeadTarget - cell.Head);
+            cell.Head += cell.HeadChange;
             double pressure = outletPressure + cell.Head;
+            cell.PressureRate = (pressure - cell.Steam.Pressure) / step;
             cell.Steam = _fluid.Saturated(pressure);
             cell.HeldEnthalpy = (cell.Energy + (pressure * cell.Volume)) / cell.Mass;
+            cell.Spread = SpreadOf(cell, step);
             Decompose(ref cell);
             Warm(ref cell, step);
         }

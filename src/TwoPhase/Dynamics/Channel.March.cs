@@ -13,9 +13,9 @@ internal sealed partial class Channel<TFluid>
 
     // What flows is reconstructed as the rise that the heat of the moment gives it from face to face, plus the limited slope of what
     // deviates from that. At rest nothing deviates, so rest is exact whatever the heat profile, and only true fronts meet the limiter.
-    private void Reconstruct(double step)
+    private void Reconstruct(double step, double feedFlow)
     {
-        double rise = Rise(_cells[0]), before = (2 * (_cells[0].FlowEnthalpy - FeedEnthalpy)) - rise;
+        double rise = Rise(_cells[0], feedFlow), before = (2 * (_cells[0].FlowEnthalpy - FeedEnthalpy)) - rise;
         for (int i = 0; i < _cells.Length; i++)
         {
             ref Cell cell = ref _cells[i];
@@ -23,7 +23,7 @@ internal sealed partial class Channel<TFluid>
             if (i + 1 < _cells.Length)
             {
                 ref readonly Cell next = ref _cells[i + 1];
-                rise = Rise(next);
+                rise = Rise(next, cell.Outflow);
                 after = (next.FlowEnthalpy - cell.FlowEnthalpy - ((own + rise) / 2)) / ((volume + next.Volume) / 2);
             }
             else
@@ -36,7 +36,8 @@ internal sealed partial class Channel<TFluid>
         }
     }
 
-    private static double Rise(in Cell cell) => cell.HeatToWater / cell.Outflow;
+    // By the flow that comes in: with what goes out, the volume of a cell that begins to boil would hang on its own outflow, and swing.
+    private static double Rise(in Cell cell, double inflow) => cell.HeatToWater / inflow;
 
     // Where both phases flow every wave grows on its way, and a limiter that sharpens makes stairs of it: monotonised central difference.
     private static double Limited(double left, double right, in Cell cell, double step)

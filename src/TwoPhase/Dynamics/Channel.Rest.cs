@@ -13,14 +13,15 @@ internal sealed partial class Channel<TFluid>
     {
         OutletPressure = outletPressure;
         RestHeat();
+        (_lastFeed, _lastPressure) = (feedFlow, outletPressure);
         double face = FeedEnthalpy;
         foreach (ref Cell cell in _cells.AsSpan())
         {
             cell.Head = 0;
             face += cell.HeatShare * Heat / feedFlow;
             (cell.Outflow, cell.OutEnthalpy, cell.HeatToWater) = (feedFlow, face, cell.HeatShare * Heat);
-            cell.FlowEnthalpy = face - (Rise(cell) / 2);
-            cell.Slope = Rise(cell);
+            cell.Spread = cell.Slope = Rise(cell, feedFlow);
+            cell.FlowEnthalpy = face - (cell.Slope / 2);
         }
 
         bool settled = false;
@@ -56,6 +57,7 @@ internal sealed partial class Channel<TFluid>
     private void Fill(ref Cell cell, double pressure)
     {
         cell.Steam = _fluid.Saturated(pressure);
+        cell.PressureRate = 0;
         SaturatedPair steam = cell.Steam;
         double quality = steam.Quality(cell.FlowEnthalpy), half = Math.Abs(cell.Slope) / 2;
         cell.Boundary = Math.Abs(cell.FlowEnthalpy - steam.LiquidEnthalpy) < half ? Boundary.Boiling : Math.Abs(cell.FlowEnthalpy - steam.VapourEnthalpy) < half ? Boundary.Dew : Boundary.None;

@@ -20,7 +20,7 @@ internal sealed partial class Channel<TFluid>
     private readonly Duct[] _ducts;
     private readonly Cell[] _cells;
     private readonly PassModels _models;
-    private double _inletHead;
+    private double _lastFeed, _lastPressure;
 
     public Channel(in TFluid fluid, Duct[] ducts, PassModels models, int cells)
     {
@@ -54,10 +54,12 @@ internal sealed partial class Channel<TFluid>
     public double InletPressure => OutletPressure + _cells[0].Head + _inletHead;
 
     /// <summary>One inner step; the outlet pressure is that at its end.</summary>
-    public void Step(double step, double feedFlow, double outletPressure, double headLag)
+    public void Step(double step, double feedFlow, double outletPressure)
     {
-        Decompose(step, outletPressure, headLag > 0 ? 1 - Math.Exp(-step / headLag) : 1);
-        Reconstruct(step);
+        ForeseePressure(step, feedFlow, (outletPressure - _lastPressure) / step);
+        Decompose(step, outletPressure);
+        Reconstruct(step, feedFlow);
         March(step, feedFlow);
+        (_lastFeed, _lastPressure) = (feedFlow, outletPressure);
     }
 }

@@ -28,8 +28,8 @@ public sealed class SimulatorOptions
     public bool MetalStoresHeat { get; private set; } = true;
 
     /// <summary>
-    /// Time constant with which the pressure along the pass follows the friction of the moment. Without any, a fall of pressure
-    /// flashes liquid, which adds friction at once, and the two run away together.
+    /// Time constant with which the pressure along the pass follows the friction of the moment: it stands for the seconds in which
+    /// pressure waves run through wet steam and the flow gathers speed.
     /// </summary>
     public Duration PressureLag => Duration.FromSeconds(_pressureLag);
 

@@ -51,6 +51,14 @@ internal static class UniformChannel
         return Answer(Velocity * delay, Velocity + (expansion * wet1), e < end ? (e * (1 - (1 / ratio))) + (end / ratio) : end);
     }
 
+    /// <summary>Heat times <paramref name="ratio"/> on a channel that does not boil yet, since its feed lacks <paramref name="lacking"/> [J/kg]: the boundary enters from the outlet.</summary>
+    /// <remarks>As <see cref="HeatStep"/> for t ≤ τ/ratio: the liquid that was in the channel at the step boils first where it is hottest.</remarks>
+    public static ChannelAnswer FirstBoiling(double lacking, double ratio, double t)
+    {
+        double onset = Velocity * ((Delay * lacking / Lacking) - ((ratio - 1) * t)), wet = Math.Max(0, Length - onset);
+        return Answer(onset, Velocity + (ratio * Expansion * wet), 1 + (Expansion * wet / Velocity));
+    }
+
     /// <summary>Feed that lacks <paramref name="lacking"/> [J/kg] to boil in place of <see cref="Lacking"/>.</summary>
     public static ChannelAnswer FeedStep(double lacking, double t)
     {
