@@ -46,6 +46,9 @@ internal struct Cell
     /// <summary>Loss from its middle to that of the next, or to the outlet [Pa], the outflow at which that was found [kg/s], and the loss of half of it per outflow [Pa·s/kg].</summary>
     public double Drop, DropFlow, Resistance;
 
+    /// <summary>Loss over half of it [Pa].</summary>
+    public double HalfLoss;
+
     /// <summary>Mass that it lets go per pressure [kg/Pa], and what comes out of it for each kilogram that comes in.</summary>
     public double Store, Swelling;
 

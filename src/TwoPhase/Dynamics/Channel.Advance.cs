@@ -20,7 +20,7 @@ internal sealed partial class Channel<TFluid>
     /// <summary>Time since the state of rest [s].</summary>
     public double Time { get; private set; }
 
-    /// <summary>Outlet pressure now [Pa].</summary>
+    /// <summary>Pressure imposed at the outlet now [Pa]: behind the non-return valve where there is one.</summary>
     public double OutletPressure { get; private set; }
 
     /// <summary>
@@ -35,7 +35,7 @@ internal sealed partial class Channel<TFluid>
         {
             double next = Math.Min(end, Stretch * (Math.Floor((Time + Instant) / Stretch) + 1));
             Absorb(next - Time);
-            AimPressure(OutletPressure);
+            AimPressure(EndPressure);
             FindStores();
             RenewFilms();
             while (next - Time > Instant)
@@ -43,7 +43,7 @@ internal sealed partial class Channel<TFluid>
                 double left = next - Time, step = left / Math.Max(1, Math.Ceiling((left / LongestAllowed(feedFlow)) - 1e-9));
                 Time += step;
                 OutletPressure = from + ((outletPressure - from) * ((Time - start) / duration));
-                Step(step, feedFlow, OutletPressure);
+                StepBehindValve(step, feedFlow, OutletPressure);
                 if (Stagnant >= 0) return false;
                 Book(step, feedFlow);
             }

@@ -8,26 +8,22 @@ internal sealed partial class Channel<TFluid>
     // Share of the pressure over which a difference stands for the slope along saturation.
     private const double Probe = 1e-4;
 
-    private double _inletHead;
-
     // Losses of the moment, from the outlet up, and how they and the store of each cell answer to a change.
     private void AimPressure(double outletPressure)
     {
-        double lossAfter = 0, head = 0;
+        double head = 0;
         PassNode after = default;
         for (int i = _cells.Length - 1; i >= 0; i--)
         {
             ref Cell cell = ref _cells[i];
             PassNode node = LocalFlow.At(_fluid, _models.Slip, _models.Friction, _ducts[cell.Duct], cell.MassFlux, outletPressure + cell.Head, cell.FlowEnthalpy);
-            double loss = node.Loss * cell.Length / 2;
-            cell.Drop = i == _cells.Length - 1 ? loss : loss + lossAfter + MomentumRise(node, after);
+            cell.HalfLoss = node.Loss * cell.Length / 2;
+            cell.Drop = i == _cells.Length - 1 ? cell.HalfLoss : cell.HalfLoss + _cells[i + 1].HalfLoss + MomentumRise(node, after);
             cell.Resistance = (node.Friction + node.Fittings) * cell.Length / cell.Outflow;
             cell.DropFlow = cell.Outflow;
             cell.HeadTarget = head += cell.Drop;
-            (after, lossAfter) = (node, loss);
+            after = node;
         }
-
-        _inletHead = lossAfter;
     }
 
     private void FindStores()

@@ -13,7 +13,7 @@ internal sealed partial class Channel<TFluid>
     {
         OutletPressure = outletPressure;
         RestHeat();
-        (_lastFeed, _lastPressure) = (feedFlow, outletPressure);
+        (_lastFeed, EndPressure, TimeShut) = (feedFlow, outletPressure, 0);
         double face = FeedEnthalpy;
         foreach (ref Cell cell in _cells.AsSpan())
         {

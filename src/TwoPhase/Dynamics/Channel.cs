@@ -20,7 +20,7 @@ internal sealed partial class Channel<TFluid>
     private readonly Duct[] _ducts;
     private readonly Cell[] _cells;
     private readonly PassModels _models;
-    private double _lastFeed, _lastPressure;
+    private double _lastFeed;
 
     public Channel(in TFluid fluid, Duct[] ducts, PassModels models, int cells)
     {
@@ -51,15 +51,16 @@ internal sealed partial class Channel<TFluid>
     public ref readonly Cell Outlet => ref _cells[^1];
 
     /// <summary>Pressure at the inlet face [Pa].</summary>
-    public double InletPressure => OutletPressure + _cells[0].Head + _inletHead;
+    public double InletPressure => EndPressure + _cells[0].Head + _cells[0].HalfLoss;
 
-    /// <summary>One inner step; the outlet pressure is that at its end.</summary>
-    public void Step(double step, double feedFlow, double outletPressure)
+    /// <summary>One inner step; the pressure at the end of the pass is that at its end.</summary>
+    private void Step(double step, double feedFlow, double endPressure)
     {
-        ForeseePressure(step, feedFlow, (outletPressure - _lastPressure) / step);
-        Decompose(step, outletPressure);
+        Stagnant = -1;
+        ForeseePressure(step, feedFlow, (endPressure - EndPressure) / step);
+        Decompose(step, endPressure);
         Reconstruct(step, feedFlow);
         March(step, feedFlow);
-        (_lastFeed, _lastPressure) = (feedFlow, outletPressure);
+        (_lastFeed, EndPressure) = (feedFlow, endPressure);
     }
 }

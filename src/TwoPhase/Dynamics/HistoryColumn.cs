@@ -22,6 +22,7 @@ internal sealed class HistoryColumn(string name, string heading, Type unit, Func
         new(nameof(PassInstant.OutletTemperature), "outlet_temperature_K", typeof(TemperatureUnit), row => row.RawOutletTemperature),
         new(nameof(PassInstant.HottestMetal), "hottest_metal_K", typeof(TemperatureUnit), row => row.RawHottestMetal),
         new(nameof(PassInstant.AbsorbedHeat), "absorbed_heat_W", typeof(PowerUnit), row => row.RawAbsorbedHeat),
+        new(nameof(PassInstant.ValveShut), "valve_shut", typeof(RatioUnit), row => row.RawValveShut),
     ];
 
     public string Name => name;
@@ -46,6 +47,7 @@ internal sealed class HistoryColumn(string name, string heading, Type unit, Func
         RawOutletTemperature = values[10],
         RawHottestMetal = values[11],
         RawAbsorbedHeat = values[12],
+        RawValveShut = values[13],
     };
 
     /// <summary>The line from SI to a unit of this column.</summary>
@@ -63,6 +65,7 @@ internal sealed class HistoryColumn(string name, string heading, Type unit, Func
         MassUnit mass => mass.ToSi(),
         LengthUnit length => length.ToSi(),
         PowerUnit power => power.ToSi(),
+        RatioUnit ratio => ratio.ToSi(),
         _ => ((TemperatureUnit)unit).ToSi(),
     };
 }

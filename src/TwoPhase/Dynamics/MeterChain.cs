@@ -15,12 +15,18 @@ internal sealed class MeterChain
     }
 
     /// <summary>Δp that outlet flow and true quality make [Pa], and the quality that it implies with the feed flow; NaN where there is none.</summary>
-    public (double Differential, double Quality) Read(double elapsed, double feedFlow, double outletFlow, double pressure, double quality)
+    /// <param name="elapsed">Time since the last reading [s].</param>
+    /// <param name="feedFlow">What the reading takes for the flow [kg/s].</param>
+    /// <param name="outletFlow">What flows through the meter [kg/s].</param>
+    /// <param name="pressure">Pressure at the meter [Pa].</param>
+    /// <param name="quality">True quality there.</param>
+    /// <param name="measuredPressure">Pressure that the reading is made with [Pa].</param>
+    public (double Differential, double Quality) Read(double elapsed, double feedFlow, double outletFlow, double pressure, double quality, double measuredPressure)
     {
         // Below saturation the wet-steam models have no say; they continue above it.
         if (_meter is null || !(quality >= 0)) return (double.NaN, double.NaN);
         double differential = _meter.DifferentialOrNaN(outletFlow, pressure, quality);
-        double flow = _flow.Follow(feedFlow, elapsed), still = _pressure.Follow(pressure, elapsed), shown = _differential.Follow(differential, elapsed);
+        double flow = _flow.Follow(feedFlow, elapsed), still = _pressure.Follow(measuredPressure, elapsed), shown = _differential.Follow(differential, elapsed);
         return (differential, _meter.SampleCore(flow, still, shown, out _));
     }
 

@@ -15,7 +15,7 @@ public readonly record struct PassInstant
     /// <summary>Heat that the pass takes up: what the fire asks for, behind its lags.</summary>
     public Power AbsorbedHeat => Power.FromWatts(RawAbsorbedHeat);
 
-    /// <summary>ṁout, flow through the meter.</summary>
+    /// <summary>ṁout, flow through the meter: at the outlet, or at the tube end where the outlet line says so.</summary>
     public MassFlow OutletFlow => MassFlow.FromKilogramsPerSecond(RawOutletFlow);
 
     /// <summary>x, true quality of what leaves: equilibrium quality of the flowing enthalpy, below 0 or above 1 outside the dome.</summary>
@@ -30,7 +30,7 @@ public readonly record struct PassInstant
     /// <summary>Δp that the meter makes of outlet flow and true quality; null without a meter.</summary>
     public Pressure? Differential => double.IsNaN(RawDifferential) ? null : Pressure.FromPascals(RawDifferential);
 
-    /// <summary>Absolute pressure at the outlet.</summary>
+    /// <summary>Absolute pressure where the pass ends and pressure is measured: at the outlet, or at the header behind the outlet line.</summary>
     public Pressure OutletPressure => Pressure.FromPascals(RawOutletPressure);
 
     /// <summary>Absolute pressure at the inlet.</summary>
@@ -47,6 +47,10 @@ public readonly record struct PassInstant
 
     /// <summary>Temperature of the hottest metal, mean over the tube wall.</summary>
     public Temperature HottestMetal => Temperature.FromKelvins(RawHottestMetal);
+
+    /// <summary>Share of the time since the row before in which the non-return valve of the outlet line was shut, 0 to 1.</summary>
+    /// <remarks>Shut, it keeps the header's water and steam out; a trickle of half a per cent of the feed flow still leaves the pass, which makes its own pressure meanwhile.</remarks>
+    public Ratio ValveShut => Ratio.FromDecimalFractions(RawValveShut);
 
     /// <summary>Mass in minus out minus the change of holdup since the start, over the mass held; round-off.</summary>
     public double MassResidual { get; init; }
@@ -79,6 +83,8 @@ public readonly record struct PassInstant
     internal double RawOutletTemperature { get; init; }
 
     internal double RawHottestMetal { get; init; }
+
+    internal double RawValveShut { get; init; }
 
     /// <summary>The instant in engineering units, invariant culture.</summary>
     public override string ToString() => string.Format(

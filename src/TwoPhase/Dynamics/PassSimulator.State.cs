@@ -44,30 +44,42 @@ public sealed partial class PassSimulator
 
     private PassInstant Look(double elapsed)
     {
-        ref readonly Cell outlet = ref _channel.Outlet;
-        double pressure = _channel.OutletPressure, quality = _fluid.Saturated(pressure).Quality(outlet.OutEnthalpy);
-        (double differential, double indicated) = _meter.Read(elapsed, Conditions.RawFeedFlow, outlet.Outflow, pressure, quality);
+        (double flow, double enthalpy, double pressure) = AtMeter();
+        double quality = _fluid.Saturated(pressure).Quality(enthalpy), shut = _channel.TimeShut;
+        (double differential, double indicated) = _meter.Read(elapsed, Conditions.RawFeedFlow, flow, pressure, quality, _channel.OutletPressure);
+        double shutShare = elapsed > 0 ? Math.Min(1, (shut - _timeShut) / elapsed) : 0;
+        _timeShut = shut;
         return new()
         {
             RawTime = _time,
             RawFeedFlow = Conditions.RawFeedFlow,
             RawAbsorbedHeat = _channel.AbsorbedHeat,
-            RawOutletFlow = outlet.Outflow,
+            RawOutletFlow = flow,
             RawTrueQuality = quality,
             RawIndicatedQuality = indicated,
             RawDifferential = differential,
-            RawOutletPressure = pressure,
+            RawOutletPressure = _channel.OutletPressure,
             RawInletPressure = _channel.InletPressure,
             RawHoldup = _channel.Mass,
             RawOnset = _channel.Onset,
-            RawOutletTemperature = OutletTemperature(outlet, pressure),
+            RawOutletTemperature = _fluid.At(pressure, enthalpy, _fluid.Saturated(pressure)).Temperature,
             RawHottestMetal = HottestMetal(),
+            RawValveShut = shutShare,
             MassResidual = _channel.MassResidual,
             EnergyResidual = _channel.EnergyResidual,
         };
     }
 
-    private double OutletTemperature(in Cell outlet, double pressure) => _fluid.At(pressure, outlet.OutEnthalpy, _fluid.Saturated(pressure)).Temperature;
+    // Flow, enthalpy and pressure where the meter stands: at the end of the outlet line, or of the last tube.
+    private (double Flow, double Enthalpy, double Pressure) AtMeter()
+    {
+        bool atTubeEnd = Pass.OutletLine is { IsMeterAtTubeEnd: true };
+        ReadOnlySpan<Cell> cells = _channel.Cells;
+        int i = cells.Length - 1;
+        while (atTubeEnd && cells[i].Duct == Pass.Sections.Count) i--;
+        double head = atTubeEnd ? cells[i].Head - cells[i].HalfLoss : 0;
+        return (cells[i].Outflow, cells[i].OutEnthalpy, _channel.EndPressure + head);
+    }
 
     private double HottestMetal()
     {

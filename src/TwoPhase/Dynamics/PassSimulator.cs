@@ -10,6 +10,8 @@ namespace TwoPhase.Dynamics;
 /// <remarks>
 /// <para>Mass, energy and metal energy in finite volumes along the pass, any slip model, flashing of the stored water included; the pressure
 /// along the pass follows the friction of the moment through a lag. Starts at rest. Deterministic; work per second is bounded.</para>
+/// <para>The outlet pressure is that at the outlet, or of the header behind the pass's <see cref="OutletLine"/>, which says whether a non-return
+/// valve stands there and at which of its ends the meter stands.</para>
 /// <para>Range: flow forwards everywhere, outlet pressure below the critical one. A run that stagnates or reverses ends there and says so.
 /// Not modelled: waves of sound, flow instability, a wall that dries out, a feed interchanger.</para>
 /// <para>Advisory only: it shows physics. It is no operating procedure and no safety function; those follow the plant's boiler and
@@ -20,7 +22,7 @@ public sealed partial class PassSimulator
     private readonly Channel<SurfaceFluid> _channel;
     private readonly MeterChain _meter;
     private readonly SurfaceFluid _fluid = new(SteamSurface.Default);
-    private double _time;
+    private double _time, _timeShut;
 
     /// <summary>A pass at rest.</summary>
     /// <param name="pass">The pass; its meter stands at the outlet unless the options name another.</param>
@@ -36,7 +38,7 @@ public sealed partial class PassSimulator
         if (pass.Ducts.Length == 0) throw new ArgumentException($"Pass '{pass.Name}' has no section: its simulation needs its tubes.", nameof(pass));
         if (pass.Interchanger is not null) throw new ArgumentException($"Pass '{pass.Name}' has a feed interchanger, which the simulator does not model.", nameof(pass));
         Check(initial, nameof(initial));
-        _channel = new(_fluid, pass.Ducts, Options.Models, Options.Cells) { MetalStores = Options.MetalStoresHeat, HeadLag = Options.RawPressureLag, HeatLags = Options.HeatLags };
+        _channel = new(_fluid, pass.Ducts, Options.Models, Options.Cells) { MetalStores = Options.MetalStoresHeat, HeadLag = Options.RawPressureLag, HeatLags = Options.HeatLags, HasNonReturnValve = pass.OutletLine is { HasNonReturnValve: true } };
         _meter = new(Options.Meter ?? pass.Meter, Options.Lags);
         Conditions = initial;
         Rest(initial);

@@ -13,15 +13,26 @@ internal sealed class OutletLineDocument
 
     public string? Volume { get; set; }
 
+    public bool? NonReturnValve { get; set; }
+
+    public bool? MeterAtTubeEnd { get; set; }
+
     public static OutletLineDocument? Of(OutletLine? line) => line is null ? null : new()
     {
         Bore = QuantityText.Millimetres(line.RawBore),
         LossCoefficient = line.LossCoefficient,
         Volume = QuantityText.Write(line.RawVolume, "m3", UnitKind.Volume, "m3"),
+        NonReturnValve = line.HasNonReturnValve ? true : null,
+        MeterAtTubeEnd = line.IsMeterAtTubeEnd ? true : null,
     };
 
-    public OutletLine Read(Place place) => new(
-        place.Member("bore").Length(Bore),
-        place.Member("lossCoefficient").Required(LossCoefficient),
-        UnitsNet.Volume.FromCubicMeters(place.Member("volume").Quantity(Volume, UnitKind.Volume)));
+    public OutletLine Read(Place place)
+    {
+        OutletLine line = new(
+            place.Member("bore").Length(Bore),
+            place.Member("lossCoefficient").Required(LossCoefficient),
+            UnitsNet.Volume.FromCubicMeters(place.Member("volume").Quantity(Volume, UnitKind.Volume)));
+        if (NonReturnValve == true) line = line.WithNonReturnValve();
+        return MeterAtTubeEnd == true ? line.WithMeterAtTubeEnd() : line;
+    }
 }

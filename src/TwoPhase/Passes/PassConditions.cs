@@ -10,7 +10,7 @@ public readonly record struct PassConditions
     /// <summary>Conditions with the feed given by its temperature.</summary>
     /// <param name="feedFlow">Feed flow of the pass, greater than zero.</param>
     /// <param name="feedTemperature">Feed temperature at the inlet of the pass; the feed is liquid.</param>
-    /// <param name="outletPressure">Absolute pressure at the end of the pass: behind the outlet line where there is one.</param>
+    /// <param name="outletPressure">Absolute pressure at the end of the pass: behind the outlet line where there is one, that of the header where the line ends there.</param>
     /// <param name="absorbedHeat">Heat absorbed by the pass, zero or more.</param>
     /// <exception cref="ArgumentOutOfRangeException">A value is outside its limits.</exception>
     public PassConditions(MassFlow feedFlow, Temperature feedTemperature, Pressure outletPressure, Power absorbedHeat)

@@ -98,7 +98,7 @@ public class GeometryJsonTests
     private static Gen<Pass> Passes() =>
         from count in Gen.Choose(1, 4)
         from sections in Gen.ArrayOf(Sections(), count)
-        from line in Gen.Elements<OutletLine?>(null, new OutletLine(Length.FromMillimeters(73.7), 3.3, Volume.FromCubicMeters(0.081)))
+        from line in Gen.Elements<OutletLine?>(null, new OutletLine(Length.FromMillimeters(73.7), 3.3, Volume.FromCubicMeters(0.081)), new OutletLine(Length.FromMillimeters(73.7), 3.3, Volume.FromCubicMeters(0.081)).WithNonReturnValve().WithMeterAtTubeEnd())
         from weights in Gen.ArrayOf(Gen.Choose(1, 97), count)
         select Made([.. sections.Select((make, i) => make(i.ToString(CultureInfo.InvariantCulture)))], line, weights);
 
