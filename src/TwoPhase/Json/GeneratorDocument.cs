@@ -5,7 +5,7 @@ using TwoPhase.Units;
 
 namespace TwoPhase.Json;
 
-/// <summary>A generator: its name, the site's basis, the tags that the passes share, and the passes.</summary>
+/// <summary>A generator: its name, the site's basis, the tags that the passes share, its fire, and the passes.</summary>
 internal sealed class GeneratorDocument
 {
     public string? Name { get; set; }
@@ -23,6 +23,8 @@ internal sealed class GeneratorDocument
 
     public Dictionary<string, string>? Tags { get; set; }
 
+    public FiringDocument? Firing { get; set; }
+
     public List<PassDocument>? Passes { get; set; }
 
     public static GeneratorDocument Of(SteamGenerator generator) => new()
@@ -30,6 +32,7 @@ internal sealed class GeneratorDocument
         Name = generator.Name,
         Site = SiteDocument.Of(generator.Basis),
         Tags = Names.Of(generator.Tags),
+        Firing = FiringDocument.Of(generator.Firing),
         Passes = [.. generator.Passes.Select(PassDocument.Of)],
     };
 
@@ -40,6 +43,7 @@ internal sealed class GeneratorDocument
         UnitBasis basis = Site?.Read(root.Member("site")) ?? UnitBasis.None;
         List<PassDocument> documents = root.Member("passes").Required(Passes);
         Pass[] passes = [.. documents.Select((document, i) => root.Member("passes").Item(i).Required(document).Read(root.Member("passes").Item(i), basis))];
-        return root.Member("passes").Make(() => new SteamGenerator(name, passes)).WithBasis(basis).WithTags(Names.Tags(Tags, TagSet.OfGenerator, basis, root.Member("tags")));
+        SteamGenerator generator = root.Member("passes").Make(() => new SteamGenerator(name, passes)).WithBasis(basis).WithTags(Names.Tags(Tags, TagSet.OfGenerator, basis, root.Member("tags")));
+        return Firing is null ? generator : generator.WithFiring(Firing.Read(root.Member("firing")));
     }
 }

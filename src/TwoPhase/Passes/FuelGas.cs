@@ -38,6 +38,9 @@ public sealed class FuelGas
 
     internal GasFigures Figures { get; }
 
+    /// <summary>J/m³ as it was given; null when it follows from the composition.</summary>
+    internal (double Value, HeatingBasis Basis)? Measured { get; private set; }
+
     /// <summary>Moles of oxygen that burn a mole of fuel.</summary>
     internal double OxygenNeed => Figures.Carbon + (Figures.Hydrogen / 4) + Figures.Sulphur - (Figures.Oxygen / 2);
 
@@ -66,7 +69,7 @@ public sealed class FuelGas
         double gross = (Require.Positive(value.Si(), "Heating value", Scale.MegajoulesPerCubicMetre, nameof(value)) / MolesPerVolume) + Beyond(basis);
         if (!(gross > WaterHeat)) throw Require.OutOfRange(value.Si(), "Gross heating value", Scale.MegajoulesPerCubicMetre, nameof(value), $"must exceed {Scale.MegajoulesPerCubicMetre.Text(WaterHeat * MolesPerVolume)}, the heat of its own water");
         var copy = (FuelGas)MemberwiseClone();
-        copy.RawGross = gross;
+        (copy.RawGross, copy.Measured) = (gross, (value.Si(), basis));
         return copy;
     }
 

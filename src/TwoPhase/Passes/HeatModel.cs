@@ -34,9 +34,10 @@ public sealed class HeatModel
         Fuel = Require.NotNull(fuel, nameof(fuel));
         FullFiring = fullFiring;
         Require.Positive(fullFiring.RawFuelFlow, "Fuel flow at full firing", Scale.CubicMetresPerSecond, nameof(fullFiring));
-        double share = convectiveShare.Si();
+        double share = RawConvectiveShare = convectiveShare.Si();
         if (share is not (> 0 and < 1)) throw Require.OutOfRange(share, "Convective share", Scale.None, nameof(convectiveShare), "must lie between 0 and 1");
-        RawShellLoss = Require.NotNegative(shellLoss.Si(), "Shell loss", Scale.None, nameof(shellLoss)) * fullFiring.RawFuelFlow * fuel.MolesPerVolume * fuel.RawNet;
+        RawShellShare = Require.NotNegative(shellLoss.Si(), "Shell loss", Scale.None, nameof(shellLoss));
+        RawShellLoss = RawShellShare * fullFiring.RawFuelFlow * fuel.MolesPerVolume * fuel.RawNet;
         FiredHeat full = Balance(fullFiring);
         if (full.RawAbsorbed <= 0) throw Require.OutOfRange(full.RawStackLoss + full.RawShellLoss, "Losses at full firing", Scale.Megawatts, nameof(fullFiring), $"must be below {Scale.Megawatts.Text(full.RawReleasedNet + full.RawAirHeat)}, the heat released");
         double radiant = (1 - share) * full.RawAbsorbed / full.RawReleasedNet;
@@ -55,6 +56,10 @@ public sealed class HeatModel
 
     /// <summary>The split law of your own; null for that of Orrok and Hudson.</summary>
     public Func<FiringConditions, Ratio>? Split { get; private set; }
+
+    internal double RawShellShare { get; }
+
+    internal double RawConvectiveShare { get; }
 
     private double RawShellLoss { get; }
 

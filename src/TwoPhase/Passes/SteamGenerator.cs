@@ -25,9 +25,21 @@ public sealed partial class SteamGenerator
     /// <summary>Its passes.</summary>
     public IReadOnlyList<Pass> Passes => _passes;
 
+    /// <summary>How its fire heats it; null unless given.</summary>
+    public HeatModel? Firing { get; private set; }
+
     /// <summary>The pass of a name; null when there is none.</summary>
     /// <param name="name">Name of the pass.</param>
     public Pass? Find(string name) => Array.Find(_passes, pass => pass.Name == name);
+
+    /// <summary>The generator with its fire.</summary>
+    /// <param name="model">From fuel and stack to absorbed heat.</param>
+    public SteamGenerator WithFiring(HeatModel model)
+    {
+        var copy = (SteamGenerator)MemberwiseClone();
+        copy.Firing = Require.NotNull(model, nameof(model));
+        return copy;
+    }
 
     /// <summary>The name.</summary>
     public override string ToString() => Name;

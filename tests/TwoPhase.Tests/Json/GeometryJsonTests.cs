@@ -47,6 +47,44 @@ public class GeometryJsonTests
     }
 
     [Fact]
+    public void Write_Firing_ReadsBackTheSame()
+    {
+        FuelGas fuel = new(new FuelShare(GasComponent.Methane, Ratio.FromPercent(96.1)), new FuelShare(GasComponent.IsoButane, Ratio.FromPercent(3.9)));
+        FiringConditions full = new FiringConditions(VolumeFlow.FromCubicMetersPerHour(2900.7), Ratio.FromPercent(3.1), Temperature.FromDegreesCelsius(191.3), Temperature.FromDegreesFahrenheit(51))
+            .WithAirHumidity(Ratio.FromPercent(0.7));
+        foreach (FuelGas gas in new[] { fuel, fuel.WithHeatingValue(EnergyDensity.FromMegajoulesPerCubicMeter(36.77), HeatingBasis.Net) })
+        {
+            var model = new HeatModel(gas, full, Ratio.FromPercent(1.1), Ratio.FromPercent(43));
+            string written = GeneratorJson.Write(new SteamGenerator("G", [new Pass("P", [])]).WithFiring(model));
+            SteamGenerator back = GeneratorJson.Read(written);
+            Assert.Equal(model.Burn(full), back.Firing!.Burn(back.Firing.FullFiring));
+            Assert.Equal(written, GeneratorJson.Write(back));
+            Assert.Throws<NotSupportedException>(() => GeneratorJson.Write(back.WithFiring(model.WithSplit(_ => Ratio.FromPercent(40)))));
+        }
+    }
+
+    [Theory]
+    [InlineData("\"methane\": 1", "\"methane\": 0.9", "$.firing.fuel", "must sum to 1")]
+    [InlineData("\"methane\": 1", "\"phlogiston\": 1", "$.firing.fuel.phlogiston", "'phlogiston' is none of methane")]
+    [InlineData("\"gross\"", "\"dry\"", "$.firing.heatingBasis", "'dry' is none of gross, net")]
+    [InlineData(", \"heatingBasis\": \"gross\"", "", "$.firing.heatingBasis", "is missing")]
+    [InlineData("\"heatingValue\": \"38 MJ/Sm3\", ", "", "$.firing.heatingValue", "is missing")]
+    [InlineData("\"excessOxygen\": 0.03", "\"excessOxygen\": 3", "$.firing", "Excess oxygen = 3 must be below")]
+    [InlineData("190 degC", "190 kPa", "$.firing.stackTemperature", "temperature")]
+    [InlineData("2900 Sm3/h", "2900 m3/h", "$.firing.fuelFlow", "standard gas volume")]
+    public void Read_FaultOfFiring_HasItsPath(string right, string wrong, string path, string why)
+    {
+        const string sample = """
+            { "name": "G", "passes": [{ "name": "P" }], "firing": { "fuel": { "methane": 1 }, "heatingValue": "38 MJ/Sm3", "heatingBasis": "gross", "fuelFlow": "2900 Sm3/h",
+              "excessOxygen": 0.03, "stackTemperature": "190 degC", "airTemperature": "15 degC", "shellLoss": 0.012, "convectiveShare": 0.41 } }
+            """;
+        Assert.NotNull(GeneratorJson.Read(sample).Firing);
+        DocumentException error = Assert.Throws<DocumentException>(() => GeneratorJson.Read(sample.Replace(right, wrong, StringComparison.Ordinal)));
+        Assert.Equal(path, error.Path);
+        Assert.Contains(why, error.Message, StringComparison.Ordinal);
+    }
+
+    [Fact]
     public void Write_MeterMeasuredColdAndCalibrated_ReadsBackTheSame()
     {
         CoefficientOfThermalExpansion steel = CoefficientOfThermalExpansion.FromPerKelvin(12e-6), austenitic = CoefficientOfThermalExpansion.FromPerKelvin(16e-6);

@@ -28,7 +28,7 @@ public partial class SchemaPageTests
     [Fact]
     public void Page_Names_AreAllThere()
     {
-        string[] names = [.. Members<HeatZone>(), .. Members<ConvergentFinish>(), .. Members<OrificeTappings>(), .. Members<PassSignal>(), .. Members<GeneratorSignal>()];
+        string[] names = [.. Members<HeatZone>(), .. Members<ConvergentFinish>(), .. Members<OrificeTappings>(), .. Members<PassSignal>(), .. Members<GeneratorSignal>(), .. Members<GasComponent>(), .. Members<HeatingBasis>()];
         foreach (string name in names) Assert.Contains($"`{name}`", Page, StringComparison.Ordinal);
         foreach (WetSteamModel model in WetSteamModel.All) Assert.Contains(model.Name, Page, StringComparison.Ordinal);
     }
