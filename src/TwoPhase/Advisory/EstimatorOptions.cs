@@ -13,7 +13,7 @@ public sealed class EstimatorOptions
     /// <summary>The defaults.</summary>
     public static EstimatorOptions Default { get; } = new();
 
-    /// <summary>The correlations of the shadow; null for the defaults.</summary>
+    /// <summary>The correlations of the shadow.</summary>
     public PassModels Models { get; private set; } = PassModels.Default;
 
     /// <summary>Cells of the shadow: 60. Its cost goes with the square.</summary>

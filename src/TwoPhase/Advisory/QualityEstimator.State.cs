@@ -22,7 +22,7 @@ public sealed partial class QualityEstimator
         _differential.Save(to);
         _heat.Save(to);
         _state.Save(to);
-        foreach (double number in (double[])[_heatInShadow, _learntHeat, _running, _coasting, _error, _motion, _laggedDifferential, _meterFactor, _gainVariance, _moved, _disagreesSince, _stir, _linger, _lastMoving, (double)_trust]) to.Add(number);
+        foreach (double number in (double[])[_heatInShadow, _learntHeat, _running, _error, _motion, _laggedDifferential, _meterFactor, _gainVariance, _moved, _disagreesSince, _stir, _linger, _lastMoving, (double)_trust]) to.Add(number);
         _shadow.Save(to);
         return new(to.ToArray());
     }
@@ -43,7 +43,7 @@ public sealed partial class QualityEstimator
         _differential.Load(from);
         _heat.Load(from);
         _state.Load(from);
-        (_heatInShadow, _learntHeat, _running, _coasting, _error, _motion) = (from.Next(), from.Next(), from.Next(), from.Next(), from.Next(), from.Next());
+        (_heatInShadow, _learntHeat, _running, _error, _motion) = (from.Next(), from.Next(), from.Next(), from.Next(), from.Next());
         (_laggedDifferential, _meterFactor, _gainVariance, _moved, _disagreesSince, _stir, _linger, _lastMoving) = (from.Next(), from.Next(), from.Next(), from.Next(), from.Next(), from.Next(), from.Next(), from.Next());
         _trust = (Trust)from.Next();
         _shadow.Load(from);

@@ -38,13 +38,13 @@ public sealed partial class QualityEstimator
     private const double TestSmoothing = 30;
 
     private readonly ShadowPass _shadow;
-    private readonly double _fullHeat, _meterUncertainty;
+    private readonly double _fullHeat;
     private readonly WarmUpMeans _warm = new();
     private InputTracker _flow = new(TestSmoothing, 0.5), _temperature = new(TemperatureSmoothing, 40), _pressure = new(PressureSmoothing, 1e6), _firing = new(0, 2), _differential = new(TestSmoothing, 1);
     private HeatTracker _heat;
     private OperatingStateFinder _state;
     private Clock _clock;
-    private double _heatInShadow, _learntHeat, _running, _coasting, _error, _motion, _laggedDifferential, _meterFactor, _gainVariance, _moved, _disagreesSince;
+    private double _heatInShadow, _learntHeat, _running, _error, _motion, _laggedDifferential, _meterFactor, _gainVariance, _moved, _disagreesSince;
     private Trust _trust;
     private QualityEstimate _last;
 
@@ -63,8 +63,8 @@ public sealed partial class QualityEstimator
         _shadow = new(pass, meter, Options.Models, Options.Cells);
         _fullHeat = pass.HeatAtFullFiring?.Si() ?? double.NaN;
         _heat = new(Options.RawDifferentialNoise, Options.RawHeatWander);
-        _meterUncertainty = MeterBudget.LogDifferential(meter, Options);
-        _gainVariance = _meterUncertainty * _meterUncertainty;
+        double uncertainty = MeterBudget.LogDifferential(meter, Options);
+        _gainVariance = uncertainty * uncertainty;
         _disagreesSince = double.NaN;
     }
 
@@ -168,14 +168,12 @@ public sealed partial class QualityEstimator
         bool measured = _differential.Silent(now) <= 0 && Fast.IsFinite(_laggedDifferential);
         if (measured) Learn(elapsed);
         else _heat.Coast(elapsed);
-        _coasting = measured ? 0 : _coasting + elapsed;
         Steer(elapsed);
     }
 
     private void Learn(double elapsed)
     {
-        double slope = _shadow.QualityByHeat / _shadow.QualityByDifferential;
-        _heat.Update(elapsed, _differential.Value - _meterFactor - _laggedDifferential, slope, _heatInShadow, 2 * _motion, Options.RawDisagreementLimit);
+        _heat.Update(elapsed, _differential.Value - _meterFactor - _laggedDifferential, DifferentialByHeat, _heatInShadow, 2 * _motion, Options.RawDisagreementLimit);
         if (double.IsNaN(_disagreesSince)) _heat.LearnBase(elapsed);
     }
 
@@ -208,7 +206,7 @@ public sealed partial class QualityEstimator
         double known = _heat.Base, learnt = _heat.Learnt;
         _heat.Start(factor, (noise * noise / readings) + 1e-8);
         if (!first && learnt > 0) _heat.KeepBase(known, learnt);
-        (_heatInShadow, _running, _coasting, _error, _motion, _stir, _linger) = (factor, 0, 0, 0, 0, 0, 0);
+        (_heatInShadow, _running, _error, _motion, _stir, _linger) = (factor, 0, 0, 0, 0, 0);
         _laggedDifferential = Math.Log(_shadow.Differential);
         (_moved, _lastMoving, _disagreesSince) = (double.NaN, double.NegativeInfinity, double.NaN);
     }

@@ -25,7 +25,7 @@ internal sealed class ShadowPass
     private readonly SurfaceFluid _fluid = new(SteamSurface.Default);
     private readonly Channel<SurfaceFluid> _channel;
     private readonly QualityMeter _meter;
-    private double _feedEnthalpy, _flow;
+    private double _flow;
 
     public ShadowPass(Pass pass, QualityMeter meter, PassModels models, int cells)
     {
@@ -54,9 +54,6 @@ internal sealed class ShadowPass
 
     /// <summary>M/ṁ [s], what the water takes from end to end.</summary>
     public double Residence => _channel.Mass / _flow;
-
-    /// <summary>Pressure at the inlet [Pa].</summary>
-    public double InletPressure => _channel.InletPressure;
 
     /// <summary>∂x/∂ln Q at rest: (hout − hfeed)/hfg.</summary>
     public double QualityByHeat { get; private set; }
@@ -116,7 +113,6 @@ internal sealed class ShadowPass
     {
         to.Add(Runs ? 1 : 0);
         to.Add(_flow);
-        to.Add(_feedEnthalpy);
         _channel.Save(to);
     }
 
@@ -124,7 +120,6 @@ internal sealed class ShadowPass
     {
         Runs = from.Next() == 1;
         _flow = from.Next();
-        _feedEnthalpy = from.Next();
         _channel.Load(from);
         if (Runs) Look();
     }
@@ -132,8 +127,7 @@ internal sealed class ShadowPass
     private void Impose(in ImposedInputs inputs, double inletPressure)
     {
         _flow = inputs.FeedFlow;
-        _feedEnthalpy = _fluid.LiquidEnthalpy(inletPressure, inputs.FeedTemperature);
-        (_channel.Heat, _channel.FeedEnthalpy) = (inputs.Heat, _feedEnthalpy);
+        (_channel.Heat, _channel.FeedEnthalpy) = (inputs.Heat, _fluid.LiquidEnthalpy(inletPressure, inputs.FeedTemperature));
     }
 
     private void Look()
@@ -141,7 +135,7 @@ internal sealed class ShadowPass
         SaturatedPair steam = _fluid.Saturated(_channel.OutletPressure);
         double enthalpy = _channel.Outlet.OutEnthalpy;
         Quality = steam.Quality(enthalpy);
-        QualityByHeat = (enthalpy - _feedEnthalpy) / steam.LatentHeat;
+        QualityByHeat = (enthalpy - _channel.FeedEnthalpy) / steam.LatentHeat;
         Differential = _meter.DifferentialOrNaN(OutletFlow, _channel.OutletPressure, Quality);
 
         // A meter that would choke has no differential; its slope is then kept.
