@@ -1,0 +1,146 @@
+using System.Diagnostics;
+using System.Net;
+using System.Text.Json;
+using LivePasses.Live;
+using LivePasses.Mqtt;
+using LivePasses.Plant;
+using Microsoft.Extensions.Logging.Abstractions;
+using MQTTnet;
+using MQTTnet.Server;
+
+namespace LivePasses.Tests;
+
+/// <summary>The service against brokers that come and go, kills, and long runs.</summary>
+public class ServiceTests
+{
+    [Fact]
+    public async Task Estimates_AreRetainedWithTheirUnits()
+    {
+        await using Rig rig = await Rig.Start(Rig.Usual(0));
+        await Rig.Until(() => Known(rig), "a known quality");
+        await Task.Delay(1500);
+        var arrived = new TaskCompletionSource<MqttApplicationMessage>();
+        using IMqttClient client = new MqttClientFactory().CreateMqttClient();
+        client.ApplicationMessageReceivedAsync += message =>
+        {
+            arrived.TrySetResult(message.ApplicationMessage);
+            return Task.CompletedTask;
+        };
+        await client.ConnectAsync(new MqttClientOptionsBuilder().WithTcpServer(rig.Settings.Broker.Host, rig.Settings.Broker.Port).Build());
+        await client.SubscribeAsync(rig.Settings.Topics.Estimate("Pass 1"));
+        MqttApplicationMessage estimate = await arrived.Task.WaitAsync(TimeSpan.FromSeconds(10));
+        using var document = JsonDocument.Parse(estimate.Payload.First);
+        Assert.True(estimate.Retain);
+        Assert.InRange(document.RootElement.GetProperty("quality").GetProperty("value").GetDouble(), 0.6, 0.9);
+        Assert.Equal("kg/kg", document.RootElement.GetProperty("quality").GetProperty("unit").GetString());
+        foreach (JsonProperty member in document.RootElement.EnumerateObject())
+        {
+            Assert.NotEqual(JsonValueKind.Number, member.Value.ValueKind);   // no number without its unit
+        }
+    }
+
+    [Fact]
+    public async Task Broker_Restarted_ServiceGoesOn()
+    {
+        LiveSettings settings = Rig.Usual(0) with { HasOwnBroker = false };
+        MqttServer broker = await Broker(settings);
+        await using Rig rig = await Rig.Start(settings);
+        await Rig.Until(() => Known(rig), "a known quality");
+        await broker.StopAsync();
+        broker.Dispose();
+        await Rig.Until(() => !rig.Part<TagLink>().Look().Connected, "the loss of the broker");
+        await Rig.Until(() => !Known(rig), "nothing known without tags", 30);
+        using MqttServer again = await Broker(settings);
+        await Rig.Until(() => rig.Part<TagLink>().Look().Connected && Known(rig), "a known quality again");
+    }
+
+    [Fact]
+    public async Task Service_Killed_GoesOnWithoutABump()
+    {
+        // The plant and its broker live on; the service is a process of its own that is killed and started again.
+        LiveSettings settings = Rig.Usual(20) with { HasOwnBroker = false };
+        using MqttServer broker = await Broker(settings);
+        var silent = new PassWatch(settings, NullLogger<PassWatch>.Instance);
+        using var plant = new SimulatedPlant(settings, silent);
+        await plant.StartAsync(CancellationToken.None);
+        using HttpClient client = new() { BaseAddress = new Uri($"http://{settings.Listen}/") };
+
+        using Process first = Start(settings);
+        await Rig.Until(() => QualityOf(client) is not null, "a known quality");
+        await Task.Delay(6000);   // a state is saved every five seconds
+        double before = QualityOf(client)!.Value;
+        first.Kill(entireProcessTree: true);
+        await first.WaitForExitAsync();
+        Assert.True(File.Exists(settings.StateFile));
+
+        using Process second = Start(settings);
+        await Rig.Until(() => QualityOf(client) is not null, "a known quality again", 20);
+        double after = QualityOf(client)!.Value;
+        second.Kill(entireProcessTree: true);
+
+        // One that knew nothing would need a minute of plant time at least and begin with the reading of that minute.
+        Assert.Equal(before, after, 0.005);
+        await plant.StopAsync(CancellationToken.None);
+    }
+
+    [Fact]
+    public async Task State_OfAnotherGenerator_IsRefusedAndTheServiceStarts()
+    {
+        LiveSettings settings = Rig.Usual(0);
+        await File.WriteAllTextAsync(settings.StateFile, """{"generator":"another","time":null,"passes":[]}""");
+        await using Rig rig = await Rig.Start(settings);
+        await Rig.Until(() => Known(rig), "a known quality");
+    }
+
+    [Fact]
+    public async Task Day_AtHighSpeed_NeedsNoMoreMemoryThanItsFirstHours()
+    {
+        const int sampling = 5;
+        await using Rig rig = await Rig.Start(Rig.Usual(0) with { PlantSampling = sampling });
+        PassWatch watch = rig.Part<PassWatch>();
+        await Rig.Until(() => watch.Time is not null, "a first reading");
+        DateTimeOffset begin = watch.Time!.Value;
+        await Rig.Until(() => watch.Time > begin.AddHours(2), "two hours of plant time", 300);
+        long early = GC.GetTotalMemory(forceFullCollection: true);
+        await Rig.Until(() => watch.Time > begin.AddHours(24), "a day of plant time", 900);
+        long late = GC.GetTotalMemory(forceFullCollection: true);
+        Assert.True(late < early + 2_000_000, $"{early} bytes after two hours, {late} after a day");
+        LinkView link = rig.Part<TagLink>().Look();
+        Assert.Equal(0, link.MessagesRefused);
+        Assert.True(link.MessagesRead > 20L * 86_000 / sampling, $"{link.MessagesRead} messages read");
+    }
+
+    private static bool Known(Rig rig) => rig.Part<PassWatch>().Look(rig.Part<PassWatch>().NothingSeen()).Passes.All(static pass => pass.Quality.Value is not null);
+
+    private static async Task<MqttServer> Broker(LiveSettings settings)
+    {
+        MqttServer broker = new MqttServerFactory().CreateMqttServer(new MqttServerOptionsBuilder().WithDefaultEndpoint().WithDefaultEndpointBoundIPAddress(IPAddress.Loopback).WithDefaultEndpointBoundIPV6Address(IPAddress.None).WithDefaultEndpointPort(settings.Broker.Port).Build());
+        await broker.StartAsync();
+        return broker;
+    }
+
+    private static double? QualityOf(HttpClient client)
+    {
+        try
+        {
+            using var document = JsonDocument.Parse(client.GetStringAsync(new Uri("passes", UriKind.Relative)).GetAwaiter().GetResult());
+            JsonElement value = document.RootElement.GetProperty("passes")[0].GetProperty("quality").GetProperty("value");
+            return value.ValueKind == JsonValueKind.Null ? null : value.GetDouble();
+        }
+        catch (HttpRequestException)
+        {
+            return null;
+        }
+    }
+
+    private static Process Start(LiveSettings settings)
+    {
+        string program = Path.Combine(AppContext.BaseDirectory, "LivePasses.dll");
+        var start = new ProcessStartInfo("dotnet") { RedirectStandardOutput = true };
+        foreach (string word in (string[])[program, "--broker", $"{settings.Broker.Host}:{settings.Broker.Port}", "--listen", settings.Listen.ToString(), "--topic", settings.Topics.Prefix, "--state", Path.GetDirectoryName(settings.StateFile)!]) start.ArgumentList.Add(word);
+        var process = Process.Start(start)!;
+        process.OutputDataReceived += static (_, _) => { };
+        process.BeginOutputReadLine();
+        return process;
+    }
+}
