@@ -16,8 +16,8 @@ internal sealed class SimulatedPlant : BackgroundService
     private const int Seed = 20310309;
     private const double Atmosphere = 93e3, Span = 75e3;
 
-    // How far it may run ahead of the estimates.
-    private static readonly TimeSpan Lead = TimeSpan.FromSeconds(20), Look = TimeSpan.FromMilliseconds(20);
+    // How far it may run ahead of the estimates, how often it looks, and how long it waits for them.
+    private static readonly TimeSpan Lead = TimeSpan.FromSeconds(20), Look = TimeSpan.FromMilliseconds(20), Patience = TimeSpan.FromSeconds(1);
 
     private readonly LiveSettings _settings;
     private readonly PassWatch _watch;
@@ -65,8 +65,11 @@ internal sealed class SimulatedPlant : BackgroundService
 
     private async Task Wait(int second, DateTimeOffset time, Stopwatch clock, CancellationToken cancellation)
     {
-        bool paced = _settings.Speed > 0;
-        while (!_connection.Client.IsConnected || (paced ? clock.Elapsed.TotalSeconds * _settings.Speed < second : time - _watch.Time > Lead)) await Task.Delay(Look, cancellation);
+        while (!_connection.Client.IsConnected || clock.Elapsed.TotalSeconds * _settings.Speed < second * Math.Sign(_settings.Speed)) await Task.Delay(Look, cancellation);
+
+        // As fast as can be followed; what was lost with a broker is not waited for.
+        var waiting = Stopwatch.StartNew();
+        while (_settings.Speed == 0 && time - _watch.Time > Lead && waiting.Elapsed < Patience) await Task.Delay(Look, cancellation);
     }
 
     private async Task Publish(PassInstant[] instants, int second, DateTimeOffset time, CancellationToken cancellation)
