@@ -1,3 +1,5 @@
+using TwoPhase.Numerics;
+
 namespace TwoPhase.Dynamics;
 
 /// <summary>
@@ -41,7 +43,7 @@ internal struct BentProfile
 
     private readonly double PartAbove(double held, out double rate)
     {
-        double a = (Above - Below) / (2 * Spread), c = held + (Below * Spread / 2), root = Math.Sqrt((Below * Below) + (4 * a * c));
+        double a = (Above - Below) / (2 * Spread), c = held + (Below * Spread / 2), root = Fast.Sqrt((Below * Below) + (4 * a * c));
         rate = 1 / root;
         return 2 * c / (Below + root);
     }

@@ -8,14 +8,17 @@ internal struct Cell
     /// <summary>Section that it belongs to.</summary>
     public int Duct;
 
-    /// <summary>Water-side volume [m³], and that of the pass up to the inlet face.</summary>
-    public double Volume, VolumeBefore;
+    /// <summary>Water-side volume [m³].</summary>
+    public double Volume;
 
     /// <summary>Length along the flow path [m], and distance of the inlet face from the inlet of the pass.</summary>
     public double Length, Start;
 
-    /// <summary>Flow area of all parallel tubes [m²], and their inside surface [m²].</summary>
-    public double Area, Surface;
+    /// <summary>One over the flow area of all parallel tubes [1/m²], and their inside surface [m²].</summary>
+    public double PerArea, Surface;
+
+    /// <summary>One over the volume from its middle to that of the next cell [1/m³]; of the last one, over its own volume.</summary>
+    public double PerSpacing;
 
     /// <summary>Heat capacity of its metal [J/K].</summary>
     public double Capacity;
@@ -29,8 +32,8 @@ internal struct Cell
     /// <summary>Temperature of its metal [K].</summary>
     public double Wall;
 
-    /// <summary>Film conductance between metal and water [W/K].</summary>
-    public double Conductance;
+    /// <summary>Film resistance between metal and water [K/W], 0 where the metal follows the water; and the share of a departure from rest that the metal loses in a step.</summary>
+    public double FilmResistance, Decay;
 
     /// <summary>What the phase that it holds alone, or in part, carries heat with, and the enthalpy at which that was found [J/kg].</summary>
     public PhaseTransport Phase;
@@ -40,8 +43,8 @@ internal struct Cell
     /// <summary>Pressure over that at the outlet [Pa], and where friction, weight and acceleration would have it now.</summary>
     public double Head, HeadTarget;
 
-    /// <summary>By how much its pressure over that at the outlet changes in this inner step [Pa], and its pressure changed in the last [Pa/s].</summary>
-    public double HeadChange, PressureRate;
+    /// <summary>How fast its pressure changed in the last inner step [Pa/s].</summary>
+    public double PressureRate;
 
     /// <summary>Loss from its middle to that of the next, or to the outlet [Pa], the outflow at which that was found [kg/s], and the loss of half of it per outflow [Pa·s/kg].</summary>
     public double Drop, DropFlow, Resistance;
@@ -52,11 +55,14 @@ internal struct Cell
     /// <summary>Mass that it lets go per pressure [kg/Pa], and what comes out of it for each kilogram that comes in.</summary>
     public double Store, Swelling;
 
-    /// <summary>How its outflow will follow: change [kg/s] at head zero, and less for each pascal of head.</summary>
-    public double Follow, FollowHead;
+    /// <summary>How its outflow will follow: change [kg/s] at head zero, and less for each pascal of head, both over a common divisor.</summary>
+    public double Follow, FollowHead, FollowOver;
 
     /// <summary>Both phases at its pressure.</summary>
     public SaturatedPair Steam;
+
+    /// <summary>One over the mass that it held at the start of the step [1/kg].</summary>
+    public double PerMass;
 
     /// <summary>Specific enthalpy of what it holds, and of what flows, at its middle [J/kg].</summary>
     public double HeldEnthalpy, FlowEnthalpy;
@@ -67,8 +73,8 @@ internal struct Cell
     /// <summary>Flowing quality where it holds both phases, else 0 or 1, and void fraction.</summary>
     public double FlowQuality, VoidFraction;
 
-    /// <summary>∂α/∂x of the slip model, 0 where not known, and the flowing quality that it was found at.</summary>
-    public double VoidByQuality, SlopeQuality;
+    /// <summary>∂x/∂α of the slip model, 0 where not known, and the flowing quality that it was found at.</summary>
+    public double QualityByVoid, SlopeQuality;
 
     /// <summary>∂h flowing / ∂h held: what turns the speed of mass into that of an enthalpy wave.</summary>
     public double WaveFactor;
@@ -78,8 +84,11 @@ internal struct Cell
 
     public BentProfile Profile;
 
-    /// <summary>Temperature of the water [K], and of one phase alone v [m³/kg] and (∂v/∂h)p [m³/J].</summary>
-    public double Temperature, SinglePhaseVolume, SinglePhaseExpansion;
+    /// <summary>Temperature of the water [K]; where a boundary stands (∂v/∂h)p of the part with one phase [m³/J].</summary>
+    public double Temperature, SinglePhaseExpansion;
+
+    /// <summary>a [m³/kg] and b [m³/J] of V = a M + b H, where no boundary stands.</summary>
+    public double VolumeByMass, VolumeByEnthalpy;
 
     /// <summary>Mass flow over the outlet face [kg/s] and the enthalpy that it carries [J/kg].</summary>
     public double Outflow, OutEnthalpy;
@@ -90,8 +99,8 @@ internal struct Cell
     /// <summary>Enthalpy of saturation at its boundary [J/kg]; without any, that of liquid.</summary>
     public readonly double BoundaryEnthalpy => Boundary == Boundary.Dew ? Steam.VapourEnthalpy : Steam.LiquidEnthalpy;
 
-    public readonly double MassFlux => Outflow / Area;
+    public readonly double MassFlux => Outflow * PerArea;
 
     /// <summary>Where its metal comes to rest with a heat from the fire [K].</summary>
-    public readonly double RestingWall(double fire) => Conductance > 0 ? Temperature + (fire / Conductance) : Temperature;
+    public readonly double RestingWall(double fire) => Temperature + (fire * FilmResistance);
 }

@@ -11,13 +11,13 @@ internal sealed partial class Channel<TFluid>
     private static double SpreadOf(in Cell cell, double step)
     {
         double wanted = Math.Abs(cell.Slope);
-        return cell.Boundary == Boundary.None ? wanted : cell.Spread + (Math.Min(1, step * cell.Outflow / cell.Mass) * (wanted - cell.Spread));
+        return cell.Boundary == Boundary.None ? wanted : cell.Spread + (Math.Min(1, step * cell.Outflow * cell.PerMass) * (wanted - cell.Spread));
     }
 
     private void FindBoundary(ref Cell cell)
     {
         cell.Boundary = Boundary.None;
-        SaturatedPair steam = cell.Steam;
+        ref readonly SaturatedPair steam = ref cell.Steam;
         double spread = cell.Spread, boiling = cell.HeldEnthalpy - steam.LiquidEnthalpy, dew = cell.HeldEnthalpy - steam.VapourEnthalpy;
         if (boiling > -spread / 2 && boiling < 2 * spread) Place(ref cell, Boundary.Boiling, new() { Spread = spread, Below = 1, Above = HeldByFlow(cell, Boundary.Boiling, spread) }, boiling);
         else if (dew < spread / 2 && dew > -2 * spread) Place(ref cell, Boundary.Dew, new() { Spread = spread, Below = HeldByFlow(cell, Boundary.Dew, spread), Above = 1 }, dew);
@@ -33,12 +33,12 @@ internal sealed partial class Channel<TFluid>
     // ∂h held / ∂h flowing beside a boundary: the chord to the middle of the wet part as the last step left it.
     private double HeldByFlow(in Cell cell, Boundary boundary, double spread)
     {
-        SaturatedPair steam = cell.Steam;
+        ref readonly SaturatedPair steam = ref cell.Steam;
         bool boils = boundary == Boundary.Boiling;
         double part = boils ? cell.FlowEnthalpy - steam.LiquidEnthalpy : steam.VapourEnthalpy - cell.FlowEnthalpy;
         double middle = part > spread / 2 ? part : Math.Max(part + (spread / 2), spread / 50) / 2;
         double share = middle / steam.LatentHeat, x = boils ? share : 1 - share;
-        double q = HeldQuality(steam, _models.Slip.VoidFractionCore(FlowOf(cell) with { Quality = x }));
+        double q = HeldQuality(steam, _models.Slip.VoidFractionCore(FlowOf(cell, x)));
         return boils ? q / x : (1 - q) / share;
     }
 
@@ -47,7 +47,7 @@ internal sealed partial class Channel<TFluid>
     // Temperature, expansion of the single-phase part and speed of waves: means over both parts.
     private void MeetBoundary(ref Cell cell)
     {
-        SaturatedPair steam = cell.Steam;
+        ref readonly SaturatedPair steam = ref cell.Steam;
         bool boils = cell.Boundary == Boundary.Boiling;
         double saturated = cell.BoundaryEnthalpy, sign = boils ? -1 : 1, single = Math.Max(1, sign * (cell.FlowEnthalpy - saturated) + (cell.Profile.Spread / 2)) / 2;
         FluidPoint point = _fluid.At(steam.Pressure, saturated + (sign * single), steam);
@@ -58,7 +58,7 @@ internal sealed partial class Channel<TFluid>
         cell.Temperature = steam.Temperature + (heating * (boils ? held - over : over));
         double quality = steam.Quality(cell.FlowEnthalpy), share = ShareThatBoils(cell);
         cell.FlowQuality = Math.Min(1, Math.Max(0, quality));
-        cell.VoidByQuality = 0;
+        cell.QualityByVoid = 0;
         cell.WaveFactor = 1 / ((1 - share) + (share * (boils ? cell.Profile.Above : cell.Profile.Below)));
     }
 

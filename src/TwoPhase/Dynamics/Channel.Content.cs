@@ -9,66 +9,63 @@ internal sealed partial class Channel<TFluid>
     // Nearer to saturation than this the tangent stands for the chord [J/kg].
     private const double Beside = 1e3;
 
-    private void Decompose(double step, double outletPressure)
+    private void Decompose(double step)
     {
-        for (int i = 0; i < _cells.Length; i++)
+        double perStep = 1 / step;
+        foreach (ref Cell cell in _cells.AsSpan())
         {
-            ref Cell cell = ref _cells[i];
-            cell.Head += cell.HeadChange;
-            double pressure = outletPressure + cell.Head;
-            cell.PressureRate = (pressure - cell.Steam.Pressure) / step;
-            cell.Steam = _fluid.Saturated(pressure);
-            cell.HeldEnthalpy = (cell.Energy + (pressure * cell.Volume)) / cell.Mass;
             cell.Spread = SpreadOf(cell, step);
             Decompose(ref cell);
-            Warm(ref cell, step);
+            Warm(ref cell, perStep);
         }
     }
 
     private void Decompose(ref Cell cell)
     {
         FindBoundary(ref cell);
-        double saturated = cell.BoundaryEnthalpy, quality = cell.Steam.Quality(cell.HeldEnthalpy);
         if (cell.Boundary != Boundary.None)
         {
+            double saturated = cell.BoundaryEnthalpy;
             cell.FlowEnthalpy = saturated + cell.Profile.Flow(cell.HeldEnthalpy - saturated);
             MeetBoundary(ref cell);
         }
-        else if (quality > 0 && quality < 1)
+        else if (cell.HeldEnthalpy > cell.Steam.LiquidEnthalpy && cell.HeldEnthalpy < cell.Steam.VapourEnthalpy)
         {
             cell.Temperature = cell.Steam.Temperature;
-            Part(ref cell, quality);
+            Part(ref cell);
         }
         else
         {
             cell.FlowEnthalpy = cell.HeldEnthalpy;
-            BeSinglePhase(ref cell, quality);
+            BeSinglePhase(ref cell);
         }
     }
 
-    private void BeSinglePhase(ref Cell cell, double quality)
+    private void BeSinglePhase(ref Cell cell)
     {
         FluidPoint point = _fluid.At(cell.Steam.Pressure, cell.HeldEnthalpy, cell.Steam);
-        (cell.Temperature, cell.SinglePhaseVolume, cell.SinglePhaseExpansion) = (point.Temperature, point.SpecificVolume, point.VolumeByEnthalpy);
-        cell.FlowQuality = quality <= 0 ? 0 : 1;
-        cell.VoidByQuality = 0;
+        cell.Temperature = point.Temperature;
+        (cell.VolumeByMass, cell.VolumeByEnthalpy) = (point.SpecificVolume - (point.VolumeByEnthalpy * cell.HeldEnthalpy), point.VolumeByEnthalpy);
+        cell.FlowQuality = cell.HeldEnthalpy <= cell.Steam.LiquidEnthalpy ? 0 : 1;
+        cell.QualityByVoid = 0;
         cell.WaveFactor = 1;
     }
 
-    private FlowState FlowOf(in Cell cell)
+    private FlowState FlowOf(in Cell cell, double quality)
     {
         ref readonly Duct duct = ref _ducts[cell.Duct];
+        double perVolumes = 1 / (cell.Steam.LiquidVolume * cell.Steam.VapourVolume);
         return new()
         {
             Pressure = cell.Steam.Pressure,
             SaturationTemperature = cell.Steam.Temperature,
-            LiquidDensity = 1 / cell.Steam.LiquidVolume,
-            VapourDensity = 1 / cell.Steam.VapourVolume,
+            LiquidDensity = cell.Steam.VapourVolume * perVolumes,
+            VapourDensity = cell.Steam.LiquidVolume * perVolumes,
             LiquidViscosity = cell.Steam.LiquidViscosity,
             VapourViscosity = cell.Steam.VapourViscosity,
             LatentHeat = cell.Steam.LatentHeat,
             SurfaceTension = cell.Steam.SurfaceTension,
-            Quality = cell.FlowQuality,
+            Quality = quality,
             MassFlux = cell.MassFlux,
             Bore = duct.Bore,
             Inclination = duct.Inclination,

@@ -10,8 +10,10 @@ internal sealed partial class Channel<TFluid>
     {
         foreach (ref Cell cell in _cells.AsSpan())
         {
-            if (cell.Surface > 0) cell.Conductance = cell.Surface * Film(ref cell);
+            if (cell.Surface > 0) cell.FilmResistance = 1 / (cell.Surface * Film(ref cell));
         }
+
+        _decayStep = double.NaN;
     }
 
     // Resistances, not films, are what a cell that boils in part has the mean of: it lets go its metal's heat evenly as the boundary walks.
@@ -26,7 +28,7 @@ internal sealed partial class Channel<TFluid>
     }
 
     private double BoilingFilm(in Cell cell, double enthalpy, double flux) =>
-        _fluid.Film(FlowOf(cell) with { Quality = cell.Steam.Quality(enthalpy) }, _models.Film, flux);
+        _fluid.Film(FlowOf(cell, cell.Steam.Quality(enthalpy)), _models.Film, flux);
 
     private double SinglePhaseFilm(ref Cell cell, double enthalpy)
     {

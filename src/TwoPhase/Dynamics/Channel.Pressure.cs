@@ -8,6 +8,9 @@ internal sealed partial class Channel<TFluid>
     // Share of the pressure over which a difference stands for the slope along saturation.
     private const double Probe = 1e-4;
 
+    // A common divisor that has grown beyond this is divided out.
+    private const double Huge = 1e100;
+
     // Losses of the moment, from the outlet up, and how they and the store of each cell answer to a change.
     private void AimPressure(double outletPressure)
     {
@@ -41,30 +44,46 @@ internal sealed partial class Channel<TFluid>
     // boiling water lets go more mass for a pressure than flows within the lag. With T the head aimed at and H the head that is:
     //   w(i) = w before(i) + g (w(i−1) − w before(i−1)) − K (ṗ − ṗ before),  ṗ = ṗ outlet + s (T(i) − H(i))/Δt,
     //   T(i−1) = T(i) + drop(i−1) + r(i−1) w(i−1) + r(i) w(i);
-    // s share of the way that the lag leaves open, K store, g swelling, r resistance. Eliminated downstream as w = a − b T, solved upstream.
-    private void ForeseePressure(double step, double feedFlow, double outletRate)
+    // s share of the way that the lag leaves open, K store, g swelling, r resistance. Eliminated downstream as w = (a − b T)/over, which spares each
+    // cell the wait for a division of the one before; solved upstream.
+    private void ForeseeFlow(double step, double feedFlow, double outletRate)
     {
-        double reach = HeadLag > 0 ? 1 - Math.Exp(-step / HeadLag) : 1, a = feedFlow - _lastFeed, b = 0, drop = 0, resistance = 0, before = 0;
+        double perStep = Reach(step) / step, a = feedFlow - _lastFeed, b = 0, over = 1, drop = 0, resistance = 0, before = 0;
         for (int i = 0; i < _cells.Length; i++)
         {
             ref Cell cell = ref _cells[i];
-            double pull = cell.Store * reach / step, r = cell.Resistance, now = cell.Outflow - cell.DropFlow;
-            double q = cell.Swelling / (1 + (b * resistance)), scale = 1 / (1 + (q * b * r));
-            a = ((q * (a - (b * drop))) - (cell.Swelling * before) + now + (pull * cell.Head) + (cell.Store * (cell.PressureRate - outletRate))) * scale;
-            b = ((q * b) + pull) * scale;
-            (cell.Follow, cell.FollowHead) = (a, b);
+            double pull = cell.Store * perStep, g = cell.Swelling, r = cell.Resistance, now = cell.Outflow - cell.DropFlow;
+            double own = now - (g * before) + (pull * cell.Head) + (cell.Store * (cell.PressureRate - outletRate));
+            double less = over + (b * resistance);
+            a = (g * (a - (b * drop))) + (own * less);
+            over = less + (g * r * b);
+            b = (g * b) + (pull * less);
+            (cell.Follow, cell.FollowHead, cell.FollowOver) = (a, b, over);
             (drop, resistance, before) = (cell.Drop, r, now);
+            if (over > Huge) (a, b, over) = (a / over, b / over, 1);
         }
+    }
 
-        double head = 0, push = 0;
+    // The heads that belong to it, upstream; and what each cell is and holds at its new pressure.
+    private void MovePressure(double step, double outletPressure)
+    {
+        double reach = Reach(step), perStep = 1 / step, head = 0, passed = 0;
         for (int i = _cells.Length - 1; i >= 0; i--)
         {
             ref Cell cell = ref _cells[i];
-            head = (head + cell.Drop + push + (cell.Resistance * cell.Follow)) / (1 + (cell.Resistance * cell.FollowHead));
-            push = cell.Resistance * (cell.Follow - (cell.FollowHead * head));
-            cell.HeadChange = reach * (head - cell.Head);
+            double r = cell.Resistance / cell.FollowOver, lost = r * cell.Follow, lostByHead = r * cell.FollowHead;
+            head = (passed + (cell.Drop + lost)) * (1 / (1 + lostByHead));
+            passed = lost + ((1 - lostByHead) * head);
+            cell.Head += reach * (head - cell.Head);
+            double pressure = outletPressure + cell.Head;
+            cell.PressureRate = (pressure - cell.Steam.Pressure) * perStep;
+            cell.Steam = _fluid.Saturated(pressure);
+            cell.PerMass = 1 / cell.Mass;
+            cell.HeldEnthalpy = (cell.Energy + (pressure * cell.Volume)) * cell.PerMass;
         }
     }
+
+    private double Reach(double step) => HeadLag > 0 ? 1 - Math.Exp(-step / HeadLag) : 1;
 
     // Where both phases are: mass that a cell lets go for each pascal that its pressure falls, and what swells out of it for each kilogram that comes in.
     private (double Store, double Swelling) StoreOf(in Cell cell, double inEnthalpy)

@@ -20,7 +20,7 @@ internal sealed partial class Channel<TFluid>
             cell.Head = 0;
             face += cell.HeatShare * Heat / feedFlow;
             (cell.Outflow, cell.OutEnthalpy, cell.HeatToWater) = (feedFlow, face, cell.HeatShare * Heat);
-            cell.Spread = cell.Slope = Rise(cell, feedFlow);
+            cell.Spread = cell.Slope = cell.HeatToWater / feedFlow;
             cell.FlowEnthalpy = face - (cell.Slope / 2);
         }
 
@@ -58,7 +58,7 @@ internal sealed partial class Channel<TFluid>
     {
         cell.Steam = _fluid.Saturated(pressure);
         cell.PressureRate = 0;
-        SaturatedPair steam = cell.Steam;
+        ref readonly SaturatedPair steam = ref cell.Steam;
         double quality = steam.Quality(cell.FlowEnthalpy), half = Math.Abs(cell.Slope) / 2;
         cell.Boundary = Math.Abs(cell.FlowEnthalpy - steam.LiquidEnthalpy) < half ? Boundary.Boiling : Math.Abs(cell.FlowEnthalpy - steam.VapourEnthalpy) < half ? Boundary.Dew : Boundary.None;
         cell.FlowQuality = Math.Min(1, Math.Max(0, quality));
@@ -71,21 +71,22 @@ internal sealed partial class Channel<TFluid>
         }
         else if (quality > 0 && quality < 1)
         {
-            FlowState flow = FlowOf(cell);
-            double alpha = _models.Slip.VoidFractionCore(flow), mixture = 1 / ((alpha / steam.VapourVolume) + ((1 - alpha) / steam.LiquidVolume));
+            FlowState flow = FlowOf(cell, quality);
+            double alpha = _models.Slip.VoidFractionCore(flow), perMixture = (alpha / steam.VapourVolume) + ((1 - alpha) / steam.LiquidVolume);
             cell.HeldEnthalpy = steam.LiquidEnthalpy + (HeldQuality(steam, alpha) * steam.LatentHeat);
-            (cell.VoidFraction, cell.VoidByQuality, cell.SlopeQuality) = (alpha, SlopeAt(flow, quality, alpha), quality);
-            cell.WaveFactor = WaveFactorOf(steam, mixture, cell.VoidByQuality);
+            (cell.VoidFraction, cell.QualityByVoid, cell.SlopeQuality) = (alpha, QualityByVoidAt(flow, quality, alpha), quality);
+            cell.WaveFactor = WaveFactorOf(steam, perMixture, cell.QualityByVoid);
+            cell.VolumeByEnthalpy = (steam.VapourVolume - steam.LiquidVolume) / steam.LatentHeat;
+            cell.VolumeByMass = steam.LiquidVolume - (cell.VolumeByEnthalpy * steam.LiquidEnthalpy);
             cell.Temperature = steam.Temperature;
         }
         else
         {
             cell.HeldEnthalpy = cell.FlowEnthalpy;
-            BeSinglePhase(ref cell, quality);
+            BeSinglePhase(ref cell);
         }
 
-        double volume = ClosureOf(cell).Volume(cell.HeldEnthalpy, out _);
-        cell.Mass = cell.Volume / volume;
+        cell.Mass = cell.Volume / VolumeOf(cell);
         cell.Energy = (cell.Mass * cell.HeldEnthalpy) - (pressure * cell.Volume);
     }
 }

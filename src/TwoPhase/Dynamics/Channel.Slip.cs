@@ -1,4 +1,5 @@
 using TwoPhase.Flow;
+using TwoPhase.Numerics;
 using TwoPhase.Passes;
 
 namespace TwoPhase.Dynamics;
@@ -13,39 +14,43 @@ internal sealed partial class Channel<TFluid>
 
     /// <summary>Finds the flowing quality whose void fraction is that of the mixture held.</summary>
     /// <remarks>Newton's method, begun along the slope of the inner step before, so that a step costs one call of the slip model.</remarks>
-    private void Part(ref Cell cell, double held)
+    private void Part(ref Cell cell)
     {
-        SaturatedPair steam = cell.Steam;
-        double mixture = (held * steam.VapourVolume) + ((1 - held) * steam.LiquidVolume), alpha = held * steam.VapourVolume / mixture;
-        bool known = cell.VoidByQuality > 0;
-        double x = known ? Inside(cell.FlowQuality, cell.FlowQuality + ((alpha - cell.VoidFraction) / cell.VoidByQuality)) : held;
-        FlowState flow = FlowOf(cell);
+        ref readonly SaturatedPair steam = ref cell.Steam;
+        double latent = steam.LatentHeat, excess = steam.VapourVolume - steam.LiquidVolume, above = cell.HeldEnthalpy - steam.LiquidEnthalpy;
+        // α = q v″ / (v′ + q (v″ − v′)). One division for two: each costs as much as many products.
+        double sum = (steam.LiquidVolume * latent) + (above * excess), perBoth = 1 / (sum * latent), perSum = perBoth * latent, alpha = above * steam.VapourVolume * perSum;
+        bool known = cell.QualityByVoid > 0;
+        double x = known ? Inside(cell.FlowQuality, cell.FlowQuality + ((alpha - cell.VoidFraction) * cell.QualityByVoid)) : above / latent;
         for (int i = 0; i < GreatestTries; i++)
         {
-            double found = _models.Slip.VoidFractionCore(flow with { Quality = x }), rarer = Math.Min(x, 1 - x);
+            FlowState flow = FlowOf(cell, x);
+            double found = _models.Slip.VoidFractionCore(flow), rarer = Fast.Min(x, 1 - x);
             bool keep = known && i == 0 && Math.Abs(x - cell.SlopeQuality) < Kept * rarer;
-            if (!keep) (cell.VoidByQuality, cell.SlopeQuality) = (SlopeAt(flow, x, found), x);
-            double next = Inside(x, x + ((alpha - found) / cell.VoidByQuality)), change = Math.Abs(next - x);
+            if (!keep) (cell.QualityByVoid, cell.SlopeQuality) = (QualityByVoidAt(flow, x, found), x);
+            double next = Inside(x, x + ((alpha - found) * cell.QualityByVoid)), change = Math.Abs(next - x);
             x = next;
             if (change < (keep ? SmallChange * rarer : 1e-9)) break;
         }
 
         cell.FlowQuality = x;
         cell.VoidFraction = alpha;
-        cell.FlowEnthalpy = steam.LiquidEnthalpy + (x * steam.LatentHeat);
-        cell.WaveFactor = WaveFactorOf(steam, mixture, cell.VoidByQuality);
+        cell.FlowEnthalpy = steam.LiquidEnthalpy + (x * latent);
+        cell.WaveFactor = WaveFactorOf(steam, latent * perSum, cell.QualityByVoid);
+        cell.VolumeByEnthalpy = excess * sum * perBoth;
+        cell.VolumeByMass = steam.LiquidVolume - (cell.VolumeByEnthalpy * steam.LiquidEnthalpy);
     }
 
     // Half way to the end that a step would overshoot.
     private static double Inside(double from, double to) => to <= 0 ? from / 2 : to >= 1 ? (1 + from) / 2 : to;
 
-    private double SlopeAt(in FlowState flow, double x, double alpha)
+    private double QualityByVoidAt(in FlowState flow, double x, double alpha)
     {
         double probe = 1e-5 * Math.Min(x, 1 - x);
-        return (_models.Slip.VoidFractionCore(flow with { Quality = x + probe }) - alpha) / probe;
+        return probe / (_models.Slip.VoidFractionCore(flow with { Quality = x + probe }) - alpha);
     }
 
-    // ∂x/∂q = 1 / (∂α/∂x · ∂q/∂α), with ∂α/∂q = v′ v″ / v² of the mixture held.
-    private static double WaveFactorOf(in SaturatedPair steam, double mixture, double voidByQuality) =>
-        steam.LiquidVolume * steam.VapourVolume / (mixture * mixture * voidByQuality);
+    // ∂x/∂q = ∂x/∂α · ∂α/∂q, with ∂α/∂q = v′ v″ / v² of the mixture held.
+    private static double WaveFactorOf(in SaturatedPair steam, double perMixture, double qualityByVoid) =>
+        steam.LiquidVolume * steam.VapourVolume * perMixture * perMixture * qualityByVoid;
 }

@@ -28,25 +28,25 @@ internal sealed partial class Channel<TFluid>
     {
         double[] numbers =
         [
-            cell.Mass, cell.Energy, cell.Wall, cell.Conductance, cell.PhaseEnthalpy, cell.Phase.Viscosity, cell.Phase.Conductivity, cell.Phase.HeatCapacity,
-            cell.Head, cell.HeadTarget, cell.PressureRate, cell.Drop, cell.DropFlow, cell.Resistance, cell.HalfLoss, cell.Store, cell.Swelling, cell.HeatShare, cell.Spread, cell.Steam.Pressure, cell.HeldEnthalpy, cell.FlowEnthalpy, cell.Slope, cell.FlowQuality, cell.VoidFraction, cell.VoidByQuality, cell.SlopeQuality,
+            cell.Mass, cell.Energy, cell.Wall, cell.FilmResistance, cell.PhaseEnthalpy, cell.Phase.Viscosity, cell.Phase.Conductivity, cell.Phase.HeatCapacity,
+            cell.Head, cell.HeadTarget, cell.PressureRate, cell.Drop, cell.DropFlow, cell.Resistance, cell.HalfLoss, cell.Store, cell.Swelling, cell.HeatShare, cell.Spread, cell.Steam.Pressure, cell.HeldEnthalpy, cell.FlowEnthalpy, cell.Slope, cell.FlowQuality, cell.VoidFraction, cell.QualityByVoid, cell.SlopeQuality,
             cell.WaveFactor, (double)cell.Boundary, cell.Profile.Spread, cell.Profile.Below, cell.Profile.Above,
-            cell.Temperature, cell.SinglePhaseVolume, cell.SinglePhaseExpansion, cell.Outflow, cell.OutEnthalpy, cell.HeatToWater,
+            cell.Temperature, cell.SinglePhaseExpansion, cell.Outflow, cell.OutEnthalpy, cell.HeatToWater,
         ];
         foreach (double number in numbers) to.Add(number);
     }
 
     private void Load(ref Cell cell, StateReader from)
     {
-        (cell.Mass, cell.Energy, cell.Wall, cell.Conductance, cell.PhaseEnthalpy) = (from.Next(), from.Next(), from.Next(), from.Next(), from.Next());
+        (cell.Mass, cell.Energy, cell.Wall, cell.FilmResistance, cell.PhaseEnthalpy) = (from.Next(), from.Next(), from.Next(), from.Next(), from.Next());
         cell.Phase = new(from.Next(), from.Next(), from.Next());
         (cell.Head, cell.HeadTarget, cell.PressureRate, cell.Drop, cell.DropFlow, cell.Resistance, cell.HalfLoss) = (from.Next(), from.Next(), from.Next(), from.Next(), from.Next(), from.Next(), from.Next());
         (cell.Store, cell.Swelling, cell.HeatShare, cell.Spread, cell.Steam) = (from.Next(), from.Next(), from.Next(), from.Next(), _fluid.Saturated(from.Next()));
         (cell.HeldEnthalpy, cell.FlowEnthalpy, cell.Slope) = (from.Next(), from.Next(), from.Next());
-        (cell.FlowQuality, cell.VoidFraction, cell.VoidByQuality, cell.SlopeQuality) = (from.Next(), from.Next(), from.Next(), from.Next());
+        (cell.FlowQuality, cell.VoidFraction, cell.QualityByVoid, cell.SlopeQuality) = (from.Next(), from.Next(), from.Next(), from.Next());
         (cell.WaveFactor, cell.Boundary) = (from.Next(), (Boundary)from.Next());
         cell.Profile = new() { Spread = from.Next(), Below = from.Next(), Above = from.Next() };
-        (cell.Temperature, cell.SinglePhaseVolume, cell.SinglePhaseExpansion) = (from.Next(), from.Next(), from.Next());
+        (cell.Temperature, cell.SinglePhaseExpansion) = (from.Next(), from.Next());
         (cell.Outflow, cell.OutEnthalpy, cell.HeatToWater) = (from.Next(), from.Next(), from.Next());
     }
 }

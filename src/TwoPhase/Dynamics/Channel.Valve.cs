@@ -62,14 +62,14 @@ internal sealed partial class Channel<TFluid>
     {
         if (_kept.Length == 0) _kept = new Cell[_cells.Length];
         _cells.CopyTo(_kept, 0);
-        before = new(EndPressure, _lastFeed, _beyond, CourantRate);
+        before = new(EndPressure, _lastFeed, _beyond, CourantRate, _decayStep);
     }
 
     private void Restore(in Remains before)
     {
         _kept.CopyTo(_cells, 0);
-        (EndPressure, _lastFeed, _beyond, CourantRate) = before;
+        (EndPressure, _lastFeed, _beyond, CourantRate, _decayStep) = before;
     }
 
-    private readonly record struct Remains(double EndPressure, double LastFeed, double Beyond, double CourantRate);
+    private readonly record struct Remains(double EndPressure, double LastFeed, double Beyond, double CourantRate, double DecayStep);
 }

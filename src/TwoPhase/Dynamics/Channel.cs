@@ -54,12 +54,13 @@ internal sealed partial class Channel<TFluid>
     public double InletPressure => EndPressure + _cells[0].Head + _cells[0].HalfLoss;
 
     /// <summary>One inner step; the pressure at the end of the pass is that at its end.</summary>
-    private void Step(double step, double feedFlow, double endPressure)
+    public void Step(double step, double feedFlow, double endPressure)
     {
         Stagnant = -1;
-        ForeseePressure(step, feedFlow, (endPressure - EndPressure) / step);
-        Decompose(step, endPressure);
-        Reconstruct(step, feedFlow);
+        RenewDecay(step);
+        ForeseeFlow(step, feedFlow, (endPressure - EndPressure) / step);
+        MovePressure(step, endPressure);
+        Decompose(step);
         March(step, feedFlow);
         (_lastFeed, EndPressure) = (feedFlow, endPressure);
     }

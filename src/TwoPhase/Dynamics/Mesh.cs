@@ -16,7 +16,9 @@ internal static class Mesh
             for (int i = 0; i < count; i++) list.Add(CellOf(duct, d, (double)i / count, (i + 1.0) / count));
         }
 
-        return [.. list];
+        Cell[] all = [.. list];
+        for (int i = 0; i < all.Length; i++) all[i].PerSpacing = 2 / (all[i].Volume + all[Math.Min(i + 1, all.Length - 1)].Volume);
+        return all;
     }
 
     private static Cell CellOf(in Duct duct, int index, double from, double to)
@@ -28,8 +30,7 @@ internal static class Mesh
             Length = length,
             Start = duct.Start + (duct.Length * from),
             Volume = duct.Area * length,
-            VolumeBefore = duct.VolumeBefore + (duct.Area * duct.Length * from),
-            Area = duct.Area,
+            PerArea = 1 / duct.Area,
             Surface = duct.Perimeter * length,
             Capacity = duct.MetalCapacity * length,
             HeatShare = share,

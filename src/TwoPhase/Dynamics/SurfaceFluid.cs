@@ -1,3 +1,4 @@
+using System.Runtime.CompilerServices;
 using TwoPhase.Flow;
 using TwoPhase.HeatTransfer;
 using TwoPhase.Passes;
@@ -14,14 +15,15 @@ internal readonly struct SurfaceFluid : IPassFluid
 
     public double HighestPressure => default(SteamFluid).HighestPressure;
 
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public SaturatedPair Saturated(double pressure) => default(SteamFluid).Saturated(pressure);
 
     public SaturatedPair SaturatedSlopes(double pressure) => default(SteamFluid).SaturatedSlopes(pressure);
 
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated, double near = 0)
     {
-        SurfacePoint point = _surface.Evaluate(pressure, enthalpy);
-        if (double.IsNaN(point.SpecificVolume)) return default(SteamFluid).At(pressure, enthalpy, saturated, near);
+        if (!_surface.TrySinglePhase(pressure, enthalpy, saturated.LiquidEnthalpy, saturated.VapourEnthalpy, out SurfacePoint point)) return default(SteamFluid).At(pressure, enthalpy, saturated, near);
         double squared = point.SpecificVolume * point.SpecificVolume;
         return new()
         {

@@ -1,34 +1,29 @@
 namespace TwoPhase.Dynamics;
 
 /// <summary>
-/// Mean specific volume of a cell as a function of its mean enthalpy at given pressure: linear on one branch (liquid, wet or vapour), and
-/// where a boundary stands in the cell the mean over two branches.
+/// Mean specific volume of a cell in which a boundary stands, as a function of its mean enthalpy at given pressure: the mean over two branches
+/// (liquid and wet, or wet and vapour), each linear.
 /// </summary>
 /// <remarks>
-/// <para>v̄(h̄) = v0 + b (h̄ − h0) + Δb Ē(h̄ − hb), Ē the mean excess over the boundary.</para>
+/// <para>v̄(h̄) = v0 + b (h̄ − hb) + Δb Ē(h̄ − hb), Ē the mean excess over the boundary.</para>
 /// <para>With the cell mean instead, the outflow is off by some tenths of a per cent while a boundary walks through a cell.</para>
 /// </remarks>
 internal struct VolumeClosure
 {
-    /// <summary>The branch, or that below the boundary: v0 [m³/kg] at h0 [J/kg], slope [m³/J].</summary>
-    public double Volume0, Enthalpy0, Expansion0;
+    // Newton's method doubles the digits with each step: behind a change as small as this, round-off is all that is left to find.
+    private const double Settled = 1e-9;
 
-    /// <summary>Enthalpy of the boundary [J/kg] and by how much the slope changes there; zero for none.</summary>
-    public double Boundary, Step;
+    /// <summary>v0 [m³/kg] at the boundary's enthalpy hb [J/kg], slope b below it [m³/J] and by how much the slope changes there.</summary>
+    public double Volume0, Boundary, Expansion0, Step;
 
     /// <summary>The profile about the boundary.</summary>
     public BentProfile Profile;
 
-    public readonly bool IsLinear => Step == 0;
-
     public readonly double Volume(double enthalpy, out double slope)
     {
-        slope = Expansion0;
-        double volume = Volume0 + (Expansion0 * (enthalpy - Enthalpy0));
-        if (IsLinear) return volume;
-        volume += Step * Profile.Over(enthalpy - Boundary, out double share);
-        slope += Step * share;
-        return volume;
+        double above = Profile.Over(enthalpy - Boundary, out double share);
+        slope = Expansion0 + (Step * share);
+        return Volume0 + (Expansion0 * (enthalpy - Boundary)) + (Step * above);
     }
 
     /// <summary>Outflow [kg/s] that leaves the cell exactly full after a step.</summary>
@@ -40,13 +35,6 @@ internal struct VolumeClosure
     /// <param name="guess">Outflow of the step before [kg/s].</param>
     public readonly double Outflow(double volume, double step, double mass, double content, double outEnthalpy, double guess)
     {
-        // V = a M + b H is linear in the outflow on one branch.
-        if (IsLinear)
-        {
-            double a = Volume0 - (Expansion0 * Enthalpy0);
-            return ((a * mass) + (Expansion0 * content) - volume) / (step * (a + (Expansion0 * outEnthalpy)));
-        }
-
         double outflow = guess;
         for (int i = 0; i < 20; i++)
         {
@@ -56,7 +44,7 @@ internal struct VolumeClosure
             double derivative = -step * (mean + (slope * (outEnthalpy - enthalpy)));
             double change = excess / derivative;
             outflow -= change;
-            if (Math.Abs(change) <= 1e-14 * Math.Abs(outflow)) break;
+            if (Math.Abs(change) <= Settled * Math.Abs(outflow)) break;
         }
 
         return outflow;

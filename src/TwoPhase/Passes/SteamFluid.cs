@@ -1,3 +1,4 @@
+using System.Runtime.CompilerServices;
 using TwoPhase.Flow;
 using TwoPhase.HeatTransfer;
 using TwoPhase.Steam;
@@ -17,6 +18,7 @@ internal readonly struct SteamFluid : IPassFluid
 
     public double HighestPressure => Water97.CriticalPressure;
 
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public SaturatedPair Saturated(double pressure)
     {
         SaturatedPhases phases = SaturationTable.Phases(pressure);

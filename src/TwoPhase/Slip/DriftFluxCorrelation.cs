@@ -31,10 +31,11 @@ public abstract partial class VoidFractionModel
 
         protected internal override double VoidFractionCore(in FlowState flow)
         {
-            double vapour = flow.Quality / flow.VapourDensity, liquid = (1 - flow.Quality) / flow.LiquidDensity;
+            // Everything times ρg/G.
+            double vapour = flow.Quality, liquid = (1 - flow.Quality) * (flow.VapourDensity / flow.LiquidDensity);
 
             // Without vapour C0 and Vgj may both be 0 (Dix at the critical point).
-            return vapour > 0 ? vapour / ((distribution.Core(flow) * (vapour + liquid)) + (drift.Core(flow) / flow.MassFlux)) : 0;
+            return vapour > 0 ? vapour / ((distribution.Core(flow) * (vapour + liquid)) + (drift.Core(flow) * flow.VapourDensity / flow.MassFlux)) : 0;
         }
 
         // S = [(C0 − 1) jg + C0 jl + Vgj] / jl: the same as from α, but without 1 − α.

@@ -42,6 +42,7 @@ internal static class SaturationTable
     public static double Temperature(double pressure) => Covers(pressure) ? Slopes(pressure).Temperature : Exact(pressure, FluidCurves.Of).A;
 
     /// <summary>Ts [K], σ [N/m], μ′ and μ″ [Pa·s].</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static SaturatedFluid Fluid(double pressure) =>
         new(Covers(pressure) ? FluidCurves.Table.At(pressure) : Exact(pressure, FluidCurves.Of));
 

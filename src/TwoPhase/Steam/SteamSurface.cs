@@ -112,6 +112,20 @@ public sealed class SteamSurface
         return new(slopes.Temperature, volume, quality, byVolume * slopes.VolumeByEnthalpy, byVolume * slopes.VolumeByPressure(quality));
     }
 
+    /// <summary>As <see cref="Evaluate"/> outside wet steam, for whoever knows h′ and h″ already; the quality is left out. False inside it and outside the range.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    internal bool TrySinglePhase(double pressure, double enthalpy, double liquidEnthalpy, double vapourEnthalpy, out SurfacePoint point)
+    {
+        bool liquid = enthalpy <= liquidEnthalpy, inside = pressure >= _lowestPressure && pressure <= _highestPressure && enthalpy >= _lowestEnthalpy && enthalpy <= _highestEnthalpy;
+        point = SurfacePoint.NaN;
+        if (!inside || !(liquid || enthalpy >= vapourEnthalpy)) return false;
+        Four values = liquid
+            ? _liquid.At(pressure, (enthalpy - _liquidFloor) / (liquidEnthalpy - _liquidFloor))
+            : _vapour.At(pressure, (enthalpy - vapourEnthalpy) / (_vapourCeiling - vapourEnthalpy));
+        point = Single(values, pressure, double.NaN);
+        return true;
+    }
+
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     private static SurfacePoint Single(Four values, double pressure, double quality) =>
         new(values.A, values.B / pressure, quality, values.C, values.D);
