@@ -12,8 +12,8 @@ namespace Backfill.Demo;
 /// <param name="minutes">Minutes after and before each midnight that are made; 720 for the whole day.</param>
 internal sealed class DayMaker(Chance seed, QualityMeter meter, int everySeconds, int minutes)
 {
-    // Begun at rest so long before the first row that nothing of the beginning is left: some six times the water's way through the pass.
-    private const int Before = 1800, Day = 86_400, HalfDay = 720;
+    // Begun at rest so long before the first row that nothing of the beginning is left: some four times the water's way through the pass.
+    private const int Before = 1200, Day = 86_400, HalfDay = 720;
 
     public DemoColumns Make(DateOnly day, string pass)
     {

@@ -11,7 +11,7 @@ internal sealed class PartitionReader(Site site, HistoryFolder history)
     /// <summary>The rows, part by part, in the one block; throws <see cref="FileFault"/> at the first thing that is wrong.</summary>
     public async IAsyncEnumerable<Block> ReadAsync(Partition partition, Block block, [EnumeratorCancellation] CancellationToken cancellation)
     {
-        string file = history.FileOf(partition) ?? throw new FileFault(partition.PassFolder, NoFile);
+        string file = history.FileOf(partition) ?? throw new FileFault(NoFile);
         await using TableReader reader = await TableReader.OpenAsync(file, site[partition.Pass].Columns, cancellation);
         long rows = 0;
         while (await reader.NextAsync(block, cancellation))
@@ -29,7 +29,6 @@ internal sealed class PartitionReader(Site site, HistoryFolder history)
     {
         try
         {
-            if (history.FileOf(partition) is null) return NoFile;
             await foreach (Block _ in ReadAsync(partition, block, cancellation)) { }
             return null;
         }
