@@ -8,7 +8,10 @@ namespace Backfill;
 /// <summary>A pass with the columns that its readings stand in.</summary>
 internal sealed class MeasuredPass
 {
-    // In the order in which ReadingFormat takes them; the last are the columns that nothing works without.
+    /// <summary>The most columns that a pass can have.</summary>
+    public const int MostColumns = 5;
+
+    // In the order in which ReadingFormat takes them.
     private static readonly PassSignal[] Signals = [PassSignal.FeedFlow, PassSignal.FeedTemperature, PassSignal.Firing, PassSignal.OutletPressure, PassSignal.Differential];
 
     private readonly int[] _places;

@@ -13,7 +13,7 @@ public sealed class BadFileTests(InventedHistory history)
 
         (int code, string report, string error) = await Support.RunAsync("run", folder);
         Assert.Equal(3, code);
-        Assert.Contains("18 partitions done, 0 stood from before, 1 without a file, 4 with a bad file.", report, StringComparison.Ordinal);
+        Assert.Contains("Partitions: 18 done, 0 stood from before, 1 without a file, 4 with a bad file.", report, StringComparison.Ordinal);
         Assert.Collection(
             error.TrimEnd().Split('\n'),
             static line => Assert.StartsWith("day=2031-03-04/pass=3: readings.csv: the file is empty", line, StringComparison.Ordinal),
@@ -25,14 +25,14 @@ public sealed class BadFileTests(InventedHistory history)
         // Again: what was bad is still said to be.
         (int again, string still, string same) = await Support.RunAsync("run", folder);
         Assert.Equal((3, error), (again, same));
-        Assert.Contains("0 partitions done, 18 stood from before, 1 without a file, 4 with a bad file.", still, StringComparison.Ordinal);
+        Assert.Contains("Partitions: 0 done, 18 stood from before, 1 without a file, 4 with a bad file.", still, StringComparison.Ordinal);
 
         // Mended: those days and what follows them are estimated anew, as if nothing had been.
         Directory.Delete(copy, recursive: true);
         Support.Copy(history.History, copy);
         (int mended, string last, string none) = await Support.RunAsync("run", folder);
         Assert.Equal((0, ""), (mended, none));
-        Assert.Contains("15 partitions done, 3 stood from before", last, StringComparison.Ordinal);
+        Assert.Contains("Partitions: 15 done, 3 stood from before", last, StringComparison.Ordinal);
         Support.AreEqual(history.Estimates, Path.Combine(folder, "estimates"));
     }
 

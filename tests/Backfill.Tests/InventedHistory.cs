@@ -29,7 +29,7 @@ public sealed class InventedHistory : IAsyncLifetime
         Assert.Equal(0, (await Support.RunAsync(Generate(Folder, "--passes", "3", "--days", "6"))).Code);
         (int code, string output, string error) = await Support.RunAsync("run", Folder, "--threads", "1");
         Assert.Equal((0, ""), (code, error));
-        Assert.Contains($"{Partitions} partitions done, 0 stood from before, 0 without a file, 0 with a bad file.", output, StringComparison.Ordinal);
+        Assert.Contains($"Partitions: {Partitions} done, 0 stood from before, 0 without a file, 0 with a bad file.", output, StringComparison.Ordinal);
         Assert.Matches(@"raw reading [\d,]+ rows a second, estimator [\d,]+ rows a second", output);
     }
 

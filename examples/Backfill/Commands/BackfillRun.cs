@@ -55,9 +55,9 @@ internal sealed class BackfillRun(RunSettings settings, IAnsiConsole console, bo
 
     private void Report(HistoryFolder history, Tally tally, Rates rates, long start)
     {
-        console.WriteLine(FormattableString.Invariant($"{history.Passes.Count} passes, {history.First:yyyy-MM-dd} to {history.Last:yyyy-MM-dd}: {tally.Done} partitions done, {tally.Stand} stood from before, {tally.WithoutFile} without a file, {tally.Bad.Count} with a bad file."));
+        console.WriteLine(FormattableString.Invariant($"Passes {string.Join(", ", history.Passes)}, {history.First:yyyy-MM-dd} to {history.Last:yyyy-MM-dd}. Partitions: {tally.Done} done, {tally.Stand} stood from before, {tally.WithoutFile} without a file, {tally.Bad.Count} with a bad file."));
         if (rates.Rows == 0) return;
-        console.WriteLine(FormattableString.Invariant($"{rates.Rows:N0} rows, {rates.Overall(start):N0} a second on {settings.Threads} threads, files included."));
+        console.WriteLine(FormattableString.Invariant($"Rows: {rates.Rows:N0}, {rates.Overall(start):N0} a second with everything (--threads {settings.Threads})."));
         console.WriteLine(FormattableString.Invariant($"One thread: raw reading {rates.Reading:N0} rows a second, estimator {rates.Estimating:N0} rows a second."));
     }
 }

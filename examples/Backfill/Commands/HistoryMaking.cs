@@ -25,7 +25,7 @@ internal sealed class HistoryMaking(MakingSettings settings, IAnsiConsole consol
             await MakeAsync(partition, site, token);
             step();
         }));
-        console.WriteLine(FormattableString.Invariant($"Invented: generator, readings and truth of {passes.Length} passes, {settings.Days} days from {settings.First:yyyy-MM-dd}, seed {settings.Seed}. No such plant exists."));
+        console.WriteLine(FormattableString.Invariant($"Invented: generator, readings and truth of passes {string.Join(", ", passes)}, {settings.First:yyyy-MM-dd} to {partitions[^1].Day:yyyy-MM-dd}, seed {settings.Seed}. No such plant exists."));
     }
 
     private async Task MakeAsync(Partition partition, Site site, CancellationToken cancellation)

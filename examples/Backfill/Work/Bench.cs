@@ -7,10 +7,7 @@ namespace Backfill.Work;
 /// <summary>The buffers of one worker. They grow to the largest row group of the history and no further, however long it is.</summary>
 internal sealed class Bench
 {
-    // Every column that a pass can have.
-    private const int Columns = 5;
-
-    public Block Block { get; } = new(Columns);
+    public Block Block { get; } = new(MeasuredPass.MostColumns);
 
     public PassReading[] Readings { get; } = new PassReading[EstimateTable.Capacity];
 

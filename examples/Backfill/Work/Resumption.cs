@@ -7,7 +7,7 @@ namespace Backfill.Work;
 /// <summary>Where a chain goes on: what stands in the output is kept as far as it is still what the history says.</summary>
 internal sealed class Resumption(PartitionReader reader, OutputFolder output, Tally tally)
 {
-    private readonly Bench _bench = new();
+    private readonly Block _block = new(MeasuredPass.MostColumns);
 
     /// <summary>The first day to be done; what stood behind it is taken away, since it was estimated from another past.</summary>
     public async Task<DateOnly> FirstOpenDayAsync(Chain chain, CancellationToken cancellation)
@@ -26,7 +26,7 @@ internal sealed class Resumption(PartitionReader reader, OutputFolder output, Ta
         string? gap = output.GapOf(partition);
 
         // A file that could not be read may have been mended.
-        if (gap is not null && await reader.TroubleAsync(partition, _bench.Block, cancellation) != gap) return false;
+        if (gap is not null && await reader.TroubleAsync(partition, _block, cancellation) != gap) return false;
         tally.Stood(partition, gap);
         return true;
     }
