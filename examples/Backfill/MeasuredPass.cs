@@ -20,7 +20,7 @@ internal sealed class MeasuredPass
     {
         Pass = pass;
         Meter = pass.Meter ?? throw new ArgumentException($"Pass '{pass.Name}' has no meter.");
-        TagSet<PassSignal> tags = Shared(generator, pass);
+        TagSet<PassSignal> tags = generator.TagsOf(pass);   // what the passes share stands in the files of each
         foreach (PassSignal signal in Signals)
         {
             if (signal != PassSignal.Firing && tags[signal] is null) throw new ArgumentException($"Pass '{pass.Name}' has no tag for its {signal}, nor has the generator.");
@@ -49,16 +49,4 @@ internal sealed class MeasuredPass
         time, Value(columns, 0, row), Value(columns, 1, row), Value(columns, 2, row), Value(columns, 3, row), Value(columns, 4, row));
 
     private double Value(double[][] columns, int signal, int row) => _places[signal] is var place and >= 0 ? columns[place][row] : double.NaN;
-
-    // What the passes share stands in the files of each.
-    private static TagSet<PassSignal> Shared(SteamGenerator generator, Pass pass)
-    {
-        TagSet<PassSignal> tags = pass.Tags;
-        foreach ((PassSignal own, GeneratorSignal shared) in new[] { (PassSignal.FeedTemperature, GeneratorSignal.FeedTemperature), (PassSignal.Firing, GeneratorSignal.Firing), (PassSignal.OutletPressure, GeneratorSignal.HeaderPressure) })
-        {
-            if (tags[own] is null && generator.Tags[shared] is { } tag) tags = tags.With(own, tag);
-        }
-
-        return tags;
-    }
 }

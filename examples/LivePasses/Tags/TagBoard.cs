@@ -27,7 +27,7 @@ internal sealed class TagBoard
         _formats = new ReadingFormat[generator.Passes.Count];
         for (int i = 0; i < _formats.Length; i++)
         {
-            TagSet<PassSignal> tags = TagsOf(generator, i);
+            TagSet<PassSignal> tags = generator.TagsOf(generator.Passes[i]);
             _formats[i] = new(tags, generator.Basis);
             foreach ((PassSignal signal, Tag tag) in tags) SlotOf(settings.Topics.Tag(tag.Name), tag).Uses.Add((i, signal));
         }
@@ -55,18 +55,6 @@ internal sealed class TagBoard
         slot!.Take(time, message.Value, _end);
         if (_byTopic.Values.Count(static tag => tag.Late >= SetBack) >= _witnesses) StartOver();
         return _byTopic.Values.Count(static tag => tag.IsAhead) >= _witnesses ? Close() : null;
-    }
-
-    // A pass without a tag of its own for what all passes share reads the generator's.
-    private static TagSet<PassSignal> TagsOf(SteamGenerator generator, int pass)
-    {
-        TagSet<PassSignal> tags = generator.Passes[pass].Tags;
-        foreach ((PassSignal own, GeneratorSignal shared) in ((PassSignal, GeneratorSignal)[])[(PassSignal.FeedTemperature, GeneratorSignal.FeedTemperature), (PassSignal.Firing, GeneratorSignal.Firing), (PassSignal.OutletPressure, GeneratorSignal.HeaderPressure)])
-        {
-            if (tags[own] is null && generator.Tags[shared] is { } tag) tags = tags.With(own, tag);
-        }
-
-        return tags;
     }
 
     private static DateTimeOffset EndOf(DateTimeOffset time) => new((time.UtcTicks / TimeSpan.TicksPerSecond * TimeSpan.TicksPerSecond) + TimeSpan.TicksPerSecond, TimeSpan.Zero);

@@ -31,7 +31,7 @@ public sealed class GeneratorEstimator
     {
         Generator = Require.NotNull(generator, nameof(generator));
         _estimators = [.. generator.Passes.Select(pass => new QualityEstimator(pass, pass.Meter ?? throw new ArgumentException($"Pass '{pass.Name}' has no meter.", nameof(generator)), options))];
-        _estimates = new QualityEstimate[_estimators.Length];
+        _estimates = [.. _estimators.Select(static _ => QualityEstimate.Nothing(default, double.NaN))];
         _shifts = new PassShift[_estimators.Length];
         _gaps = new double[_estimators.Length];
         _limit = (options ?? EstimatorOptions.Default).RawDisagreementLimit;

@@ -49,6 +49,6 @@ public sealed partial class QualityEstimator
         _shadow.Load(from);
         if (!from.IsAtEnd) throw new FormatException("A saved state is longer than this pass needs: it is of another pass.");
         _warm.Clear();
-        _last = default;
+        _last = QualityEstimate.Nothing(default, double.NaN);
     }
 }

@@ -46,7 +46,7 @@ public sealed partial class QualityEstimator
     private Clock _clock;
     private double _heatInShadow, _learntHeat, _running, _error, _motion, _laggedDifferential, _meterFactor, _gainVariance, _moved, _disagreesSince;
     private Trust _trust;
-    private QualityEstimate _last;
+    private QualityEstimate _last = QualityEstimate.Nothing(default, double.NaN);
 
     /// <summary>An estimator that has seen nothing yet.</summary>
     /// <param name="pass">The pass: its tubes, its heat shares and, if known, its heat at full firing.</param>

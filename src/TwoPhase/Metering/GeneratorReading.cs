@@ -165,9 +165,9 @@ public sealed class GeneratorReading
 
     private PassReading Filled(in PassReading pass)
     {
-        PassReading filled = Fill(pass, PassSignal.FeedTemperature, GeneratorSignal.FeedTemperature);
-        filled = Fill(filled, PassSignal.Firing, GeneratorSignal.Firing);
-        return Fill(filled, PassSignal.OutletPressure, GeneratorSignal.HeaderPressure);
+        PassReading filled = pass;
+        foreach ((PassSignal own, GeneratorSignal shared) in GeneratorSignals.SharedWithPasses) filled = Fill(filled, own, shared);
+        return filled;
     }
 
     private PassReading Fill(in PassReading pass, PassSignal own, GeneratorSignal shared) =>

@@ -53,6 +53,14 @@ internal static class GeneratorSignals
 {
     public const int Count = (int)GeneratorSignal.WaterSolids + 1;
 
+    /// <summary>What a pass is read by where it has no instrument of its own.</summary>
+    public static readonly (PassSignal Own, GeneratorSignal Shared)[] SharedWithPasses =
+    [
+        (PassSignal.FeedTemperature, GeneratorSignal.FeedTemperature),
+        (PassSignal.Firing, GeneratorSignal.Firing),
+        (PassSignal.OutletPressure, GeneratorSignal.HeaderPressure),
+    ];
+
     public static UnitKind Kind(GeneratorSignal signal) => signal switch
     {
         GeneratorSignal.FeedTemperature or GeneratorSignal.StackTemperature or GeneratorSignal.BridgeWallTemperature => UnitKind.Temperature,

@@ -73,6 +73,18 @@ public class QualityEstimatorTests
     }
 
     [Fact]
+    public void Update_LateReadingAfterARestore_SaysThatNothingIsKnown()
+    {
+        var whole = new QualityEstimator(KnownPass, Meter);
+        Run(whole, Quiet.Take(200));
+        var second = new QualityEstimator(KnownPass, Meter);
+        second.Restore(whole.Save());
+        QualityEstimate late = second.Update(Quiet.Take(200).Last().Reading);
+        Assert.Equal((null, null, null, Trust.Unknown), (late.Quality, late.IndicatedQuality, late.UpperQuality, late.Trust));
+        Assert.NotNull(second.Update(Quiet.Skip(200).First().Reading).Quality);
+    }
+
+    [Fact]
     public void Restore_StateOfAnother_ThrowsSayingWhy()
     {
         var estimator = new QualityEstimator(KnownPass, Meter, EstimatorOptions.Default.WithCells(40));

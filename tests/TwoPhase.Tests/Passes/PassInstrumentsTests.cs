@@ -19,6 +19,18 @@ public class PassInstrumentsTests
     }
 
     [Fact]
+    public void TagsOf_PassWithoutItsOwn_HasThoseOfTheGenerator()
+    {
+        var own = new Pass("own", []).WithTags(TagSet.OfPass.With(PassSignal.FeedFlow, new Tag("A", "kg/s")).With(PassSignal.OutletPressure, new Tag("P", "MPa(a)")));
+        SteamGenerator generator = new SteamGenerator("G", [own, new Pass("none", [])])
+            .WithTags(TagSet.OfGenerator.With(GeneratorSignal.Firing, new Tag("F", "%")).With(GeneratorSignal.HeaderPressure, new Tag("H", "MPa(a)")).With(GeneratorSignal.TotalFeed, new Tag("T", "t/h")));
+        Assert.Equal(["FeedFlow: A [kg/s]", "OutletPressure: P [MPa(a)]", "Firing: F [%]"], Texts(own));
+        Assert.Equal(["OutletPressure: H [MPa(a)]", "Firing: F [%]"], Texts(generator.Passes[1]));
+
+        IEnumerable<string> Texts(Pass pass) => generator.TagsOf(pass).Select(static entry => $"{entry.Key}: {entry.Value}");
+    }
+
+    [Fact]
     public void With_TagsAndBasis_LeaveTheOriginalAlone()
     {
         var plain = new SteamGenerator("G", [new Pass("P", [])]);
