@@ -1,3 +1,5 @@
+using System.Numerics;
+
 namespace TwoPhase.Tests.Dynamics;
 
 /// <summary>What leaves a uniformly heated channel, and where it begins to boil, in closed form.</summary>
@@ -80,6 +82,15 @@ internal static class UniformChannel
         }
 
         return Answer(Velocity * delay, Velocity * end, e1 < end ? end + e0 - e1 : end);
+    }
+
+    /// <summary>Outlet flow over inlet flow for an inlet flow that swings with an angular frequency: (1 + Ω K) e^(−Ω θ), K = e^(−pτ) (e^((Ω−p) θ) − 1)/(Ω − p), p = iω, θ time of boiling water in the channel.</summary>
+    public static Complex FlowResponse(double angularFrequency)
+    {
+        var p = new Complex(0, angularFrequency);
+        double boiling = Math.Log(1 + (Expansion * (Length - (Velocity * Delay)) / Velocity)) / Expansion;
+        Complex k = Complex.Exp(-p * Delay) * (Complex.Exp((Expansion - p) * boiling) - 1) / (Expansion - p);
+        return (1 + (Expansion * k)) * Math.Exp(-Expansion * boiling);
     }
 
     private static ChannelAnswer Answer(double onset, double speed, double volumes) =>
