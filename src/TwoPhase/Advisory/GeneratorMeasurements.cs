@@ -1,6 +1,7 @@
 using TwoPhase.Metering;
 using TwoPhase.Passes;
 using TwoPhase.Steam;
+using TwoPhase.Uncertainty;
 using TwoPhase.Units;
 using UnitsNet;
 
@@ -135,6 +136,14 @@ public sealed partial class GeneratorMeasurements
     /// <param name="quality">x, above 0, at most 1.</param>
     /// <param name="uncertainty">Standard uncertainty, greater than zero.</param>
     public GeneratorMeasurements WithSeparatorQuality(MassFraction quality, MassFraction uncertainty) => With(Instrument.SeparatorQuality, quality.Si(), nameof(quality), uncertainty.Si(), 1);
+
+    /// <summary>With the quality that the solids of feed and separator water tell: the best check that there is beside the meters.</summary>
+    /// <param name="solids">The balance of solids.</param>
+    public GeneratorMeasurements WithSolids(SolidsBalance solids)
+    {
+        UncertainValue<MassFraction> quality = Require.NotNull(solids, nameof(solids)).Quality;
+        return WithSeparatorQuality(quality.Value, quality.StandardUncertainty);
+    }
 
     /// <summary>With the pressure of the separator, taken as known; the header's unless given. What flashes on the way down to it is reckoned with.</summary>
     /// <param name="pressure">Absolute.</param>

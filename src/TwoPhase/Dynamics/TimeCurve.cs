@@ -55,6 +55,23 @@ internal sealed class TimeCurve
         return after == _times.Length ? _values[^1] : Between(after, time);
     }
 
+    /// <summary>The curve behind a lag of first order that had settled on its first value, as in a mixed vessel.</summary>
+    public double Lagged(double time, double lag)
+    {
+        if (!(lag > 0)) return At(time);
+        double held = _values[0];
+        for (int i = 1; i <= _times.Length && _times[i - 1] < time; i++)
+        {
+            bool isLast = i == _times.Length;
+            double span = (isLast ? time : Math.Min(_times[i], time)) - _times[i - 1];
+            if (span == 0) continue;   // a step
+            double slope = isLast ? 0 : (_values[i] - _values[i - 1]) / (_times[i] - _times[i - 1]), behind = slope * lag;
+            held = _values[i - 1] + (slope * span) - behind + ((held - _values[i - 1] + behind) * Math.Exp(-span / lag));
+        }
+
+        return held;
+    }
+
     /// <summary>The mean over an interval: what a flow must be to bring the same mass.</summary>
     public double Mean(double from, double to)
     {

@@ -5,7 +5,10 @@ namespace TwoPhase.Uncertainty;
 public readonly record struct UncertainValue<TQuantity>
     where TQuantity : struct
 {
-    internal UncertainValue(TQuantity value, TQuantity standardUncertainty) => (Value, StandardUncertainty) = (value, standardUncertainty);
+    /// <summary>A value with its uncertainty.</summary>
+    /// <param name="value">The value.</param>
+    /// <param name="standardUncertainty">One standard deviation, k = 1.</param>
+    public UncertainValue(TQuantity value, TQuantity standardUncertainty) => (Value, StandardUncertainty) = (value, standardUncertainty);
 
     /// <summary>The value.</summary>
     public TQuantity Value { get; }

@@ -48,4 +48,7 @@ internal static class ColumnDoor
 
     public static LinearMap ToSi(this MassUnit unit) =>
         LinearMap.Through(new Mass(0, unit).Si(), new Mass(LinearMap.Far, unit).Si());
+
+    public static LinearMap ToSi(this MassConcentrationUnit unit) =>
+        LinearMap.Through(new MassConcentration(0, unit).Si(), new MassConcentration(LinearMap.Far, unit).Si());
 }
