@@ -36,11 +36,11 @@ internal struct Clock
 
     public static DateTimeOffset TimeOf(double seconds) => new(Math.Max(0, Math.Min(DateTimeOffset.MaxValue.UtcTicks, (long)(seconds * 1e7))), TimeSpan.Zero);
 
-    public readonly void Save(StateWriter to)
+    public void List(StateFields state)
     {
-        to.Add(_known ? 1 : 0);
-        to.Add(_now);
+        state.Flag("known", ref _known);
+        state.Number("now", ref _now);
+        state.Number("late", ref _late);
+        state.Number("candidate", ref _candidate);
     }
-
-    public void Load(StateReader from) => (_known, _now, _late, _candidate) = (from.Next() == 1, from.Next(), 0, double.NegativeInfinity);
 }

@@ -10,6 +10,8 @@ public sealed class EstimatorOptions
 {
     private const int FewestCells = 20, MostCells = 400;
 
+    private TagReporting[] _reporting = [.. Enumerable.Repeat(TagReporting.Sampled, PassSignals.Count)];
+
     /// <summary>The defaults.</summary>
     public static EstimatorOptions Default { get; } = new();
 
@@ -28,6 +30,9 @@ public sealed class EstimatorOptions
     /// <summary>Noise of the differential from sample to sample, relative standard deviation: 0.6 %.</summary>
     public Ratio DifferentialNoise => Ratio.FromDecimalFractions(RawDifferentialNoise);
 
+    /// <summary>Noise of the feed flow from sample to sample, relative standard deviation: 0.3 %. Counts where the flow is reported by exception.</summary>
+    public Ratio FeedFlowNoise => Ratio.FromDecimalFractions(RawFlowNoise);
+
     /// <summary>How far the heat per firing is expected to wander in an hour, relative standard deviation: 0.25 %.</summary>
     public Ratio HeatWander => Ratio.FromDecimalFractions(RawHeatWander);
 
@@ -37,7 +42,7 @@ public sealed class EstimatorOptions
     /// <summary>For how long the estimate goes on without an input before it no longer knows: 10 min.</summary>
     public Duration CoastTime => Duration.FromSeconds(RawCoastTime);
 
-    /// <summary>For how long a signal may stand unchanged before it is called frozen: 10 min; longer where the historian reports by exception.</summary>
+    /// <summary>For how long a sampled signal may stand unchanged before it is called frozen: 10 min. One reported by exception is judged by its own longest silence.</summary>
     public Duration LongestSilence => Duration.FromSeconds(RawLongestSilence);
 
     /// <summary>Lag of the feed-temperature sensor, made good by its trend: 12 s.</summary>
@@ -54,6 +59,8 @@ public sealed class EstimatorOptions
     internal double RawTolerance { get; private set; } = 0.02;
 
     internal double RawDifferentialNoise { get; private set; } = 0.006;
+
+    internal double RawFlowNoise { get; private set; } = 0.003;
 
     internal double RawHeatWander { get; private set; } = 0.0025;
 
@@ -111,6 +118,15 @@ public sealed class EstimatorOptions
         return Changed(copy => copy.RawDifferentialNoise = value);
     }
 
+    /// <summary>With another noise of the feed flow.</summary>
+    /// <param name="noise">Relative standard deviation, greater than zero.</param>
+    /// <exception cref="ArgumentOutOfRangeException">The noise is not greater than zero.</exception>
+    public EstimatorOptions WithFeedFlowNoise(Ratio noise)
+    {
+        double value = Require.Positive(noise.Si(), "Noise of the feed flow", Scale.None, nameof(noise));
+        return Changed(copy => copy.RawFlowNoise = value);
+    }
+
     /// <summary>With another wander of the heat per firing.</summary>
     /// <param name="inAnHour">Relative standard deviation after an hour, greater than zero.</param>
     /// <exception cref="ArgumentOutOfRangeException">The wander is not greater than zero.</exception>
@@ -139,12 +155,30 @@ public sealed class EstimatorOptions
     }
 
     /// <summary>With another time after which an unchanged signal is called frozen.</summary>
-    /// <param name="silence">Greater than zero: twice the historian's longest silence is safe.</param>
+    /// <param name="silence">Greater than zero.</param>
     /// <exception cref="ArgumentOutOfRangeException">The time is not greater than zero.</exception>
     public EstimatorOptions WithLongestSilence(Duration silence)
     {
         double value = Require.Positive(silence.Si(), "Longest silence", Scale.Seconds, nameof(silence));
         return Changed(copy => copy.RawLongestSilence = value);
+    }
+
+    /// <summary>How a signal's tag is reported; sampled unless given.</summary>
+    /// <param name="signal">Which one.</param>
+    public TagReporting Reporting(PassSignal signal) => (uint)signal < (uint)_reporting.Length ? _reporting[(int)signal] : TagReporting.Sampled;
+
+    /// <summary>With a tag that is reported otherwise: by exception, with its dead band and longest silence.</summary>
+    /// <param name="signal">Whose tag.</param>
+    /// <param name="reporting">How it is reported.</param>
+    /// <exception cref="ArgumentException">The dead band is of another quantity than the signal.</exception>
+    public EstimatorOptions WithReporting(PassSignal signal, TagReporting reporting)
+    {
+        if (!Require.NotNull(reporting, nameof(reporting)).Fits(signal)) throw new ArgumentException($"A dead band of {reporting.DeadBand} is none of {signal}.", nameof(reporting));
+        return Changed(copy =>
+        {
+            copy._reporting = [.. _reporting];
+            copy._reporting[(int)signal] = reporting;
+        });
     }
 
     /// <summary>With other lags of the sensors.</summary>

@@ -1,4 +1,5 @@
 using TwoPhase.Metering;
+using TwoPhase.Numerics;
 using TwoPhase.Passes;
 using TwoPhase.Units;
 using UnitsNet;
@@ -64,6 +65,32 @@ public sealed class GeneratorEstimator
             throw new ArgumentException(FormattableString.Invariant($"A reading of {reading.Passes.Count} passes is given to a generator of {_estimators.Length}."), nameof(reading));
         for (int i = 0; i < _estimators.Length; i++) _estimates[i] = _estimators[i].Update(reading.ReadingOf(i));
         Compare();
+    }
+
+    /// <summary>What a later estimator of the same generator needs to go on from here.</summary>
+    public EstimatorState Save()
+    {
+        StateFields state = StateFields.ToSave();
+        List(state);
+        return new(state.Saved);
+    }
+
+    /// <summary>Goes on from a saved state, as if nothing had been in between.</summary>
+    /// <param name="state">The state.</param>
+    /// <exception cref="FormatException">The state is of another generator, other options or another version. The estimator must then be made anew.</exception>
+    public void Restore(EstimatorState state) => List(StateFields.ToTakeUp(Require.NotNull(state, nameof(state)).Fields));
+
+    private void List(StateFields state)
+    {
+        state.Flag("common is far", ref _commonIsFar);
+        for (int i = 0; i < _estimators.Length; i++)
+        {
+            int origin = (int)_shifts[i].Origin;
+            StateFields pass = state.Part(FormattableString.Invariant($"pass {i + 1}"));
+            pass.Number("origin", ref origin);
+            _shifts[i] = _shifts[i] with { Origin = (ShiftOrigin)origin };
+            _estimators[i].List(pass);
+        }
     }
 
     private void Compare()

@@ -29,16 +29,16 @@ internal struct OperatingStateFinder
         };
     }
 
-    public readonly void Save(StateWriter to)
+    public void List(StateFields state)
     {
-        foreach (bool flag in (bool[])[_fire, _aboveLow, _aboveHalf, _feed, _wet]) to.Add(flag ? 1 : 0);
-        to.Add((double)State);
-    }
-
-    public void Load(StateReader from)
-    {
-        (_fire, _aboveLow, _aboveHalf, _feed, _wet) = (from.Next() == 1, from.Next() == 1, from.Next() == 1, from.Next() == 1, from.Next() == 1);
-        State = (OperatingState)from.Next();
+        state.Flag("fire", ref _fire);
+        state.Flag("above low", ref _aboveLow);
+        state.Flag("above half", ref _aboveHalf);
+        state.Flag("feed", ref _feed);
+        state.Flag("wet", ref _wet);
+        int now = (int)State;
+        state.Number("state", ref now);
+        State = (OperatingState)now;
     }
 
     private readonly struct Hysteresis(double low, double high)

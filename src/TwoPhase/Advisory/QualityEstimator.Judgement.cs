@@ -40,7 +40,8 @@ public sealed partial class QualityEstimator
         double byStir = Math.Max(MotionShare * _stir, LingerShare * _linger), tracked = byHeat * byHeat * _heat.Variance, ends = Math.Sqrt(tracked + (byStir * byStir));
 
         // The quality is the work of the heat of a whole residence, so noise of the heat that is shorter than that leaves the less of it.
-        double noise = tracked * _heat.Memory / (_heat.Memory + _shadow.Residence);
+        // A flow that is known from few reports is off for longer than that, and the meter does not show it.
+        double noise = (tracked * _heat.Memory / (_heat.Memory + _shadow.Residence)) + (4 * byDifferential * byDifferential * _flow.Variance);
         double spread = Math.Sqrt(noise + (byStir * byStir) + (Floor * Floor) + (half * half));
         double meter = byDifferential * Math.Sqrt(_gainVariance);
         _trust = Decide(fault, motion, now);
@@ -96,32 +97,26 @@ public sealed partial class QualityEstimator
         else if (gap < limit / 2) _disagreesSince = double.NaN;
     }
 
-    private double Indicated(double now) => _flow.Silent(now) > 0 || _differential.Silent(now) > 0 || !_pressure.IsKnown
+    private double Indicated(double now) => !_flow.IsCurrent(now) || !_differential.IsCurrent(now) || !_pressure.IsKnown
         ? double.NaN
-        : Meter.QualityOrNaN(FeedFlow, _pressure.Value, Math.Exp(_differential.Value - _meterFactor));
+        : Meter.QualityOrNaN(Math.Exp(_flow.Value), _pressure.Value, Math.Exp(_differential.Value - _meterFactor));
 
     private PassSignal Fault(double now)
     {
-        if (IsGone(_flow, now, Options.RawLongestSilence)) return PassSignal.FeedFlow;
-        if (IsGone(_pressure, now, double.PositiveInfinity)) return PassSignal.OutletPressure;
-        if (IsGone(_temperature, now, double.PositiveInfinity)) return PassSignal.FeedTemperature;
-        if (_firing.IsKnown && _firing.Silent(now) > Hold) return PassSignal.Firing;
-        return IsGone(_differential, now, Options.RawLongestSilence) ? PassSignal.Differential : PassSignal.None;
+        if (_flow.IsGone(now)) return PassSignal.FeedFlow;
+        if (_pressure.IsGone(now)) return PassSignal.OutletPressure;
+        if (_temperature.IsGone(now)) return PassSignal.FeedTemperature;
+        if (_firing.IsKnown && _firing.IsGone(now)) return PassSignal.Firing;
+        return _differential.IsGone(now) ? PassSignal.Differential : PassSignal.None;
     }
-
-    private static bool IsGone(in InputTracker tracker, double now, double longestUnchanged) =>
-        !tracker.IsKnown || tracker.Silent(now) > Hold || tracker.Unchanged(now) > longestUnchanged;
 
     // How long the estimate has gone on without a signal; a frozen one counts from when it was called so.
     private double SilenceOf(PassSignal signal, double now) => signal switch
     {
-        PassSignal.FeedFlow => Silence(_flow, now, Options.RawLongestSilence),
-        PassSignal.OutletPressure => Silence(_pressure, now, double.PositiveInfinity),
-        PassSignal.FeedTemperature => Silence(_temperature, now, double.PositiveInfinity),
-        PassSignal.Firing => Silence(_firing, now, double.PositiveInfinity),
-        _ => Silence(_differential, now, Options.RawLongestSilence),
+        PassSignal.FeedFlow => _flow.Silence(now),
+        PassSignal.OutletPressure => _pressure.Silence(now),
+        PassSignal.FeedTemperature => _temperature.Silence(now),
+        PassSignal.Firing => _firing.Silence(now),
+        _ => _differential.Silence(now),
     };
-
-    private static double Silence(in InputTracker tracker, double now, double longestUnchanged) =>
-        tracker.IsKnown ? Math.Max(tracker.Silent(now), tracker.Unchanged(now) - longestUnchanged) : double.PositiveInfinity;
 }

@@ -6,49 +6,51 @@ namespace TwoPhase.Advisory;
 // Saved and taken up again without a bump.
 public sealed partial class QualityEstimator
 {
-    // Changes with every change of what is saved.
-    private const double StateVersion = 1;
-
     /// <summary>What a later estimator of the same pass needs to go on from here.</summary>
     public EstimatorState Save()
     {
-        var to = new StateWriter();
-        to.Add(StateVersion);
-        _clock.Save(to);
-        _flow.Save(to);
-        _temperature.Save(to);
-        _pressure.Save(to);
-        _firing.Save(to);
-        _differential.Save(to);
-        _heat.Save(to);
-        _state.Save(to);
-        foreach (double number in (double[])[_heatInShadow, _learntHeat, _running, _error, _motion, _laggedDifferential, _meterFactor, _gainVariance, _moved, _disagreesSince, _stir, _linger, _lastMoving, (double)_trust]) to.Add(number);
-        _shadow.Save(to);
-        return new(to.ToArray());
+        StateFields state = StateFields.ToSave();
+        List(state);
+        return new(state.Saved);
     }
 
     /// <summary>Goes on from a saved state, as if nothing had been in between.</summary>
     /// <param name="state">The state.</param>
-    /// <exception cref="FormatException">The state is of another pass, other options or another version.</exception>
-    public void Restore(EstimatorState state)
+    /// <exception cref="FormatException">The state is of another pass, other options or another version; the message says what is missing. The estimator must then be made anew.</exception>
+    public void Restore(EstimatorState state) => List(StateFields.ToTakeUp(Require.NotNull(state, nameof(state)).Fields));
+
+    /// <summary>Everything that goes on, each once.</summary>
+    internal void List(StateFields state)
     {
-        StateReader from = Require.NotNull(state, nameof(state)).Reader();
-        double version = from.Next();
-        if (version != StateVersion) throw new FormatException(FormattableString.Invariant($"A saved state of version {version} is not of this library, which writes version {StateVersion}."));
-        _clock.Load(from);
-        _flow.Load(from);
-        _temperature.Load(from);
-        _pressure.Load(from);
-        _firing.Load(from);
-        _differential.Load(from);
-        _heat.Load(from);
-        _state.Load(from);
-        (_heatInShadow, _learntHeat, _running, _error, _motion) = (from.Next(), from.Next(), from.Next(), from.Next(), from.Next());
-        (_laggedDifferential, _meterFactor, _gainVariance, _moved, _disagreesSince, _stir, _linger, _lastMoving) = (from.Next(), from.Next(), from.Next(), from.Next(), from.Next(), from.Next(), from.Next(), from.Next());
-        _trust = (Trust)from.Next();
-        _shadow.Load(from);
-        if (!from.IsAtEnd) throw new FormatException("A saved state is longer than this pass needs: it is of another pass.");
-        _warm.Clear();
-        _last = QualityEstimate.Nothing(default, double.NaN);
+        _clock.List(state.Part("clock"));
+        _flow.List(state.Part("feed flow"));
+        _temperature.List(state.Part("feed temperature"));
+        _pressure.List(state.Part("outlet pressure"));
+        _firing.List(state.Part("firing"));
+        _differential.List(state.Part("differential"));
+        _heat.List(state.Part("heat"));
+        _state.List(state.Part("operation"));
+        _warm.List(state.Part("warm-up"));
+        _skew.List(state.Part("skew"));
+        _shadow.List(state.Part("shadow"));
+        state.Number("heat in shadow", ref _heatInShadow);
+        state.Number("heat per firing", ref _learntHeat);
+        state.Number("running", ref _running);
+        state.Number("error", ref _error);
+        state.Number("motion", ref _motion);
+        state.Number("lagged differential", ref _laggedDifferential);
+        state.Number("meter factor", ref _meterFactor);
+        state.Number("gain variance", ref _gainVariance);
+        state.Number("moved", ref _moved);
+        state.Number("disagrees since", ref _disagreesSince);
+        state.Number("stir", ref _stir);
+        state.Number("linger", ref _linger);
+        state.Number("last moving", ref _lastMoving);
+        int trust = (int)_trust;
+        state.Number("trust", ref trust);
+        _trust = (Trust)trust;
+
+        // What was said last is not saved: a reading that comes again after the restart is told nothing.
+        if (!state.IsSaving) _last = QualityEstimate.Nothing(default, double.NaN);
     }
 }

@@ -25,9 +25,6 @@ public sealed partial class QualityEstimator
     private const double WarmUp = 60;
     private const int FewestReadings = 5;
 
-    // A signal missing for less than this is held [s]; longer, it is a fault.
-    private const double Hold = 15;
-
     // How fast the shadow's heat is brought to what is wanted [s].
     private const double SteerTime = 20;
 
@@ -37,10 +34,14 @@ public sealed partial class QualityEstimator
     // Smoothing of flow and differential for the comparison with an independent test [s].
     private const double TestSmoothing = 30;
 
+    // How far a flow and a differential at rest wander in an hour, where they are reported by exception.
+    private const double FlowWander = 0.002, DifferentialWander = 0.01;
+
     private readonly ShadowPass _shadow;
     private readonly double _fullHeat;
     private readonly WarmUpMeans _warm = new();
-    private InputTracker _flow = new(TestSmoothing, 0.5), _temperature = new(TemperatureSmoothing, 40), _pressure = new(PressureSmoothing, 1e6), _firing = new(0, 2), _differential = new(TestSmoothing, 1);
+    private readonly SkewFinder _skew = new();
+    private InputTracker _flow, _temperature, _pressure, _firing, _differential;
     private HeatTracker _heat;
     private OperatingStateFinder _state;
     private Clock _clock;
@@ -63,6 +64,11 @@ public sealed partial class QualityEstimator
         _shadow = new(pass, meter, Options.Models, Options.Cells);
         _fullHeat = pass.HeatAtFullFiring?.Si() ?? double.NaN;
         _heat = new(Options.RawDifferentialNoise, Options.RawHeatWander);
+        _flow = new(TestSmoothing, 0.5, Options.Reporting(PassSignal.FeedFlow), Options.RawLongestSilence, Options.RawFlowNoise, FlowWander);
+        _temperature = new(TemperatureSmoothing, 40, Options.Reporting(PassSignal.FeedTemperature), double.PositiveInfinity);
+        _pressure = new(PressureSmoothing, 1e6, Options.Reporting(PassSignal.OutletPressure), double.PositiveInfinity);
+        _firing = new(0, 2, Options.Reporting(PassSignal.Firing), double.PositiveInfinity);
+        _differential = new(TestSmoothing, 1, Options.Reporting(PassSignal.Differential), Options.RawLongestSilence, Options.RawDifferentialNoise, DifferentialWander);
         double uncertainty = MeterBudget.LogDifferential(meter, Options);
         _gainVariance = uncertainty * uncertainty;
         _disagreesSince = double.NaN;
@@ -77,6 +83,10 @@ public sealed partial class QualityEstimator
     /// <summary>How it estimates.</summary>
     public EstimatorOptions Options { get; }
 
+    /// <summary>By how much the differential's tag comes later than that of the feed flow (earlier when negative), as two moves of the flow or more have shown it; null until then.</summary>
+    /// <remarks>Reported, not made good. Beyond some seconds every move of the flow makes the raw reading jump, and the historian's clocks or filters want looking at.</remarks>
+    public Duration? DifferentialSkew => double.IsNaN(_skew.Skew) ? null : Duration.FromSeconds(_skew.Skew);
+
     /// <summary>Whether there is a base to have a gap against.</summary>
     internal bool KnowsGap => _shadow.Runs && _heat.Learnt > 0;
 
@@ -85,6 +95,19 @@ public sealed partial class QualityEstimator
 
     /// <summary>∂ln Δp/∂ln Q.</summary>
     internal double DifferentialByHeat => _shadow.QualityByHeat / _shadow.QualityByDifferential;
+
+    /// <summary>M/ṁ [s], the water's way through the pass.</summary>
+    internal double Residence => _shadow.Residence;
+
+    /// <summary>What the pass stands at, with the heat that gives the estimated quality at rest; null while nothing is known.</summary>
+    internal PassConditions? Conditions => _shadow.Runs
+        ? new(MassFlow.FromKilogramsPerSecond(FeedFlow), Temperature.FromKelvins(_temperature.Level), Pressure.FromPascals(_pressure.Level), Power.FromWatts(Math.Max(0, HeatAtRest(_shadow.Quality))))
+        : null;
+
+    /// <summary>Feed flow over the present one with which a quality leaves at rest, at the present heat.</summary>
+    internal double FlowFor(double quality) => HeatAtRest(_shadow.Quality) / HeatAtRest(quality);
+
+    private double HeatAtRest(double quality) => _shadow.HeatFor(quality, FeedFlow, _temperature.Level, _pressure.Level);
 
     /// <summary>Takes one reading. Never throws for what it holds; a reading no newer than the last changes nothing.</summary>
     /// <param name="reading">The reading; pressures absolute, firing as a share of full firing.</param>
@@ -110,17 +133,20 @@ public sealed partial class QualityEstimator
 
     private void Take(in PassReading reading, double now, double elapsed)
     {
-        _flow.Accept(Log(reading[PassSignal.FeedFlow].Si), now, elapsed);
-        _temperature.Accept(reading[PassSignal.FeedTemperature].Si, now, elapsed);
-        _pressure.Accept(reading[PassSignal.OutletPressure].Si, now, elapsed);
-        _firing.Accept(reading[PassSignal.Firing].Si, now, elapsed);
-        _differential.Accept(Log(reading[PassSignal.Differential].Si), now, elapsed);
+        Take(ref _flow, reading[PassSignal.FeedFlow], isLog: true, now, elapsed);
+        Take(ref _temperature, reading[PassSignal.FeedTemperature], isLog: false, now, elapsed);
+        Take(ref _pressure, reading[PassSignal.OutletPressure], isLog: false, now, elapsed);
+        Take(ref _firing, reading[PassSignal.Firing], isLog: false, now, elapsed);
+        Take(ref _differential, reading[PassSignal.Differential], isLog: true, now, elapsed);
     }
+
+    private static void Take(ref InputTracker tracker, in Signal signal, bool isLog, double now, double elapsed) =>
+        tracker.Accept(isLog ? Log(signal.Si) : signal.Si, signal.Status == SignalStatus.Missing, now, elapsed);
 
     // Flow and differential go by their logarithm, so that a spike is a spike at any load.
     private static double Log(double value) => value > 0 ? Math.Log(value) : double.NaN;
 
-    private double FeedFlow => Math.Exp(_flow.Value);
+    private double FeedFlow => Math.Exp(_flow.Believed);
 
     private OperatingState FindState(OperatingState given)
     {
@@ -133,8 +159,8 @@ public sealed partial class QualityEstimator
     private double RestingQuality()
     {
         double full = double.IsNaN(_fullHeat) ? _learntHeat : _fullHeat;
-        if (full > 0 && _temperature.IsKnown && _pressure.IsKnown) return _shadow.RestingQuality(full * Firing, FeedFlow, _temperature.Value, _pressure.Value);
-        return Meter.QualityOrNaN(FeedFlow, _pressure.Value, Math.Exp(_differential.Value));
+        if (full > 0 && _temperature.IsKnown && _pressure.IsKnown) return _shadow.RestingQuality(full * Firing, FeedFlow, _temperature.Believed, _pressure.Believed);
+        return Meter.QualityOrNaN(FeedFlow, _pressure.Believed, Math.Exp(_differential.Believed));
     }
 
     private void Move(double now, double elapsed)
@@ -152,7 +178,7 @@ public sealed partial class QualityEstimator
         Compare(now, elapsed);
     }
 
-    private double Firing => _firing.IsKnown ? _firing.Value : 1;
+    private double Firing => _firing.IsKnown ? _firing.Believed : 1;
 
     private ImposedInputs Inputs() => new(
         FeedFlow,
@@ -162,18 +188,33 @@ public sealed partial class QualityEstimator
 
     private void Compare(double now, double elapsed)
     {
-        double share = 1 - Math.Exp(-elapsed / TrustSmoothing), away = Math.Log(_shadow.OutletFlow) - _flow.Value;
+        double share = 1 - Math.Exp(-elapsed / TrustSmoothing), away = Math.Log(_shadow.OutletFlow) - _flow.Believed;
         if (Fast.IsFinite(away)) _motion += share * (away - _motion);
         _laggedDifferential += (Options.RawDifferentialLag > 0 ? 1 - Math.Exp(-elapsed / Options.RawDifferentialLag) : 1) * (Math.Log(_shadow.Differential) - _laggedDifferential);
-        bool measured = _differential.Silent(now) <= 0 && Fast.IsFinite(_laggedDifferential);
+        bool measured = _differential.IsCurrent(now) && Fast.IsFinite(_laggedDifferential);
+        Doubt();
         if (measured) Learn(elapsed);
         else _heat.Coast(elapsed);
+        if (measured) _skew.Take(now, _flow.Value, _laggedDifferential, _differential.Value);
         Steer(elapsed);
+    }
+
+    // A report of firing or feed temperature is off by up to half its dead band, which looks like heat until the differential has shown how much.
+    private void Doubt()
+    {
+        double heat = 0;
+        if (_firing.IsFresh) heat += Square(_firing.Band / _firing.Value);
+        if (_temperature.IsFresh && _temperature.Band > 0) heat += Square(_temperature.Band * _shadow.HeatByFeedTemperature(_temperature.Value));
+        _heat.Doubt(heat / 12);
+
+        static double Square(double value) => value * value;
     }
 
     private void Learn(double elapsed)
     {
-        _heat.Update(elapsed, _differential.Value - _meterFactor - _laggedDifferential, DifferentialByHeat, _heatInShadow, 2 * _motion, Options.RawDisagreementLimit);
+        // Where nothing was reported, all that is known is that it lies within the dead band.
+        double band = _differential.IsFresh ? 0 : _differential.Band;
+        _heat.Update(elapsed, _differential.Value - _meterFactor - _laggedDifferential, band, DifferentialByHeat, _heatInShadow, 2 * _motion, Options.RawDisagreementLimit);
         if (double.IsNaN(_disagreesSince)) _heat.LearnBase(elapsed);
     }
 
@@ -186,8 +227,8 @@ public sealed partial class QualityEstimator
 
     private void WarmUpTo(double now, double elapsed)
     {
-        if (Fault(now) != PassSignal.None || !_differential.IsKnown || _differential.Silent(now) > 0 || !_temperature.IsKnown || !_pressure.IsKnown) return;
-        _warm.Add(elapsed, FeedFlow, _temperature.Value, _pressure.Value, Firing, Math.Exp(_differential.Value));
+        if (Fault(now) != PassSignal.None || !_differential.IsCurrent(now) || !_temperature.IsKnown || !_pressure.IsKnown) return;
+        _warm.Add(elapsed, FeedFlow, _temperature.Believed, _pressure.Believed, Firing, Math.Exp(_differential.Believed));
         if (_warm.Seconds < WarmUp || _warm.Count < FewestReadings) return;
         double indicated = Meter.QualityOrNaN(_warm.Flow, _warm.Pressure, _warm.Differential * Math.Exp(-_meterFactor));
         double heat = _shadow.HeatFor(indicated, _warm.Flow, _warm.Temperature, _warm.Pressure);
@@ -218,6 +259,7 @@ public sealed partial class QualityEstimator
         _pressure.Shift(by);
         _firing.Shift(by);
         _differential.Shift(by);
+        _skew.Restart();
         _disagreesSince += by;
         _moved += by;
         _lastMoving += by;

@@ -26,6 +26,7 @@ internal sealed class ShadowPass
     private readonly Channel<SurfaceFluid> _channel;
     private readonly QualityMeter _meter;
     private double _flow;
+    private bool _runs;
 
     public ShadowPass(Pass pass, QualityMeter meter, PassModels models, int cells)
     {
@@ -35,7 +36,7 @@ internal sealed class ShadowPass
     }
 
     /// <summary>Whether it runs; what it says means nothing while it does not.</summary>
-    public bool Runs { get; private set; }
+    public bool Runs => _runs;
 
     /// <summary>Largest flow area of all parallel tubes [m²].</summary>
     public double Area { get; }
@@ -57,6 +58,13 @@ internal sealed class ShadowPass
 
     /// <summary>∂x/∂ln Q at rest: (hout − hfeed)/hfg.</summary>
     public double QualityByHeat { get; private set; }
+
+    /// <summary>∂ln Q/∂T of the feed [1/K], what a warmer feed is worth as heat.</summary>
+    public double HeatByFeedTemperature(double temperature)
+    {
+        double pressure = _channel.InletPressure;
+        return (_fluid.LiquidEnthalpy(pressure, temperature + 1) - _fluid.LiquidEnthalpy(pressure, temperature)) / (_channel.Outlet.OutEnthalpy - _channel.FeedEnthalpy);
+    }
 
     /// <summary>Whether the inputs are such as a pass with water flowing through it can have.</summary>
     public bool Accepts(in ImposedInputs inputs) =>
@@ -84,7 +92,7 @@ internal sealed class ShadowPass
         for (int round = 0; round < StartRounds; round++)
         {
             Impose(inputs, inlet);
-            Runs = _channel.Rest(inputs.FeedFlow, inputs.OutletPressure) && Fast.IsFinite(_channel.Mass);
+            _runs = _channel.Rest(inputs.FeedFlow, inputs.OutletPressure) && Fast.IsFinite(_channel.Mass);
             if (!Runs) return;
             inlet = _channel.InletPressure;
         }
@@ -97,11 +105,11 @@ internal sealed class ShadowPass
     {
         if (!Runs) return;
         Impose(inputs, _channel.InletPressure);
-        Runs = Accepts(inputs) && _channel.Advance(seconds, inputs.FeedFlow, inputs.OutletPressure) && Fast.IsFinite(_channel.Outlet.Outflow);
+        _runs = Accepts(inputs) && _channel.Advance(seconds, inputs.FeedFlow, inputs.OutletPressure) && Fast.IsFinite(_channel.Outlet.Outflow);
         if (Runs) Look();
     }
 
-    public void Stop() => Runs = false;
+    public void Stop() => _runs = false;
 
     /// <summary>Δp that the meter would make of what leaves [Pa].</summary>
     public double Differential { get; private set; }
@@ -109,18 +117,11 @@ internal sealed class ShadowPass
     /// <summary>∂x/∂ln Δp of the meter.</summary>
     public double QualityByDifferential { get; private set; }
 
-    public void Save(StateWriter to)
+    public void List(StateFields state)
     {
-        to.Add(Runs ? 1 : 0);
-        to.Add(_flow);
-        _channel.Save(to);
-    }
-
-    public void Load(StateReader from)
-    {
-        Runs = from.Next() == 1;
-        _flow = from.Next();
-        _channel.Load(from);
+        state.Flag("runs", ref _runs);
+        state.Number("flow", ref _flow);
+        state.Block("channel", _channel.Save, _channel.Load);
         if (Runs) Look();
     }
 

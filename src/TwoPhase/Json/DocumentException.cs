@@ -1,3 +1,5 @@
+using System.Text.Json;
+
 namespace TwoPhase.Json;
 
 /// <summary>A document that cannot be read; the message is one line and says where, as a JSON path or as line and column.</summary>
@@ -32,4 +34,17 @@ public sealed class DocumentException : Exception
 
     /// <summary>JSON path of the fault; empty when the text is no JSON at all.</summary>
     public string Path { get; } = "";
+
+    /// <summary>The same fault with the path first, in one line.</summary>
+    internal static DocumentException Of(JsonException error) => new(error.Path is { Length: > 1 } path ? path : "", Text(error), error);
+
+    private static string Text(JsonException error)
+    {
+        string where = error.LineNumber is { } line ? $"line {line + 1}, column {(error.BytePositionInLine ?? 0) + 1}: " : "";
+        int details = error.Message.IndexOf(" Path: $", StringComparison.Ordinal);
+        int position = error.Message.IndexOf(" LineNumber: ", StringComparison.Ordinal);
+        int end = details >= 0 ? details : position >= 0 ? position : error.Message.Length;
+        string message = string.Join(" ", error.Message[..end].Split('\r', '\n'));
+        return where + message.TrimEnd('.');
+    }
 }

@@ -26,7 +26,7 @@ public static class GeneratorJson
         }
         catch (JsonException error)
         {
-            throw new DocumentException(error.Path is { Length: > 1 } path ? path : "", Message(error), error);
+            throw DocumentException.Of(error);
         }
     }
 
@@ -34,14 +34,4 @@ public static class GeneratorJson
     /// <param name="generator">The generator.</param>
     public static string Write(SteamGenerator generator) =>
         JsonSerializer.Serialize(GeneratorDocument.Of(Require.NotNull(generator, nameof(generator))), Context.GeneratorDocument);
-
-    private static string Message(JsonException error)
-    {
-        string where = error.LineNumber is { } line ? $"line {line + 1}, column {(error.BytePositionInLine ?? 0) + 1}: " : "";
-        int details = error.Message.IndexOf(" Path: $", StringComparison.Ordinal);
-        int position = error.Message.IndexOf(" LineNumber: ", StringComparison.Ordinal);
-        int end = details >= 0 ? details : position >= 0 ? position : error.Message.Length;
-        string message = string.Join(" ", error.Message[..end].Split('\r', '\n'));
-        return where + message.TrimEnd('.');
-    }
 }

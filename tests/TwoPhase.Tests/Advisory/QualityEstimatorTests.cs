@@ -1,6 +1,7 @@
 using MathNet.Numerics.Statistics;
 using TwoPhase.Advisory;
 using TwoPhase.Dynamics;
+using TwoPhase.Json;
 using TwoPhase.Metering;
 using TwoPhase.Passes;
 using TwoPhase.Slip;
@@ -66,7 +67,7 @@ public class QualityEstimatorTests
         (PassReading Reading, double Truth)[] readings = [.. Readings(Still.StepFiring(Duration.FromSeconds(400), Ratio.FromPercent(106)), 700, 2)];
         var whole = new QualityEstimator(KnownPass, Meter);
         Run(whole, readings.Take(500));
-        EstimatorState state = EstimatorState.Parse(whole.Save().ToString());
+        EstimatorState state = EstimatorJson.Read(EstimatorJson.Write(whole.Save()));
         var second = new QualityEstimator(KnownPass, Meter);
         second.Restore(state);
         Assert.Equal(Run(whole, readings.Skip(500)), Run(second, readings.Skip(500)));
@@ -89,8 +90,10 @@ public class QualityEstimatorTests
     {
         var estimator = new QualityEstimator(KnownPass, Meter, EstimatorOptions.Default.WithCells(40));
         Assert.Contains("number of cells", Assert.Throws<FormatException>(() => estimator.Restore(new QualityEstimator(KnownPass, Meter).Save())).Message, StringComparison.Ordinal);
-        Assert.Throws<FormatException>(() => estimator.Restore(new EstimatorState([1, 2, 3])));
-        Assert.Contains("version 7", Assert.Throws<FormatException>(() => estimator.Restore(new EstimatorState([7]))).Message, StringComparison.Ordinal);
+        Assert.Contains("no 'clock.known'", Assert.Throws<FormatException>(() => estimator.Restore(EstimatorJson.Read("""{ "version": 2, "fields": {} }"""))).Message, StringComparison.Ordinal);
+        Assert.Contains("version 7", Assert.Throws<DocumentException>(() => EstimatorJson.Read("""{ "version": 7, "fields": {} }""")).Message, StringComparison.Ordinal);
+        Assert.Equal("$.fields", Assert.Throws<DocumentException>(() => EstimatorJson.Read("""{ "version": 2 }""")).Path);
+        Assert.Throws<DocumentException>(() => EstimatorJson.Read("no json"));
     }
 
     [Theory]
@@ -189,6 +192,23 @@ public class QualityEstimatorTests
         double moving = Rms(400, 900, estimate => estimate.RawQuality), reading = Rms(400, 900, estimate => estimate.RawIndicated);
         Assert.True(moving < 0.5 * reading, $"{moving:F4} against {reading:F4}");
         Assert.True(Rms(1000, 1200, estimate => estimate.RawQuality) < 0.005, $"at rest {Rms(1000, 1200, estimate => estimate.RawQuality):F4}");
+    }
+
+    // The tags of flow and differential come by different ways: the clocks or filters between them are 15 s apart.
+    [Theory]
+    [InlineData(15), InlineData(-15), InlineData(0)]
+    public void DifferentialSkew_AfterTwoMovesOfTheFlow_IsFound(int skew)
+    {
+        OperatingSchedule moves = Still.StepFeedFlow(Duration.FromSeconds(400), Start.FeedFlow * 0.95).StepFeedFlow(Duration.FromSeconds(900), Start.FeedFlow);
+        (PassReading Reading, double Truth)[] readings = [.. Readings(moves, 1100, 7)];
+        var estimator = new QualityEstimator(KnownPass, Meter);
+        for (int t = 20; t < readings.Length - 20; t++)
+        {
+            estimator.Update(readings[t].Reading.With(PassSignal.Differential, readings[t - skew].Reading.Differential!.Value.Pascals));
+            if (t < 850) Assert.Null(estimator.DifferentialSkew);
+        }
+
+        Approx.Absolute(skew, estimator.DifferentialSkew!.Value.Seconds, 3);
     }
 
     [Fact]
