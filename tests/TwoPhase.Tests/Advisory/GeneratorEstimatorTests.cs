@@ -46,6 +46,32 @@ public class GeneratorEstimatorTests
         Assert.Throws<ArgumentException>(() => estimator.Update(new GeneratorReading(Midnight, [])));
     }
 
+    [Fact]
+    public void Restore_InADrift_GoesOnWithoutABump()
+    {
+        static GeneratorEstimator New() => new(new SteamGenerator("three", [Named("a"), Named("b"), Named("c")]), EstimatorOptions.Default.WithCells(30));
+        GeneratorReading[] readings = [.. Enumerable.Range(0, 3).Select(i => Readings(Still, 1300, i, meter: t => i == 0 ? 1 - (0.08 * Math.Min(1, Math.Max(0, (t - 400) / 600))) : 1).ToArray()).Aggregate(
+            Enumerable.Range(0, 1300).Select(t => new List<PassReading>()).ToArray(),
+            (rows, pass) =>
+            {
+                for (int t = 0; t < rows.Length; t++) rows[t].Add(pass[t].Reading);
+                return rows;
+            }).Select(row => new GeneratorReading(row[0].Time, row))];
+        GeneratorEstimator whole = New(), second = New();
+        foreach (GeneratorReading reading in readings.Take(1000)) whole.Update(reading);
+        Assert.Equal(ShiftOrigin.ThisPass, whole.Shifts[0].Origin);
+        second.Restore(EstimatorState.Parse(whole.Save().ToString()));
+        foreach (GeneratorReading reading in readings.Skip(1000))
+        {
+            whole.Update(reading);
+            second.Update(reading);
+            Assert.Equal(whole.Estimates, second.Estimates);
+            Assert.Equal(whole.Shifts, second.Shifts);
+        }
+
+        Assert.Contains("no 'common is far'", Assert.Throws<FormatException>(() => New().Restore(whole.Estimators[0].Save())).Message, StringComparison.Ordinal);
+    }
+
     private static double Drift(double t) => Math.Min(1, Math.Max(0, (t - 600) / 2400));
 
     private static GeneratorEstimator Run(Func<int, double, double> heat, Func<int, double, double> meter, out double called)
