@@ -67,6 +67,29 @@ public sealed class GeneratorEstimator
         Compare();
     }
 
+    /// <summary>Pairs of passes whose differentials or feed flows look exchanged since the base was learnt: both have shifted, and the other one's value explains it in both.</summary>
+    /// <remarks>Seen only where the two values differ by more than the limit of disagreement does. Two passes that answer each other's moves are the proof.</remarks>
+    public IReadOnlyList<SwapSuspect> FindSwaps()
+    {
+        List<SwapSuspect> suspects = [];
+        for (int i = 0; i < _estimators.Length; i++)
+        {
+            for (int j = i + 1; j < _estimators.Length; j++)
+            {
+                if (_shifts[i].Origin is not (ShiftOrigin.ThisPass or ShiftOrigin.NotSeparable) || _shifts[j].Origin is not (ShiftOrigin.ThisPass or ShiftOrigin.NotSeparable)) continue;
+                QualityEstimator one = _estimators[i], other = _estimators[j];
+                double differential = other.Smoothed.Differential - one.Smoothed.Differential, flow = other.Smoothed.Flow - one.Smoothed.Flow;
+                if (Explains(i, differential) && Explains(j, -differential)) suspects.Add(new(i, j, PassSignal.Differential));
+                else if (Explains(i, -flow * one.DifferentialByFlow) && Explains(j, flow * other.DifferentialByFlow)) suspects.Add(new(i, j, PassSignal.FeedFlow));
+            }
+        }
+
+        return suspects;
+    }
+
+    // Whether ln Δp so much higher would leave no shift.
+    private bool Explains(int pass, double change) => Math.Abs(_shifts[pass].RawOwn + (change / _estimators[pass].DifferentialByHeat)) < _limit / 2;
+
     /// <summary>What a later estimator of the same generator needs to go on from here.</summary>
     public EstimatorState Save()
     {

@@ -14,7 +14,7 @@ internal struct InputTracker
     // A value this far from the last, over what the signal may move from one to the next, is taken for a spike until it has come again.
     private const int SpikesBelieved = 4;
 
-    // Further than this over what the filter foresees, in standard deviations, a report is a move and no noise; one that leaps over so many dead bands is no ramp.
+    // Further than this over what the filter foresees, in standard deviations, a report may be a move; one that leaps over so many dead bands is no ramp.
     private const double IsMove = 4, IsLeap = 2;
 
     private readonly double _smoothing, _mayMove, _hold, _longestUnchanged, _deadBand, _noise, _wander;
@@ -116,9 +116,10 @@ internal struct InputTracker
     {
         _variance += _wander * elapsed;
         double spread = Math.Sqrt(_variance + (_noise * _noise)), off = value - _believed, told = 1;
+        // A wild report, or a move: the next sample shows which, whether it stays by that report or not.
         if (IsFresh && Math.Abs(off) > IsMove * spread)
         {
-            (_believed, _variance) = (value, _noise * _noise);
+            _variance += off * off / 4;
             return;
         }
 

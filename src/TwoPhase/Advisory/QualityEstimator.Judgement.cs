@@ -13,6 +13,9 @@ public sealed partial class QualityEstimator
     // A state of trust is left at this part of what it is entered at, and motion must last, and be over, for so long [s], so that it does not flicker.
     private const double Leave = 0.6, Persist = 30;
 
+    // What of the reading's error is not the holdup's motion must last so long to count [s]: noise that lasts a minute, or a report that stands for some, is no false reading.
+    private const double NoiseTime = 300;
+
     private double _stir, _linger, _lastMoving = double.NegativeInfinity;
 
     private QualityEstimate Judge(DateTimeOffset time, double now, double elapsed, OperatingState state)
@@ -33,7 +36,7 @@ public sealed partial class QualityEstimator
         double quality = _shadow.Quality, motion = 2 * _motion * byDifferential, gap = _heat.Gap * byHeat;
         _stir = Math.Max(Math.Abs(motion), _stir * Math.Exp(-elapsed / StirTime));
         _linger = Math.Max(Math.Abs(motion), _linger * Math.Exp(-elapsed / LingerTime));
-        if (Fast.IsFinite(indicated)) _error += (1 - Math.Exp(-elapsed / TrustSmoothing)) * (indicated - quality - _error);
+        if (Fast.IsFinite(indicated)) _error += (1 - Math.Exp(-elapsed / NoiseTime)) * (indicated - quality - motion - _error);
         WatchDisagreement(now);
         bool apart = !double.IsNaN(_disagreesSince);
         double half = apart ? gap / 2 : 0;
@@ -82,7 +85,8 @@ public sealed partial class QualityEstimator
         if (!moves) _moved = double.NaN;
         else if (double.IsNaN(_moved)) _moved = now;
         if (now - _moved > Persist) _lastMoving = now;
-        if (Math.Abs(_error) > tolerance * (wasFalse ? Leave : 1)) return _error > 0 ? Trust.ReadsHigh : Trust.ReadsLow;
+        double error = motion + _error;
+        if (Math.Abs(error) > tolerance * (wasFalse ? Leave : 1)) return error > 0 ? Trust.ReadsHigh : Trust.ReadsLow;
         return now - _lastMoving < Persist || _running < _shadow.Residence ? Trust.Settling : Trust.Believable;
     }
 
