@@ -10,4 +10,7 @@ internal enum Boundary
 
     /// <summary>Both phases below, vapour above.</summary>
     Dew = 2,
+
+    /// <summary>Both phases behind, colder water ahead.</summary>
+    Collapse = 3,
 }

@@ -84,10 +84,13 @@ internal struct Cell
 
     public BentProfile Profile;
 
+    /// <summary>Where steam runs into colder water: enthalpy of the water ahead and of the mixture behind [J/kg], mass of that [kg] and share of the volume that it fills.</summary>
+    public double Ahead, Behind, MixtureMass, MixtureFills;
+
     /// <summary>Temperature of the water [K]; where a boundary stands (∂v/∂h)p of the part with one phase [m³/J].</summary>
     public double Temperature, SinglePhaseExpansion;
 
-    /// <summary>a [m³/kg] and b [m³/J] of V = a M + b H, where no boundary stands.</summary>
+    /// <summary>a [m³/kg] and b [m³/J] of V = a M + b H, where no boundary stands; of the water where steam runs into it.</summary>
     public double VolumeByMass, VolumeByEnthalpy;
 
     /// <summary>Mass flow over the outlet face [kg/s] and the enthalpy that it carries [J/kg].</summary>

@@ -11,7 +11,7 @@ internal sealed partial class Channel<TFluid>
     private static double SpreadOf(in Cell cell, double step)
     {
         double wanted = Math.Abs(cell.Slope);
-        return cell.Boundary == Boundary.None ? wanted : cell.Spread + (Math.Min(1, step * cell.Outflow * cell.PerMass) * (wanted - cell.Spread));
+        return cell.Boundary is Boundary.None or Boundary.Collapse ? wanted : cell.Spread + (Math.Min(1, step * cell.Outflow * cell.PerMass) * (wanted - cell.Spread));
     }
 
     private void FindBoundary(ref Cell cell)
@@ -19,7 +19,7 @@ internal sealed partial class Channel<TFluid>
         cell.Boundary = Boundary.None;
         ref readonly SaturatedPair steam = ref cell.Steam;
         double spread = cell.Spread, boiling = cell.HeldEnthalpy - steam.LiquidEnthalpy, dew = cell.HeldEnthalpy - steam.VapourEnthalpy;
-        if (boiling > -spread / 2 && boiling < 2 * spread) Place(ref cell, Boundary.Boiling, new() { Spread = spread, Below = 1, Above = HeldByFlow(cell, Boundary.Boiling, spread) }, boiling);
+        if (cell.Slope > 0 && boiling > -spread / 2 && boiling < 2 * spread) Place(ref cell, Boundary.Boiling, new() { Spread = spread, Below = 1, Above = HeldByFlow(cell, Boundary.Boiling, spread) }, boiling);
         else if (dew < spread / 2 && dew > -2 * spread) Place(ref cell, Boundary.Dew, new() { Spread = spread, Below = HeldByFlow(cell, Boundary.Dew, spread), Above = 1 }, dew);
     }
 
@@ -70,6 +70,7 @@ internal sealed partial class Channel<TFluid>
         {
             Boundary.Boiling => ((cell.FlowEnthalpy - cell.Steam.LiquidEnthalpy) / spread) + 0.5,
             Boundary.Dew => ((cell.Steam.VapourEnthalpy - cell.FlowEnthalpy) / spread) + 0.5,
+            Boundary.Collapse => cell.MixtureMass / cell.Mass,
             _ => cell.FlowQuality > 0 && cell.FlowQuality < 1 ? 1 : 0,
         };
     }

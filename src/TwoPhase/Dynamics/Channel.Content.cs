@@ -12,10 +12,11 @@ internal sealed partial class Channel<TFluid>
     private void Decompose(double step)
     {
         double perStep = 1 / step;
-        foreach (ref Cell cell in _cells.AsSpan())
+        for (int i = 0; i < _cells.Length; i++)
         {
+            ref Cell cell = ref _cells[i];
             cell.Spread = SpreadOf(cell, step);
-            Decompose(ref cell);
+            if (!FindCollapse(i)) Decompose(ref cell);
             Warm(ref cell, perStep);
         }
     }

@@ -22,6 +22,7 @@ internal sealed partial class Channel<TFluid>
         double boils = ShareThatBoils(cell), flux = Math.Max(0, cell.HeatToWater / cell.Surface);
         if (boils >= 1) return BoilingFilm(cell, cell.FlowEnthalpy, flux);
         if (boils <= 0) return SinglePhaseFilm(ref cell, cell.FlowEnthalpy);
+        if (cell.Boundary == Boundary.Collapse) return 1 / ((cell.MixtureFills / BoilingFilm(cell, Math.Max(cell.Behind, cell.Steam.LiquidEnthalpy), flux)) + ((1 - cell.MixtureFills) / SinglePhaseFilm(ref cell, cell.Ahead)));
         double saturated = cell.BoundaryEnthalpy, half = cell.Profile.Spread / 2, away = cell.FlowEnthalpy - saturated, below = saturated + ((away - half) / 2), above = saturated + ((away + half) / 2);
         (double wet, double single) = cell.Boundary == Boundary.Boiling ? (above, below) : (below, above);
         return 1 / ((boils / BoilingFilm(cell, wet, flux)) + ((1 - boils) / SinglePhaseFilm(ref cell, single)));

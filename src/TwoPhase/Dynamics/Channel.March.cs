@@ -19,6 +19,7 @@ internal sealed partial class Channel<TFluid>
     {
         double perStep = 1 / step, rise = _cells[0].HeatToWater / feedFlow, deviation = (2 * (_cells[0].FlowEnthalpy - FeedEnthalpy)) - rise;
         double inflow = feedFlow, inEnthalpy = FeedEnthalpy, speed = 0, held = 1;
+        Portion mixture = default;
         for (int i = 0; i < _cells.Length; i++)
         {
             ref Cell cell = ref _cells[i];
@@ -29,8 +30,12 @@ internal sealed partial class Channel<TFluid>
             double still = cell.FlowEnthalpy + (slope / 2) + (half * (cell.HeatToWater - (slope * cell.Outflow))) + (lead * cell.Outflow);
             double heated = cell.Energy + (step * cell.HeatToWater), mass = cell.Mass + (step * inflow), energy = heated + (step * inflow * inEnthalpy);
             double outEnthalpy = still - (lead * inflow);
-            double outflow = cell.Boundary == Boundary.None
-                ? OutflowOf(cell, perStep, heated, inflow, inEnthalpy, still, lead)
+            if (cell.Boundary == Boundary.Collapse) (mixture, outEnthalpy) = (new(step * inflow, inEnthalpy), WaterLeaving(i));
+            bool swept = mixture.Mass > 0 && !HoldsSteam(cell);
+            if (mixture.Mass > 0 && !swept) mixture = default;
+            double outflow = swept
+                ? Sweep(i, step, mass, energy + (cell.Steam.Pressure * cell.Volume), ref mixture, ref outEnthalpy)
+                : cell.Boundary == Boundary.None ? OutflowOf(cell, perStep, heated, inflow, inEnthalpy, still, lead)
                 : ClosureOf(cell).Outflow(cell.Volume, step, mass, energy + (cell.Steam.Pressure * cell.Volume), outEnthalpy, cell.Outflow);
             if (!(outflow > 0 && step * outflow < mass))
             {
@@ -68,7 +73,10 @@ internal sealed partial class Channel<TFluid>
 
         double after = (ahead - cell.FlowEnthalpy) * cell.PerSpacing;
         deviation = after * behind;
-        return own + Limited(before, after * volume, cell, perOutflow * perStep);
+        double slope = own + Limited(before, after * volume, cell, perOutflow * perStep);
+
+        // Boiling water over cold metal loses heat faster than it flows; what leaves is still boiling.
+        return cell.Boundary == Boundary.None && cell.FlowQuality > 0 ? Math.Max(slope, cell.Steam.LiquidEnthalpy - cell.FlowEnthalpy) : slope;
     }
 
     // Where both phases flow every wave grows on its way, and a limiter that sharpens makes stairs of it: monotonised central difference.

@@ -93,6 +93,7 @@ internal sealed partial class Channel<TFluid>
         if (share <= 0) return (0, swelling);
         double rise = Probe * steam.Pressure, held = cell.HeldEnthalpy;
         if (cell.Boundary == Boundary.Boiling) held = steam.LiquidEnthalpy + (cell.Profile.Over(held - steam.LiquidEnthalpy, out _) / share);
+        if (cell.Boundary == Boundary.Collapse) held = cell.Behind;
         if (cell.Boundary == Boundary.Dew) held = Math.Min(held, steam.VapourEnthalpy);
         double change = WetVolume(_fluid.Saturated(steam.Pressure + rise), held + (rise * cell.Volume / cell.Mass)) - WetVolume(steam, held);
         return (-cell.Mass * share * change / (rise * outVolume), swelling);

@@ -30,7 +30,7 @@ internal sealed partial class Channel<TFluid>
         [
             cell.Mass, cell.Energy, cell.Wall, cell.FilmResistance, cell.PhaseEnthalpy, cell.Phase.Viscosity, cell.Phase.Conductivity, cell.Phase.HeatCapacity,
             cell.Head, cell.HeadTarget, cell.PressureRate, cell.Drop, cell.DropFlow, cell.Resistance, cell.HalfLoss, cell.Store, cell.Swelling, cell.HeatShare, cell.Spread, cell.Steam.Pressure, cell.HeldEnthalpy, cell.FlowEnthalpy, cell.Slope, cell.FlowQuality, cell.VoidFraction, cell.QualityByVoid, cell.SlopeQuality,
-            cell.WaveFactor, (double)cell.Boundary, cell.Profile.Spread, cell.Profile.Below, cell.Profile.Above,
+            cell.WaveFactor, (double)cell.Boundary, cell.Profile.Spread, cell.Profile.Below, cell.Profile.Above, cell.Ahead, cell.Behind, cell.MixtureMass, cell.MixtureFills,
             cell.Temperature, cell.SinglePhaseExpansion, cell.Outflow, cell.OutEnthalpy, cell.HeatToWater,
         ];
         foreach (double number in numbers) to.Add(number);
@@ -46,6 +46,7 @@ internal sealed partial class Channel<TFluid>
         (cell.FlowQuality, cell.VoidFraction, cell.QualityByVoid, cell.SlopeQuality) = (from.Next(), from.Next(), from.Next(), from.Next());
         (cell.WaveFactor, cell.Boundary) = (from.Next(), (Boundary)from.Next());
         cell.Profile = new() { Spread = from.Next(), Below = from.Next(), Above = from.Next() };
+        (cell.Ahead, cell.Behind, cell.MixtureMass, cell.MixtureFills) = (from.Next(), from.Next(), from.Next(), from.Next());
         (cell.Temperature, cell.SinglePhaseExpansion) = (from.Next(), from.Next());
         (cell.Outflow, cell.OutEnthalpy, cell.HeatToWater) = (from.Next(), from.Next(), from.Next());
     }

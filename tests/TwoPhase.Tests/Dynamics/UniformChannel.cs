@@ -61,6 +61,14 @@ internal static class UniformChannel
         return Answer(onset, Velocity + (ratio * Expansion * wet), 1 + (Expansion * wet / Velocity));
     }
 
+    /// <summary>Feed that lacks <paramref name="lacking"/> [J/kg] to boil, behind liquid so cold that it leaves without boiling: it boils within, and drives that liquid out.</summary>
+    /// <remarks>The first of the new feed boils at t = τ, at ζ = 0 before the boundary λ = u₀τ; from there dζ/dt = u₀ + Ω ζ, and the liquid ahead of it has its velocity. All cold liquid has left when it is at the outlet.</remarks>
+    public static ChannelAnswer ColdSlug(double lacking, double t)
+    {
+        double delay = Delay * lacking / Lacking, growth = t > delay ? Math.Exp(Expansion * (t - delay)) : 1, front = (Velocity * delay) + (Velocity / Expansion * (growth - 1));
+        return front > Length ? throw new ArgumentOutOfRangeException(nameof(t), t, "The front has left.") : Answer(Velocity * delay, Velocity * growth, 1);
+    }
+
     /// <summary>Feed that lacks <paramref name="lacking"/> [J/kg] to boil in place of <see cref="Lacking"/>.</summary>
     public static ChannelAnswer FeedStep(double lacking, double t)
     {
