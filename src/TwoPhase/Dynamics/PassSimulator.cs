@@ -82,7 +82,10 @@ public sealed partial class PassSimulator
     /// <returns>The history; where the flow stagnates before the time is over it ends there and says so.</returns>
     /// <exception cref="ArgumentException">A condition is outside its limits.</exception>
     /// <exception cref="InvalidOperationException">The run has ended before.</exception>
-    public PassHistory Run(OperatingSchedule schedule, Duration duration)
+    public PassHistory Run(OperatingSchedule schedule, Duration duration) => RunToDryout(schedule, duration, double.PositiveInfinity);
+
+    /// <summary>Runs through a schedule until a true quality is reached at the outlet.</summary>
+    internal PassHistory RunToDryout(OperatingSchedule schedule, Duration duration, double dryout)
     {
         Require.NotNull(schedule, nameof(schedule));
         double seconds = Require.Positive(duration.Si(), "Duration", Scale.Seconds, nameof(duration));
@@ -94,7 +97,9 @@ public sealed partial class PassSimulator
             double from = i * Options.RawSampling, to = Math.Min(seconds, from + Options.RawSampling);
             PassConditions conditions = schedule.Over(from, to);
             PassInstant row = Advance(conditions, split, from, to);
-            if (End == SimulationEnd.None) rows.Add(row);
+            if (End != SimulationEnd.None) break;
+            rows.Add(row);
+            if (row.RawTrueQuality >= dryout) (End, EndReason) = (SimulationEnd.DryoutReached, FormattableString.Invariant($"Pass '{Pass.Name}' dries out at its outlet at {_time:G6} s, with a true quality of {row.RawTrueQuality:F3}."));
         }
 
         return new(rows, End == SimulationEnd.None ? SimulationEnd.Completed : End, EndReason);

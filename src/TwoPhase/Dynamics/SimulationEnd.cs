@@ -14,4 +14,7 @@ public enum SimulationEnd
 
     /// <summary>Water or steam somewhere in the pass left the range of the steam formulation.</summary>
     OutsideFormulation = 3,
+
+    /// <summary>The quality that counts as dryout was reached at the outlet: a wall that is no longer wetted is outside the model.</summary>
+    DryoutReached = 4,
 }
