@@ -1,3 +1,4 @@
+using System.Runtime.CompilerServices;
 using TwoPhase.Flow;
 using TwoPhase.Passes;
 
@@ -21,6 +22,7 @@ internal sealed partial class Channel<TFluid>
         }
     }
 
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     private void Decompose(ref Cell cell)
     {
         FindBoundary(ref cell);
@@ -52,6 +54,7 @@ internal sealed partial class Channel<TFluid>
         cell.WaveFactor = 1;
     }
 
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     private FlowState FlowOf(in Cell cell, double quality)
     {
         ref readonly Duct duct = ref _ducts[cell.Duct];

@@ -1,3 +1,4 @@
+using System.Runtime.CompilerServices;
 using TwoPhase.Flow;
 using TwoPhase.Numerics;
 using TwoPhase.Passes;
@@ -14,6 +15,7 @@ internal sealed partial class Channel<TFluid>
 
     /// <summary>Finds the flowing quality whose void fraction is that of the mixture held.</summary>
     /// <remarks>Newton's method, begun along the slope of the inner step before, so that a step costs one call of the slip model.</remarks>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     private void Part(ref Cell cell)
     {
         ref readonly SaturatedPair steam = ref cell.Steam;

@@ -10,7 +10,7 @@ internal sealed class FourCurves
 {
     private const int Bits = 4;
     private const int Degree = 7;
-    private const int Stride = Four.Count * (Degree + 1);
+    public const int Stride = Four.Count * (Degree + 1);
 
     private readonly int _first;
     private readonly CoefficientBlock _coefficients;
@@ -35,6 +35,23 @@ internal sealed class FourCurves
                     value.AddTo(_coefficients.Slice((cell * Stride) + (power * Four.Count), Four.Count), polynomial.Weight(power, node));
             }
         }
+    }
+
+    /// <summary>The cell of a place, and the place in it.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public int Locate(double x, out double place) => OctaveGrid.Locate(x, Bits, out place) - _first;
+
+    /// <summary>The coefficients of two over one grid: of each power four and four.</summary>
+    public static CoefficientBlock Interleave(FourCurves first, FourCurves second)
+    {
+        var both = new CoefficientBlock(2 * first._coefficients.Length);
+        for (int i = 0; i < first._coefficients.Length; i += Four.Count)
+        {
+            first._coefficients.Slice(i, Four.Count).CopyTo(both.Slice(2 * i, Four.Count));
+            second._coefficients.Slice(i, Four.Count).CopyTo(both.Slice((2 * i) + Four.Count, Four.Count));
+        }
+
+        return both;
     }
 
     /// <summary>All four at one place inside the grid.</summary>

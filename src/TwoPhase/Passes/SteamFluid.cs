@@ -21,8 +21,7 @@ internal readonly struct SteamFluid : IPassFluid
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public SaturatedPair Saturated(double pressure)
     {
-        SaturatedPhases phases = SaturationTable.Phases(pressure);
-        SaturatedFluid fluid = SaturationTable.Fluid(pressure);
+        (SaturatedPhases phases, SaturatedFluid fluid) = SaturationTable.PhasesAndFluid(pressure);
         return new()
         {
             Pressure = pressure,

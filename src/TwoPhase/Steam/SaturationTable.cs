@@ -46,6 +46,15 @@ internal static class SaturationTable
     public static SaturatedFluid Fluid(double pressure) =>
         new(Covers(pressure) ? FluidCurves.Table.At(pressure) : Exact(pressure, FluidCurves.Of));
 
+    /// <summary><see cref="Phases"/> and <see cref="Fluid"/> in one go.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static (SaturatedPhases Phases, SaturatedFluid Fluid) PhasesAndFluid(double pressure)
+    {
+        if (!Covers(pressure)) return (Phases(pressure), Fluid(pressure));
+        (Four phases, Four fluid) = BothCurves.Table.At(pressure);
+        return (new(phases), new(fluid));
+    }
+
     /// <summary>k′ and k″ [W/(m·K)], cp′ and cp″ [J/(kg·K)].</summary>
     public static SaturatedHeat Heat(double pressure) =>
         new(Covers(pressure) ? HeatCurves.Table.At(pressure) : Exact(pressure, HeatCurves.Of));
@@ -95,6 +104,11 @@ internal static class SaturationTable
             Transport.Viscosity(s.Vapour.Density, s.Temperature));
 
         public static readonly FourCurves Table = Curves(Of);
+    }
+
+    private static class BothCurves
+    {
+        public static readonly EightCurves Table = new(PhaseCurves.Table, FluidCurves.Table);
     }
 
     private static class HeatCurves

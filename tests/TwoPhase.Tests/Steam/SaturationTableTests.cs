@@ -97,6 +97,18 @@ public class SaturationTableTests
         Assert.True(double.IsNaN(SaturationTable.Expansion(pressure).VapourIsentropicExponent));
     }
 
+    // In the table, at both ends, and where the formulation itself answers.
+    [Fact]
+    public void PhasesAndFluid_AnyPressure_AreBoth()
+    {
+        foreach (double pressure in Pressures(500).Concat([5e4, 18e6, 22.1e6]))
+        {
+            (SaturatedPhases phases, SaturatedFluid fluid) = SaturationTable.PhasesAndFluid(pressure);
+            Assert.Equal(SaturationTable.Phases(pressure), phases);
+            Assert.Equal(SaturationTable.Fluid(pressure), fluid);
+        }
+    }
+
     [Fact]
     public void Phases_AllocatesNothing() =>
         Assert.Equal(0, AllocationProbe.Bytes(() => SaturationTable.Phases(7e6)));

@@ -1,0 +1,34 @@
+using System.Runtime.CompilerServices;
+#if NET
+using System.Runtime.Intrinsics;
+#endif
+
+namespace TwoPhase.Numerics;
+
+/// <summary>Two sets of <see cref="FourCurves"/> side by side, in one register where the processor has it: little dearer than one.</summary>
+internal sealed class EightCurves(FourCurves first, FourCurves second)
+{
+#if NET
+    private readonly CoefficientBlock _coefficients = FourCurves.Interleave(first, second);
+
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public (Four First, Four Second) At(double x)
+    {
+        int cell = first.Locate(x, out double s);
+        ref double c = ref _coefficients[cell * 2 * FourCurves.Stride];
+        Vector512<double> one = Vector512.Create(s), two = one * one, four = two * two;
+        Vector512<double> low = Vector512.FusedMultiplyAdd(Pair(ref c, 2, one), two, Pair(ref c, 0, one));
+        Vector512<double> high = Vector512.FusedMultiplyAdd(Pair(ref c, 6, one), two, Pair(ref c, 4, one));
+        Vector512<double> sum = Vector512.FusedMultiplyAdd(high, four, low);
+        return (Unsafe.BitCast<Vector256<double>, Four>(sum.GetLower()), Unsafe.BitCast<Vector256<double>, Four>(sum.GetUpper()));
+    }
+
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    private static Vector512<double> Pair(ref double c, int power, Vector512<double> s) => Vector512.FusedMultiplyAdd(
+        Vector512.LoadUnsafe(ref c, (nuint)((power + 1) * 2 * Four.Count)),
+        s,
+        Vector512.LoadUnsafe(ref c, (nuint)(power * 2 * Four.Count)));
+#else
+    public (Four First, Four Second) At(double x) => (first.At(x), second.At(x));
+#endif
+}
