@@ -15,6 +15,8 @@ public readonly record struct EstimateReason(EstimateReasonKind Kind)
 
     internal double RawSize { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Kind and size, invariant culture.</summary>
     public override string ToString() => Kind == EstimateReasonKind.None ? "none" : string.Format(CultureInfo.InvariantCulture, "{0} {1:+0.000;-0.000}", Kind, RawSize);
 }

@@ -100,6 +100,8 @@ public readonly record struct Instrument
         _ => "none",
     };
 
+    internal object ToDump() => ToString();
+
     /// <summary>The kind, and the number of the pass counted from 1.</summary>
     public override string ToString() => Pass is { } pass ? FormattableString.Invariant($"{Words} of pass number {pass + 1}") : Words;
 }

@@ -14,6 +14,8 @@ public sealed class InstrumentFault
     /// <summary>Whether one instrument alone is named.</summary>
     public bool IsOneInstrument => Suspects.Count == 1;
 
+    internal object ToDump() => ToString();
+
     /// <summary>The fault in words.</summary>
     public override string ToString() => IsOneInstrument ? First.ToString() : "one of: " + string.Join("; ", Suspects);
 }

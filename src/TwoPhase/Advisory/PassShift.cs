@@ -19,6 +19,8 @@ public readonly record struct PassShift
 
     internal double RawAsDifferential { get; init; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Origin and size, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0} {1:+0.0%;-0.0%}", Origin, RawOwn);
 }

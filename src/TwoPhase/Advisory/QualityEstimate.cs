@@ -130,6 +130,8 @@ public readonly record struct QualityEstimate
 
     private static MassFraction? Fraction(double value) => Numerics.Fast.IsFinite(value) ? MassFraction.FromDecimalFractions(value) : null;
 
+    internal object ToDump() => ToString();
+
     /// <summary>The estimate in a sentence, invariant culture.</summary>
     public override string ToString()
     {

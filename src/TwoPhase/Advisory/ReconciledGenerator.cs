@@ -109,6 +109,8 @@ public sealed class ReconciledGenerator
         return double.IsNaN(raw.Adjusted) ? null : new(quantity(raw.Adjusted), quantity(raw.AdjustedUncertainty));
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Verdict, faults and table, invariant culture.</summary>
     public override string ToString()
     {

@@ -54,6 +54,8 @@ public sealed class ReconciledInstrument
 
     private IQuantity? Difference(double value) => double.IsNaN(value) ? null : Instrument.Scale.Difference(value);
 
+    internal object ToDump() => ToString();
+
     /// <summary>The row, invariant culture.</summary>
     public override string ToString()
     {

@@ -21,6 +21,8 @@ public sealed class ReconciledPass
     /// <summary>Heat absorbed.</summary>
     public UncertainValue<Power>? AbsorbedHeat { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Name and values, invariant culture.</summary>
     public override string ToString() => $"pass '{Name}': feed {Text(FeedFlow)}, quality {Text(OutletQuality)}, heat {Text(AbsorbedHeat)}";
 

@@ -31,6 +31,8 @@ public sealed class Suspect
 
     internal (double Bias, double Uncertainty) Raw => (_bias, _uncertainty);
 
+    internal object ToDump() => ToString();
+
     /// <summary>The instrument and its bias, invariant culture.</summary>
     public override string ToString()
     {

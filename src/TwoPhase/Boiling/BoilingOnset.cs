@@ -105,6 +105,8 @@ public sealed class BoilingOnset
 
     private ref readonly Duct Duct => ref _profile.Pass.Ducts[_node.Duct];
 
+    internal object ToDump() => ToString();
+
     /// <summary>The onset in a line, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture,

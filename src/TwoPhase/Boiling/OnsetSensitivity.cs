@@ -49,6 +49,8 @@ public readonly record struct OnsetSensitivity
         return search(moved) is { Position: > 0 } node ? node.Position : null;
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The sensitivities in a line, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture,

@@ -53,6 +53,8 @@ public readonly record struct GeneratorInstant
 
     internal double RawFeedPressure { get; init; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The instant in engineering units, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture,

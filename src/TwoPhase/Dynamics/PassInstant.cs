@@ -86,6 +86,8 @@ public readonly record struct PassInstant
 
     internal double RawValveShut { get; init; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The instant in engineering units, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture,

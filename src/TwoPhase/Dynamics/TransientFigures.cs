@@ -60,6 +60,8 @@ public readonly record struct TransientFigures
 
     internal double RawHighest { get; init; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The figures in engineering units, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture,

@@ -74,6 +74,8 @@ public readonly struct Applicability : IEquatable<Applicability>
     /// <summary>Whether two findings differ.</summary>
     public static bool operator !=(Applicability left, Applicability right) => !left.Equals(right);
 
+    internal object ToDump() => ToString();
+
     /// <summary>The finding in words, invariant culture, SI units.</summary>
     public override string ToString() => !_checked ? "not checked"
         : Exceeded == ApplicabilityLimits.None ? "inside its range"

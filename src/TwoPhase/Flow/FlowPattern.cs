@@ -97,6 +97,8 @@ public readonly partial struct FlowPattern : IEquatable<FlowPattern>
     /// <summary>Whether two results differ.</summary>
     public static bool operator !=(FlowPattern left, FlowPattern right) => !left.Equals(right);
 
+    internal object ToDump() => ToString();
+
     /// <summary>Pattern and margin, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture, "{0}, stratification margin {1:G3}, level {2:F2} of the bore, {3}", Regime, StratificationMargin, Level, Applicability);

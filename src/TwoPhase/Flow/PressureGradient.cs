@@ -53,6 +53,8 @@ public readonly struct PressureGradient : IEquatable<PressureGradient>, ICompara
     /// <summary>Whether the left gradient is not the smaller.</summary>
     public static bool operator >=(PressureGradient left, PressureGradient right) => left.PascalsPerMetre >= right.PascalsPerMetre;
 
+    internal object ToDump() => ToString();
+
     /// <summary>The gradient with its unit, invariant culture.</summary>
     public override string ToString() => PascalsPerMetre.ToString("G6", CultureInfo.InvariantCulture) + " Pa/m";
 }

@@ -28,6 +28,8 @@ public readonly partial record struct TwoPhaseFlow
     /// <summary>The same flow in raw SI units, for models of your own.</summary>
     public FlowState State => _state;
 
+    internal object ToDump() => ToString();
+
     /// <summary>The flow in engineering units, invariant culture.</summary>
     public override string ToString() =>
         $"x = {Scale.None.Text(_state.Quality)}, {Scale.KilogramsPerSquareMetreSecond.Text(_state.MassFlux)} at {Scale.Megapascals.Text(_state.Pressure)} "

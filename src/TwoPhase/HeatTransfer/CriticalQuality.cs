@@ -48,6 +48,8 @@ public readonly struct CriticalQuality : IEquatable<CriticalQuality>
     /// <summary>Whether two results differ.</summary>
     public static bool operator !=(CriticalQuality left, CriticalQuality right) => !left.Equals(right);
 
+    internal object ToDump() => ToString();
+
     /// <summary>The three qualities in per cent and the finding on the range, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture,

@@ -43,6 +43,8 @@ public readonly struct WallTemperatures : IEquatable<WallTemperatures>
     /// <summary>Whether two sets differ.</summary>
     public static bool operator !=(WallTemperatures left, WallTemperatures right) => !left.Equals(right);
 
+    internal object ToDump() => ToString();
+
     /// <summary>The temperatures from the flow outwards in °C, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture,

@@ -50,6 +50,8 @@ public readonly record struct HoldupChange
         return outlet.HomogeneousVolume / (vapour - liquid);
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The change in a line, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0:+0.0;-0.0} kg, {1:+0.0;-0.0} kg of it upstream of boiling", _total, _upstream);
 }

@@ -26,6 +26,8 @@ public readonly record struct SectionHoldup
     /// <summary>Its water-side volume.</summary>
     public Volume WaterVolume => Volume.FromCubicMeters(_volume);
 
+    internal object ToDump() => ToString();
+
     /// <summary>The section in a line, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0}: {1:F1} kg liquid, {2:F1} kg vapour in {3:F3} m³", Section, _liquid, _vapour, _volume);
 }

@@ -129,6 +129,8 @@ public sealed class WaterHoldup
         return NetVapourModel.LevyTrueQuality(node.EquilibriumQuality, Subcooled.DepartureCore(WallSolver.Saturated(node), flux));
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The holdup in a line, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture,

@@ -39,6 +39,8 @@ public readonly record struct CriticalPlace
 
     internal double RawCritical => _critical;
 
+    internal object ToDump() => ToString();
+
     /// <summary>The place in a line, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture, "{0} {1:F0} m; dry metal would be {2:F0} °C, {3:F0} K hotter", IsReached ? "reached from" : "nearest at", Node.Position, _dryMetal - 273.15, _hotter);

@@ -19,6 +19,8 @@ public readonly record struct LimitEffect
     /// <summary>In SI, NaN where there is none.</summary>
     internal double RawChange { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Input and change, invariant culture.</summary>
     public override string ToString() => _quantity is null || double.IsNaN(RawChange) ? $"{Input}: none" : $"{Input}: {_quantity.DifferenceText(RawChange)}";
 }

@@ -52,6 +52,8 @@ public sealed class LimitFinding
 
     internal bool Applies => Status is LimitStatus.Within or LimitStatus.Beyond or LimitStatus.Indicator;
 
+    internal object ToDump() => ToString();
+
     /// <summary>The row, invariant culture.</summary>
     public override string ToString() => Applies
         ? $"{Name}: {_figure.Quantity.LevelText(_figure.Value)} in section '{Section}', limit {_figure.Quantity.LevelText(_figure.Limit)}, margin {_figure.Quantity.DifferenceText(_figure.Margin)}, {Words}{(Reason.Length > 0 ? "; " + Reason : "")}"

@@ -76,6 +76,8 @@ public sealed class PassLimits : IReadOnlyList<LimitFinding>
         return effects;
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The headline.</summary>
     public override string ToString() => Headline.ToString();
 }

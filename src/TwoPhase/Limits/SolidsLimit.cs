@@ -71,6 +71,8 @@ public sealed class SolidsLimit
     internal string TextAt(double quality) => string.Format(
         CultureInfo.InvariantCulture, "{0} of {1} in the outlet water, concentrated {2:F2} times", MilligramsPerLitre.Text(_feed / (1 - quality), "G4"), MilligramsPerLitre.Text(_limit, "G4"), 1 / (1 - quality));
 
+    internal object ToDump() => ToString();
+
     /// <summary>Name, feed and limit, invariant culture.</summary>
     public override string ToString() => $"{Name}: {MilligramsPerLitre.Text(_feed, "G4")} in the feed, {MilligramsPerLitre.Text(_limit, "G4")} at the outlet";
 }

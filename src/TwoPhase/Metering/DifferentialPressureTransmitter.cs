@@ -71,6 +71,8 @@ public sealed partial class DifferentialPressureTransmitter
     public DifferentialPressureTransmitter WithImpulseLineHead(Pressure head) =>
         new(_lower, _upper, Characteristic, _cutoff, Require.Finite(head.Si(), "Head of the impulse lines", Scale.Kilopascals, nameof(head)));
 
+    internal object ToDump() => ToString();
+
     /// <summary>The range and the characteristic.</summary>
     public override string ToString() =>
         $"{Scale.Kilopascals.Text(_lower)} to {Scale.Kilopascals.Text(_upper)}, {(Characteristic == TransmitterCharacteristic.Linear ? "linear" : "square root")}";

@@ -52,6 +52,8 @@ public sealed partial class MeterFit
         return new(Value - half, Value + half, probability);
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The fit in one line.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture,

@@ -15,6 +15,8 @@ public readonly record struct ModelAnswer
     /// <summary>Its reading, with whether meter and model are inside their published limits.</summary>
     public QualityReading Reading { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The model's name and its reading.</summary>
     public override string ToString() => $"{Model?.Name}: {Reading}";
 }
@@ -35,6 +37,8 @@ public sealed class ModelComparison
 
     /// <summary>Highest less lowest quality.</summary>
     public MassFraction Spread => MassFraction.FromDecimalFractions(Highest.DecimalFractions - Lowest.DecimalFractions);
+
+    internal object ToDump() => ToString();
 
     /// <summary>The answers as a table, invariant culture.</summary>
     public override string ToString()

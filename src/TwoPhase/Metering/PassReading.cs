@@ -106,6 +106,8 @@ public readonly partial struct PassReading : IEquatable<PassReading>
     public PassReading Without(PassSignal signal, SignalStatus status) =>
         status == SignalStatus.Good ? throw new ArgumentOutOfRangeException(nameof(status), status, "A signal is taken out with the reason, not as good.") : With(signal, Signal.Without(status));
 
+    internal object ToDump() => ToString();
+
     /// <summary>The time and the values that are there; invariant.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture,

@@ -107,6 +107,8 @@ public sealed partial class QualityMeter
         return MassFlow.FromKilogramsPerSecond(TotalFlowCore(p, x, dp));
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Meter and model.</summary>
     public override string ToString() => $"{Meter.Name}, {Model.Name}";
 }

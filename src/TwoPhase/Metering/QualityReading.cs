@@ -48,6 +48,8 @@ public readonly struct QualityReading : IEquatable<QualityReading>
     /// <summary>Whether two readings differ.</summary>
     public static bool operator !=(QualityReading left, QualityReading right) => !left.Equals(right);
 
+    internal object ToDump() => ToString();
+
     /// <summary>The reading in words, invariant culture.</summary>
     public override string ToString() => Status == ReadingStatus.None
         ? "no reading"

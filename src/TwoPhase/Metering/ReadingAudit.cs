@@ -68,6 +68,8 @@ public sealed class ReadingAudit
             .OrderBy(mistake => Math.Abs(Math.Log(Math.Abs(mistake.Amount) / Math.Abs(Usual(mistake.Mistake)))))];
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The reading and its suspicions, one a line, with the caution.</summary>
     public override string ToString()
     {

@@ -57,6 +57,8 @@ public readonly record struct ReferenceReading
 
     internal double Weight => 1 / (_uncertainty * _uncertainty);
 
+    internal object ToDump() => ToString();
+
     /// <summary>The reading in one line.</summary>
     public override string ToString() =>
         $"flow {Scale.KilogramsPerSecond.Text(_flow)}, pressure {Scale.Megapascals.Text(_pressure)}, differential {Scale.Kilopascals.Text(_differential)}, reference quality {Scale.None.Text(_quality)}";

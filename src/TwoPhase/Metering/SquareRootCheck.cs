@@ -53,6 +53,8 @@ public sealed class SquareRootCheck
         return new(slope, Math.Sqrt(residuals / (points.Length - 2) / spread));
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The finding in one line.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture, "square root extracted: {0} (power {1:F3}, standard error {2:G2})", Finding, Power, StandardUncertainty);

@@ -40,6 +40,8 @@ public sealed class SuspectedMistake
 
     internal double EffectCore => _effect;
 
+    internal object ToDump() => ToString();
+
     /// <summary>The suspicion in one line.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture, "{0}{1}: {2:+0.00;-0.00} points of quality", Description, Unit.Length == 0 ? "" : $" ({Scale.None.Text(Amount, "G3")} {Unit})", 100 * _effect);

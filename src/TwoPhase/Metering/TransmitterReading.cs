@@ -21,6 +21,8 @@ public readonly record struct TransmitterReading
     /// <summary>Whether the differential can be believed, and if not, why.</summary>
     public TransmitterStatus Status { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The reading in one line.</summary>
     public override string ToString() => Differential is null ? Status.ToString() : $"{Scale.Kilopascals.Text(_differential)} ({Status})";
 }

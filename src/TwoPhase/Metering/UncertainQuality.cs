@@ -29,6 +29,8 @@ public sealed class UncertainQuality
     /// <param name="coverageProbability">p, between 0 and 1; 0.95 by default.</param>
     public MassFraction ExpandedUncertainty(double coverageProbability = 0.95) => MassFraction.FromDecimalFractions(Budget.ExpandedUncertainty(coverageProbability));
 
+    internal object ToDump() => ToString();
+
     /// <summary>The quality in one line and the budget as a table.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture, "quality {0:F4} ± {1:F4} (95 %)", Budget.Value, Budget.ExpandedUncertainty()) + Environment.NewLine + Budget;

@@ -71,6 +71,8 @@ public readonly record struct FiredHeat
         return Ratio.FromDecimalFractions(released > 0 ? RawAbsorbed / released : 0);
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Absorbed heat, its split and the efficiency, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0:G5} MW absorbed, {1:F1} % of it by convection, {2:F1} % of the gross release", RawAbsorbed * 1e-6, RawConvectiveShare * 100, (double)Efficiency(HeatingBasis.Gross).Percent);
 }

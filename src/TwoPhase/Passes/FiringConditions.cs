@@ -66,6 +66,8 @@ public readonly record struct FiringConditions
     /// <param name="humidity">Mass of water vapour with a unit mass of dry air, 0 to 0.2.</param>
     public FiringConditions WithAirHumidity(Ratio humidity) => this with { RawAirHumidity = Require.Within(humidity.Si(), 0, 0.2, "Air humidity", Scale.None, nameof(humidity)) };
 
+    internal object ToDump() => ToString();
+
     /// <summary>The conditions in engineering units, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0:G5} Sm³/h, {1:G4} % O2, stack {2:G4} °C, air {3:G4} °C", RawFuelFlow * 3600, RawExcessOxygen * 100, RawStackTemperature - 273.15, RawAirTemperature - 273.15);
 

@@ -73,6 +73,8 @@ public sealed class FuelGas
         return copy;
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The composition, invariant culture.</summary>
     public override string ToString() => string.Join(", ", _shares);
 

@@ -26,6 +26,8 @@ public readonly record struct FuelShare
 
     internal double RawShare { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>For example <c>Methane 0.95</c>; invariant.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0} {1:G6}", Component, RawShare);
 }

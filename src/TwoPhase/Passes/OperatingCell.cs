@@ -18,6 +18,8 @@ public readonly record struct OperatingCell<T>
     /// <summary>Why there is no figure; null where there is one.</summary>
     public string? Fault { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Conditions and figure, or the fault.</summary>
     public override string ToString() => $"{Conditions}: {(HasFigure ? Figure : Fault)}";
 }

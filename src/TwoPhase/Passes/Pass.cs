@@ -118,6 +118,8 @@ public sealed partial class Pass
         return Changed(pass => pass.Interchanger = interchanger);
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The name.</summary>
     public override string ToString() => Name;
 

@@ -32,6 +32,8 @@ public readonly record struct PassAudit
     /// <summary>Bound of the grid error, relative: of pressure to outlet pressure, or of mass held, the larger.</summary>
     public double GridError { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The audit in a line, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "in {0:G6} MW + heat {1:G6} MW - out {2:G6} MW: energy residual {3:G2}, mass residual {4:G2}, grid error below {5:G2}",
         _carriedIn * 1e-6, _heat * 1e-6, _carriedOut * 1e-6, EnergyResidual, MassResidual, GridError);

@@ -134,6 +134,8 @@ public sealed class PassCalibration
         }
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The calibration in a line, invariant culture.</summary>
     public override string ToString()
     {

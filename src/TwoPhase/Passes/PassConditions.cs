@@ -71,6 +71,8 @@ public readonly record struct PassConditions
     /// <param name="absorbedHeat">Absorbed heat, zero or more.</param>
     public PassConditions WithAbsorbedHeat(Power absorbedHeat) => this with { RawAbsorbedHeat = Require.NotNegative(absorbedHeat.Si(), "Absorbed heat", Scale.Megawatts, nameof(absorbedHeat)) };
 
+    internal object ToDump() => ToString();
+
     /// <summary>The conditions in engineering units, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0:G5} kg/s feed at {1}, outlet at {2:G5} MPa, {3:G5} MW", RawFeedFlow, IsFeedByEnthalpy ? Scale.KilojoulesPerKilogram.Text(RawFeedEnthalpy, "G5") : Scale.Celsius.Text(RawFeedTemperature, "G5"), RawOutletPressure * 1e-6, RawAbsorbedHeat * 1e-6);
 }

@@ -59,6 +59,8 @@ public sealed class PassModels
     /// <param name="criticalQuality">Quality at which the wall dries out.</param>
     public PassModels WithCriticalQuality(CriticalQualityModel criticalQuality) => new(Slip, Friction, Film, Require.NotNull(criticalQuality, nameof(criticalQuality)));
 
+    internal object ToDump() => ToString();
+
     /// <summary>The names of the models.</summary>
     public override string ToString() => $"slip {Slip.Name}, friction {Friction.Name}, film {Film.Name}, critical quality {CriticalQuality.Name}";
 }

@@ -39,6 +39,8 @@ public readonly record struct PassWall
     /// <summary>How liquid and vapour share the tube.</summary>
     public FlowPattern Pattern { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Film, temperatures and pattern in a line, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "film {0:F0} W/(m²·K), {1}, {2}", _film, Temperatures, Pattern.Regime);
 }

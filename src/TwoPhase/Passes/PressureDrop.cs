@@ -26,6 +26,8 @@ public readonly record struct PressureDrop
     /// <summary>Inlet minus outlet pressure.</summary>
     public Pressure Total => Pressure.FromPascals(_friction + _fittings + _gravity + _acceleration);
 
+    internal object ToDump() => ToString();
+
     /// <summary>The parts in kPa, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0:F1} kPa = friction {1:F1} + fittings {2:F1} + gravity {3:F1} + acceleration {4:F1}",
         Total.Pascals / 1e3, _friction / 1e3, _fittings / 1e3, _gravity / 1e3, _acceleration / 1e3);

@@ -62,6 +62,8 @@ public readonly record struct ProfilePoint
 
     private ref readonly Duct Duct => ref _pass.Ducts[_node.Duct];
 
+    internal object ToDump() => ToString();
+
     /// <summary>The row in engineering units, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0} at {1:F2} m: {2:F4} MPa, {3:F2} kJ/kg, xe {4:F4}, void {5:F4}",
         Section, _node.Position, _node.Pressure * 1e-6, _node.Enthalpy * 1e-3, _node.EquilibriumQuality, _node.VoidFraction);

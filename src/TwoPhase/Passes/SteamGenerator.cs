@@ -41,6 +41,8 @@ public sealed partial class SteamGenerator
         return copy;
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The name.</summary>
     public override string ToString() => Name;
 }

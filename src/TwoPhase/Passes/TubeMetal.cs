@@ -44,6 +44,8 @@ public sealed class TubeMetal
 
     internal static Scale WattsPerMetreKelvin { get; } = new("W/(m·K)", 1);
 
+    internal object ToDump() => ToString();
+
     /// <summary>The name.</summary>
     public override string ToString() => Name;
 }

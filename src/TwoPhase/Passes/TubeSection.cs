@@ -120,6 +120,8 @@ public sealed partial class TubeSection
     /// <summary>Mass of tube metal and fins.</summary>
     public Mass MetalMass => Mass.FromKilograms(RawMetalMass);
 
+    internal object ToDump() => ToString();
+
     /// <summary>Name and measures, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0}: {1:G4} mm bore, {2:G4} mm outside, {3:G5} m", Name, _bore * 1e3, _outsideDiameter * 1e3, RawLength);
 

@@ -57,6 +57,8 @@ public readonly record struct PhaseSplit
     /// <summary>Density at equal velocities, 1 / [x/ρg + (1 − x)/ρl]; the model plays no part in it.</summary>
     public Density HomogeneousDensity => Density.FromKilogramsPerCubicMeter(1 / _homogeneousVolume);
 
+    internal object ToDump() => ToString();
+
     /// <summary>The main values with units, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture,

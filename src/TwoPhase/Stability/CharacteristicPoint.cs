@@ -32,6 +32,8 @@ public readonly record struct CharacteristicPoint
     /// <summary>dΔp/dṁ [Pa·s/kg].</summary>
     internal double RawSlope { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Flow, drop and slope, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0:F3} kg/s: {1:F1} kPa, relative slope {2:F3}", _flow, _drop * 1e-3, RelativeSlope);
 }

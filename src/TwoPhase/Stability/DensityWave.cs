@@ -99,6 +99,8 @@ public sealed class DensityWave
     /// <summary>Longest likely period of a swing: 3 transit times; see <see cref="ShortestPeriod"/>.</summary>
     public Duration LongestPeriod => Duration.FromSeconds(MostTransits * _transit);
 
+    internal object ToDump() => ToString();
+
     /// <summary>The finding in a line, invariant culture.</summary>
     public override string ToString() => Status == StabilityStatus.NotApplicable ? $"not applicable: {Reason}" : string.Format(
         CultureInfo.InvariantCulture, "{0}: {1:F2} against a threshold of {2:F2}; {3:F0} kPa at the inlet would hold it; period {4:F0} to {5:F0} s",

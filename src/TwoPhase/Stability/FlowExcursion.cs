@@ -19,6 +19,8 @@ public readonly record struct FlowExcursion
     /// <summary>True when the range runs into an end of the curve, so that it may be wider.</summary>
     public bool IsOpen { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The range, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0:F3} to {1:F3} kg/s{2}", _from, _to, IsOpen ? ", or beyond" : "");
 }

@@ -49,6 +49,8 @@ public readonly record struct StabilityNumbers
     /// <summary>Whether a bare homogeneous channel of this subcooling has flows from which it runs away at a constant pressure drop: a screen, see <see cref="FlowCharacteristic"/> for the pass itself.</summary>
     public bool AllowsExcursion => Subcooling > ExcursionSubcooling;
 
+    internal object ToDump() => ToString();
+
     /// <summary>Both numbers, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "phase-change number {0:F3}, subcooling number {1:F3}", PhaseChange, Subcooling);
 }

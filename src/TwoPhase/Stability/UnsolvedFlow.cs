@@ -16,6 +16,8 @@ public readonly record struct UnsolvedFlow
     /// <summary>Why there is none.</summary>
     public string Reason { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Flow and reason, invariant culture.</summary>
     public override string ToString() => $"{Scale.KilogramsPerSecond.Text(_flow)}: {Reason}";
 }

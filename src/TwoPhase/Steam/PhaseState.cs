@@ -57,6 +57,8 @@ public readonly record struct PhaseState
     /// <summary>k, thermal conductivity.</summary>
     public ThermalConductivity ThermalConductivity => ThermalConductivity.FromWattsPerMeterKelvin(Transport.Conductivity(_core));
 
+    internal object ToDump() => ToString();
+
     /// <summary>Pressure, temperature, density and enthalpy, invariant culture.</summary>
     public override string ToString() =>
         $"{Scale.Megapascals.Text(_core.Pressure)}, {Scale.Celsius.Text(_core.Temperature)}, {Scale.KilogramsPerCubicMetre.Text(_core.Density)}, {Scale.KilojoulesPerKilogram.Text(_core.Enthalpy)}";

@@ -48,6 +48,8 @@ public readonly partial record struct Saturation
     /// <summary>The saturated vapour.</summary>
     public PhaseState Vapour => new(_core.Vapour);
 
+    internal object ToDump() => ToString();
+
     /// <summary>Pressure and temperature, invariant culture.</summary>
     public override string ToString() => $"saturation at {Scale.Megapascals.Text(_core.Pressure)}, {Scale.Celsius.Text(_core.Temperature)}";
 }

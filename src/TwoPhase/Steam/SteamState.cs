@@ -75,6 +75,8 @@ public readonly partial record struct SteamState
     public ThermalConductivity? ThermalConductivity => _core.IsWet ? null
         : UnitsNet.ThermalConductivity.FromWattsPerMeterKelvin(Transport.Conductivity(_core.Phase));
 
+    internal object ToDump() => ToString();
+
     /// <summary>The state in engineering units, invariant culture.</summary>
     public override string ToString() => Region == 0 ? "no state"
         : $"{Phase}{(_core.IsWet ? $" x = {Scale.None.Text(_core.Quality)}" : "")}, {Scale.Megapascals.Text(_core.Pressure)}, {Scale.Celsius.Text(_core.Temperature)}, "

@@ -28,6 +28,8 @@ public readonly record struct SurfaceState
     /// <summary>(∂ρ/∂p)h in (kg/m³)/Pa, for solvers; there is no unit type for it.</summary>
     public double DensityByPressure => _point.DensityByPressure;
 
+    internal object ToDump() => ToString();
+
     /// <summary>Temperature, density and quality, invariant culture.</summary>
     public override string ToString() =>
         $"{Scale.Celsius.Text(_point.Temperature)}, {Scale.KilogramsPerCubicMetre.Text(1 / _point.SpecificVolume)}, x = {Scale.None.Text(_point.Quality)}";

@@ -21,6 +21,8 @@ public readonly record struct BiasEstimate
     /// <summary>T = (b/u(b))²: by how much the global statistic falls if this bias is taken out. Chi-square with one degree of freedom when there is none.</summary>
     public double Statistic => Size / StandardUncertainty * (Size / StandardUncertainty);
 
+    internal object ToDump() => ToString();
+
     /// <summary>The estimate in one line.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0:G5} ± {1:G3} (k = 1), T = {2:G4}", Size, StandardUncertainty, Statistic);
 }

@@ -42,6 +42,8 @@ public readonly struct BudgetLine : IEquatable<BudgetLine>
     /// <summary>Whether two lines differ.</summary>
     public static bool operator !=(BudgetLine left, BudgetLine right) => !left.Equals(right);
 
+    internal object ToDump() => ToString();
+
     /// <summary>The line of a table.</summary>
     public override string ToString() => Input is null ? "" : string.Format(
         CultureInfo.InvariantCulture,

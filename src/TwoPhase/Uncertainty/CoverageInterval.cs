@@ -29,6 +29,8 @@ public readonly record struct CoverageInterval
     /// <param name="value">The value, in the unit of the result.</param>
     public bool Contains(double value) => value >= Low && value <= High;
 
+    internal object ToDump() => ToString();
+
     /// <summary>The interval in one line.</summary>
     public override string ToString() =>
         string.Format(CultureInfo.InvariantCulture, "[{0:G6}, {1:G6}] ({2:G4} %)", Low, High, 100 * CoverageProbability);

@@ -56,6 +56,8 @@ public sealed class MonteCarloResult
     private int Covered(double coverageProbability) =>
         Math.Min((int)Math.Round(CoverageInterval.Probability(coverageProbability) * _sorted.Length), _sorted.Length - 1);
 
+    internal object ToDump() => ToString();
+
     /// <summary>The result in one line.</summary>
     public override string ToString() =>
         string.Format(CultureInfo.InvariantCulture, "{0:G6}, u = {1:G4}, {2}, {3} trials", Mean, StandardUncertainty, SymmetricInterval(), Trials);

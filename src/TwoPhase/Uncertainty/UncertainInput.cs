@@ -123,6 +123,8 @@ public sealed class UncertainInput
             ? new(Name, Estimate, StandardUncertainty, degreesOfFreedom, Unit, Distribution)
             : throw Require.OutOfRange(degreesOfFreedom, "Degrees of freedom ν", Scale.None, nameof(degreesOfFreedom), "must be greater than zero");
 
+    internal object ToDump() => ToString();
+
     /// <summary>The input in one line.</summary>
     public override string ToString() =>
         string.Format(CultureInfo.InvariantCulture, "{0} = {1:G6} ± {2:G3}{3}{4} (k = 1)", Name, Estimate, StandardUncertainty, Unit.Length == 0 ? "" : " ", Unit);

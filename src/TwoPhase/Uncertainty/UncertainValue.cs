@@ -16,6 +16,8 @@ public readonly record struct UncertainValue<TQuantity>
     /// <summary>One standard deviation, k = 1.</summary>
     public TQuantity StandardUncertainty { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Value and uncertainty, invariant culture.</summary>
     public override string ToString() => FormattableString.Invariant($"{Value:G5} ± {StandardUncertainty:G2} (k = 1)");
 }

@@ -88,6 +88,8 @@ public sealed class UncertaintyBudget
         return correlated ? least : sum > 0 ? variance * variance / sum : double.PositiveInfinity;
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The budget as a table: inputs with estimate, uncertainty, sensitivity, contribution and share of the variance.</summary>
     public override string ToString()
     {

@@ -60,6 +60,8 @@ public readonly struct GaugePressure : IEquatable<GaugePressure>
     /// <summary>Hash of both values.</summary>
     public override int GetHashCode() => (_gauge, _atmosphere).GetHashCode();
 
+    internal object ToDump() => ToString();
+
     /// <summary>For example <c>9500 kPa gauge over 93 kPa</c>; invariant.</summary>
     public override string ToString() =>
         string.Format(CultureInfo.InvariantCulture, "{0} gauge over {1}", Scale.Kilopascals.Text(_gauge), Scale.Kilopascals.Text(_atmosphere));

@@ -47,6 +47,8 @@ public sealed class Tag : IEquatable<Tag>
     /// <summary>Hash of name and unit.</summary>
     public override int GetHashCode() => (Name, Unit).GetHashCode();
 
+    internal object ToDump() => ToString();
+
     /// <summary>As <see cref="Parse"/> reads it.</summary>
     public override string ToString() => Unit.Length == 0 ? Name : $"{Name} [{Unit}]";
 
