@@ -11,7 +11,7 @@ var pass = new Pass("1", [Tubes("bank").AsConvective(), Tubes("coil")]).WithConv
 var conditions = new PassConditions(MassFlow.FromKilogramsPerSecond(4.6), Temperature.FromDegreesCelsius(168), Pressure.FromMegapascals(9.2), Power.FromMegawatts(8));
 PassProfile profile = SteadyState.Solve(pass, conditions);
 
-profile.Dump("the pass at rest");
+profile.ToString().Dump("the pass at rest");
 profile.PressureDrop.Dump("pressure drop by its causes");
 BoilingOnset.Of(profile).Dump("where boiling begins");
 WaterHoldup.Of(profile).Dump("water and steam in the pass");

@@ -24,7 +24,7 @@ for (int i = 0; i < 3; i++)
     readings = readings
         .WithFeedFlow(i, flow, flow * 0.005)
         .WithDifferential(i, differential * (i == 1 ? 0.92 : 1), differential * 0.01)
-        .WithAbsorbedHeat(i, Power.FromMegawatts(8.61), Power.FromMegawatts(0.08));
+        .WithAbsorbedHeat(i, Power.FromMegawatts(7.93), Power.FromMegawatts(0.08));
 }
 
 ReconciledGenerator result = GeneratorReconciliation.Solve(readings);

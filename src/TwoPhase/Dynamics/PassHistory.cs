@@ -33,6 +33,9 @@ public sealed partial class PassHistory : IReadOnlyList<PassInstant>
     /// <summary>The rows in order of time.</summary>
     public IEnumerator<PassInstant> GetEnumerator() => ((IEnumerable<PassInstant>)_rows).GetEnumerator();
 
+    /// <summary>Length, end and last row in a line, invariant culture.</summary>
+    public override string ToString() => string.Format(System.Globalization.CultureInfo.InvariantCulture, "{0} rows, {1}{2}; last {3}", Count, End, EndReason.Length > 0 ? ": " + EndReason : "", _rows[^1]);
+
     IEnumerator IEnumerable.GetEnumerator() => GetEnumerator();
 
     /// <summary>The history at other times: straight between its rows.</summary>

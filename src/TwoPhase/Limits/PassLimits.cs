@@ -76,8 +76,6 @@ public sealed class PassLimits : IReadOnlyList<LimitFinding>
         return effects;
     }
 
-    internal object ToDump() => ToString();
-
     /// <summary>The headline.</summary>
     public override string ToString() => Headline.ToString();
 }

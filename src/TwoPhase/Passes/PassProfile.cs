@@ -80,6 +80,18 @@ public sealed partial class PassProfile : IReadOnlyList<ProfilePoint>
         for (int i = 0; i < Count; i++) yield return this[i];
     }
 
+    /// <summary>The pass from end to end in a line, invariant culture.</summary>
+    public override string ToString() => string.Format(
+        System.Globalization.CultureInfo.InvariantCulture,
+        "pass {0}: {1:F3} kg/s from {2:F1} °C and {3:F3} MPa to quality {4:F4} at {5:F3} MPa, {6:F3} MW absorbed",
+        Pass.Name,
+        Conditions.RawFeedFlow,
+        _nodes[0].Temperature - 273.15,
+        _nodes[0].Pressure * 1e-6,
+        _nodes[^1].EquilibriumQuality,
+        _nodes[^1].Pressure * 1e-6,
+        Conditions.RawAbsorbedHeat * 1e-6);
+
     IEnumerator IEnumerable.GetEnumerator() => GetEnumerator();
 
     private (PressureDrop Drop, PassAudit Audit) Summed(double pressureError, double massError)
