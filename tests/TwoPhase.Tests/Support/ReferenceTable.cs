@@ -8,9 +8,16 @@ namespace TwoPhase.Tests.Support;
 /// </summary>
 internal sealed class ReferenceTable
 {
+    private static readonly AsyncLocal<string?> Last = new();
+
     private readonly string[] _columns;
 
-    private ReferenceTable(string[] columns, IReadOnlyList<Row> rows) => (_columns, Rows) = (columns, rows);
+    private readonly string _path;
+
+    private ReferenceTable(string path, string[] columns, IReadOnlyList<Row> rows) => (_path, _columns, Rows) = (path, columns, rows);
+
+    /// <summary>Path of the table that the running test has last taken a value from.</summary>
+    public static string? LastLoaded => Last.Value;
 
     public IReadOnlyList<Row> Rows { get; }
 
@@ -20,7 +27,7 @@ internal sealed class ReferenceTable
         string[] lines = [.. File.ReadLines(Path.Combine(AppContext.BaseDirectory, path)).Where(line => line.Length > 0 && line[0] != '#')];
         string[] columns = lines[0].Split(',');
         var rows = new List<Row>(lines.Length);
-        var table = new ReferenceTable(columns, rows);
+        var table = new ReferenceTable(path, columns, rows);
         rows.AddRange(lines.Skip(1).Select(line => new Row(table, line.Split(','))));
         return table;
     }
@@ -31,6 +38,7 @@ internal sealed class ReferenceTable
 
         public string Text(string column)
         {
+            Last.Value = table._path;
             int index = Array.IndexOf(table._columns, column);
             return index >= 0 ? cells[index] : throw new ArgumentException($"No column '{column}'.", nameof(column));
         }
