@@ -101,7 +101,7 @@ public sealed class RunTests(InventedHistory history)
         foreach (string pass in new[] { "1", "2" }) Support.AreEqual(PartitionOf(history.History, Days[3], pass), PartitionOf(Path.Combine(folder, "history"), Days[3], pass));
     }
 
-    // All that a run holds, collected after each partition. One that kept its rows would hold some 200 kB more after each.
+    // All that a run holds, collected after each partition. One that kept its rows would hold some 200 kB more after each, three megabytes at the end; what the runtime itself keeps moves by a tenth of that.
     [Fact]
     public async Task Run_OverALongerHistory_HoldsNoMoreMemory()
     {
@@ -111,7 +111,7 @@ public sealed class RunTests(InventedHistory history)
         await new BackfillRun(settings, console, isTerminal: false) { AfterPartition = () => held.Add(GC.GetTotalMemory(forceFullCollection: true)) }.DoAsync(CancellationToken.None);
         Assert.Equal(InventedHistory.Partitions, held.Count);
         long early = held.Take(3).Max(), late = held.TakeLast(6).Max();
-        Assert.True(late - early < 200_000, $"{early} bytes after 3 partitions, {late} at the end: {string.Join(", ", held)}");
+        Assert.True(late - early < 1_000_000, $"{early} bytes after 3 partitions, {late} at the end: {string.Join(", ", held)}");
     }
 
     private static double Number(string text) => double.Parse(text, CultureInfo.InvariantCulture);
