@@ -1,4 +1,6 @@
 #:project ../../src/TwoPhase/TwoPhase.csproj
+#:property RestorePackagesWithLockFile=false
+#:property RestoreLockedMode=false
 
 // What a change of firing does to an invented pass, as CSV:   dotnet run examples/Scripts/change.cs -- 105 > change.csv
 // Put your pass in its place. It shows physics and is no operating procedure.

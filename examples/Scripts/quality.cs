@@ -1,4 +1,6 @@
 #:project ../../src/TwoPhase/TwoPhase.csproj
+#:property RestorePackagesWithLockFile=false
+#:property RestoreLockedMode=false
 
 // Quality of one reading:   dotnet run examples/Scripts/quality.cs -- 4.8 kg/s 9.6 MPa 41.6 kPa
 // The meter is invented: a machined venturi of 77.9 mm with a throat of 49 mm. Put yours in its place. Advisory only.
