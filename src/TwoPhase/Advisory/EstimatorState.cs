@@ -20,6 +20,8 @@ public sealed class EstimatorState
     /// <summary>The fields in the order in which they were listed.</summary>
     internal IReadOnlyList<KeyValuePair<string, double[]>> Fields { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The JSON document, in one line.</summary>
     public override string ToString()
     {

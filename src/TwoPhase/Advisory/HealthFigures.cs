@@ -89,6 +89,8 @@ public sealed class HealthFigures
         return count > 0 ? sum / count : double.NaN;
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Time and figures, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0:yyyy-MM-dd}: friction {1:F3}, metal {2:F1} K above saturation at full heat, heat {3:F3}", Time, RawFriction, RawMetal, RawHeat);
 }

@@ -51,6 +51,8 @@ public sealed class PassAdvice
 
     private Ratio? Trim(double value) => Reason == AdviceReason.Move ? Ratio.FromDecimalFractions(value) : null;
 
+    internal object ToDump() => ToString();
+
     /// <summary>The advice in a line, invariant culture.</summary>
     public override string ToString() => Reason == AdviceReason.Move
         ? string.Format(CultureInfo.InvariantCulture, "pass '{0}': flow {1:+0.0%;-0.0%} or firing {2:+0.0%;-0.0%} towards {3:F3}, then wait {4:F0} s", Pass, _flow, _firing, _setPoint, _wait)

@@ -71,6 +71,8 @@ public sealed class PassHealth
 
     private static Ratio? Known(double change) => double.IsNaN(change) ? null : Ratio.FromDecimalFractions(change);
 
+    internal object ToDump() => ToString();
+
     /// <summary>The changes and what they speak for, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture, "since {0:yyyy-MM-dd}: pressure drop {1:+0.0%;-0.0%}, metal excess {2:+0.0%;-0.0%}, heat {3:+0.0%;-0.0%}: {4}", Baseline.Time, _drop, _metal, _heat, Finding);

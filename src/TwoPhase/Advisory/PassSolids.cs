@@ -26,6 +26,8 @@ public readonly record struct PassSolids
     /// <summary>Concentration of the outlet water, cooled.</summary>
     public UncertainValue<MassConcentration> Concentration => new(MassConcentration.FromKilogramsPerCubicMeter(_concentration), MassConcentration.FromKilogramsPerCubicMeter(_uncertainty));
 
+    internal object ToDump() => ToString();
+
     /// <summary>Factor and concentration, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "concentrated {0:F2} ± {1:F2} times, {2:F0} ± {3:F0} mg/L (k = 1)", Factor, FactorUncertainty, 1e3 * _concentration, 1e3 * _uncertainty);
 }

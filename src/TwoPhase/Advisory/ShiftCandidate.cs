@@ -26,6 +26,8 @@ public sealed class ShiftCandidate
 
     internal double RawFlow => _flow;
 
+    internal object ToDump() => ToString();
+
     /// <summary>Cause, quality and likelihood, invariant culture.</summary>
     public override string ToString() => string.Format(CultureInfo.InvariantCulture, "{0}: quality {1:F3}, outlet {2:F2} kg/s, likelihood {3:G2}", Cause, _quality, _flow, RelativeLikelihood);
 }

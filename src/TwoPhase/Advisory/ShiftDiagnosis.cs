@@ -100,6 +100,8 @@ public sealed class ShiftDiagnosis
         }
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The causes in lines, invariant culture.</summary>
     public override string ToString() => $"{(Named == ShiftCause.None ? "not separable" : Named)} by {(Witnesses.Count == 0 ? "no witness" : string.Join(", ", Witnesses))}{string.Concat(Candidates.Select(one => Environment.NewLine + one))}";
 }

@@ -118,6 +118,8 @@ public sealed class SolidsBalance
         return copy;
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The quality and its budget.</summary>
     public override string ToString() => "quality " + Budget;
 }

@@ -80,6 +80,8 @@ public sealed class SolidsTransport
         return x >= 1 ? 0 : x <= 0 ? node.Flow.LiquidDensity : (1 - slip.VoidFractionCore(node.Flow)) * node.Flow.LiquidDensity / (1 - x);
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The times in a line, invariant culture.</summary>
     public override string ToString() => FormattableString.Invariant($"delay {_delay:F0} ± {_delayUncertainty:F0} s (k = 1), then mixed over {_mixing:F0} s");
 }

@@ -79,6 +79,8 @@ public sealed class TagReporting
         RawLongestSilence = Require.Positive(longestSilence.Si(), "Longest silence", Scale.Seconds, nameof(longestSilence)),
     };
 
+    internal object ToDump() => ToString();
+
     /// <summary>How it is reported, invariant culture.</summary>
     public override string ToString() => IsByException ? FormattableString.Invariant($"by exception: {Quantity!.SizeText(RawDeadBand)}, at the latest after {RawLongestSilence:F0} s") : "sampled";
 }

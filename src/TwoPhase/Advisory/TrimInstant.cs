@@ -27,6 +27,8 @@ public readonly record struct TrimInstant
 
     internal double RawSetPoint { get; init; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The instant in engineering units, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture, "{0}; trimmed by {1} to {2}, {3}", Pass, Scale.None.Text(RawValue), Scale.None.Text(RawSetPoint), Status);

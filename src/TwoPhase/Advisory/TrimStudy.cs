@@ -68,6 +68,8 @@ public sealed class TrimStudy
         }
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The table of peak deviations of the true quality [points], a row for each disturbance and a column for each source, and the caution below it; invariant culture.</summary>
     public override string ToString()
     {

@@ -45,6 +45,8 @@ public readonly record struct WaterSample
         return Flashed(default(SteamFluid).LiquidEnthalpy(p, t), from, to);
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>The share in a line, invariant culture.</summary>
     public override string ToString() => FormattableString.Invariant($"{RawFlashed:P1} flashed off, concentrated {ConcentrationFactor:F2} times");
 

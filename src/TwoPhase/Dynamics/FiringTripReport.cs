@@ -51,6 +51,8 @@ public sealed class FiringTripReport : CourseReport
     /// <summary>Fastest cooling of the hottest metal, mean over a minute and over the tube wall.</summary>
     public TemperatureChangeRate MetalCooling { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Times and sizes in one line, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture,

@@ -51,6 +51,8 @@ public sealed class FlowLossReport : CourseReport
     /// <summary>Hottest metal up to the end, mean over the tube wall: that of a wetted wall.</summary>
     public Temperature HottestMetal { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Times and sizes in one line, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture,

@@ -17,6 +17,8 @@ public readonly record struct HistorySpan
 
     internal double RawTo { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>From and to in seconds, invariant culture.</summary>
     public override string ToString() => FormattableString.Invariant($"{RawFrom:F0} s to {RawTo:F0} s");
 }

@@ -67,6 +67,8 @@ public sealed class LightOffReport : CourseReport
     /// <summary>Water that left beyond the feed before first boiling, since warm water needs more room.</summary>
     public Mass SwollenOut { get; }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Times and surge in one line, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture,

@@ -53,6 +53,8 @@ public sealed class LinearResponse
         return _step.Response(2 * Math.PI / seconds);
     }
 
+    internal object ToDump() => ToString();
+
     /// <summary>Gain, function and its error, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture,

@@ -65,6 +65,8 @@ public readonly record struct TransferFunction
 
     internal static double Rise(double time, double delay, double lag) => time <= delay ? 0 : lag > 0 ? 1 - Math.Exp((delay - time) / lag) : 1;
 
+    internal object ToDump() => ToString();
+
     /// <summary>The function as one writes it, invariant culture.</summary>
     public override string ToString() => $"{Text(FirstGain, RawFirstDelay, RawFirstLag)} + {Text(SecondGain, RawSecondDelay, RawSecondLag)}";
 
