@@ -62,18 +62,25 @@ public class ServiceTests
         using HttpClient client = new() { BaseAddress = new Uri($"http://{settings.Listen}/") };
 
         using Process first = Start(settings);
-        await Rig.Until(() => QualityOf(client) is not null && File.Exists(settings.StateFile), "a known and saved quality");
+        await Rig.Until(() => KnownOf(client) is not null && File.Exists(settings.StateFile), "a known and saved quality");
         await Task.Delay(6000);   // a state is saved every five seconds
         first.Kill(entireProcessTree: true);
         await first.WaitForExitAsync();
 
         using Process second = Start(settings);
-        await Rig.Until(() => QualityOf(client) is not null, "a known quality again");
+        await Rig.Until(() => KnownOf(client) is not null, "a known quality again");
 
-        // One that knew nothing would need a minute of plant time, and would begin with the reading of that minute.
-        double expected = QualityOf(steady)!.Value, actual = QualityOf(client)!.Value;
+        // One that knew nothing would need a minute of plant time, and would begin with the reading of that minute. Both are asked at the same time of the plant.
+        (DateTimeOffset Time, double Quality)? expected = null, actual = null;
+        await Rig.Until(
+            () =>
+            {
+                (expected, actual) = (KnownOf(steady), KnownOf(client));
+                return expected is { } one && actual is { } other && (one.Time - other.Time).Duration() <= TimeSpan.FromSeconds(2);
+            },
+            "both at the same time of the plant");
         second.Kill(entireProcessTree: true);
-        Assert.Equal(expected, actual, 0.01);
+        Assert.Equal(expected!.Value.Quality, actual!.Value.Quality, 0.01);
     }
 
     [Fact]
@@ -107,7 +114,11 @@ public class ServiceTests
 
     private static bool Known(Rig rig) => rig.Part<PassWatch>().Look(rig.Part<PassWatch>().NothingSeen()).Passes.All(static pass => pass.Quality.Value is not null);
 
-    private static double? QualityOf(Rig rig) => rig.Part<PassWatch>().Look(rig.Part<PassWatch>().NothingSeen()).Passes[0].Quality.Value;
+    private static (DateTimeOffset Time, double Quality)? KnownOf(Rig rig)
+    {
+        WatchView view = rig.Part<PassWatch>().Look(rig.Part<PassWatch>().NothingSeen());
+        return view.Time is { } time && view.Passes[0].Quality.Value is { } quality ? (time, quality) : null;
+    }
 
     private static async Task<MqttServer> Broker(LiveSettings settings)
     {
@@ -116,13 +127,13 @@ public class ServiceTests
         return broker;
     }
 
-    private static double? QualityOf(HttpClient client)
+    private static (DateTimeOffset Time, double Quality)? KnownOf(HttpClient client)
     {
         try
         {
             using var document = JsonDocument.Parse(client.GetStringAsync(new Uri("passes", UriKind.Relative)).GetAwaiter().GetResult());
-            JsonElement value = document.RootElement.GetProperty("passes")[0].GetProperty("quality").GetProperty("value");
-            return value.ValueKind == JsonValueKind.Null ? null : value.GetDouble();
+            JsonElement pass = document.RootElement.GetProperty("passes")[0], quality = pass.GetProperty("quality").GetProperty("value");
+            return quality.ValueKind == JsonValueKind.Null ? null : (pass.GetProperty("time").GetDateTimeOffset(), quality.GetDouble());
         }
         catch (HttpRequestException)
         {
