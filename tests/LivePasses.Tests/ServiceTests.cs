@@ -101,15 +101,28 @@ public class ServiceTests
         await Rig.Until(() => watch.Time is not null, "a first reading");
         DateTimeOffset begin = watch.Time!.Value;
         await Rig.Until(() => watch.Time > begin.AddHours(6), "six hours of plant time", 300);
-        long early = GC.GetTotalMemory(forceFullCollection: true);
+        long early = await Held();
         await Rig.Until(() => watch.Time > begin.AddHours(24), "a day of plant time", 900);
-        long late = GC.GetTotalMemory(forceFullCollection: true);
+        long late = await Held();
 
         // A quarter of a million messages lie between: fifteen bytes kept of each would show. Pools of buffers still grow somewhat.
         Assert.True(late < early + 4_000_000, $"{early} bytes after six hours, {late} after a day");
         LinkView link = rig.Part<TagLink>().Look();
         Assert.Equal(0, link.MessagesRefused);
         Assert.True(link.MessagesRead > 20L * 86_000 / sampling, $"{link.MessagesRead} messages read");
+    }
+
+    // What is held at the least of ten looks: messages on their way come and go.
+    private static async Task<long> Held()
+    {
+        long least = long.MaxValue;
+        for (int i = 0; i < 10; i++)
+        {
+            await Task.Delay(100);
+            least = Math.Min(least, GC.GetTotalMemory(forceFullCollection: true));
+        }
+
+        return least;
     }
 
     private static bool Known(Rig rig) => rig.Part<PassWatch>().Look(rig.Part<PassWatch>().NothingSeen()).Passes.All(static pass => pass.Quality.Value is not null);

@@ -17,7 +17,7 @@ internal sealed class SimulatedPlant : BackgroundService
     private const double Atmosphere = 93e3, Span = 75e3;
 
     // How far it may run ahead of the estimates, how often it looks, and how long it waits for them.
-    private static readonly TimeSpan Lead = TimeSpan.FromSeconds(20), Look = TimeSpan.FromMilliseconds(20), Patience = TimeSpan.FromSeconds(1);
+    private static readonly TimeSpan Lead = TimeSpan.FromSeconds(20), Look = TimeSpan.FromMilliseconds(20), Patience = TimeSpan.FromSeconds(5);
 
     private readonly LiveSettings _settings;
     private readonly PassWatch _watch;

@@ -68,7 +68,7 @@ public readonly record struct TransferFunction
     internal object ToDump() => ToString();
 
     /// <summary>The function as one writes it, invariant culture.</summary>
-    public override string ToString() => $"{Text(FirstGain, RawFirstDelay, RawFirstLag)} + {Text(SecondGain, RawSecondDelay, RawSecondLag)}";
+    public override string ToString() => $"{Text(FirstGain, RawFirstDelay, RawFirstLag)} {(SecondGain < 0 ? '-' : '+')} {Text(Math.Abs(SecondGain), RawSecondDelay, RawSecondLag)}";
 
     private static string Text(double gain, double delay, double lag) => string.Format(CultureInfo.InvariantCulture, "{0:G3} e^(-{1:F0} s)/(1 + {2:F0} s)", gain, delay, lag);
 }
