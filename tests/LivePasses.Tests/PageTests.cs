@@ -104,6 +104,12 @@ public class PageTests
         await page.WaitForFunctionAsync("() => /UTC/.test(document.getElementById('clock').textContent)");
         Assert.Equal(hostile, await page.Locator("#generator").TextContentAsync());
         Assert.Contains(hostile, await page.Locator("h2").First.TextContentAsync(), StringComparison.Ordinal);
+
+        // A payload as hostile as the names: refused, and what it holds is quoted as text.
+        using MQTTnet.IMqttClient client = new MQTTnet.MqttClientFactory().CreateMqttClient();
+        await client.ConnectAsync(new MQTTnet.MqttClientOptionsBuilder().WithTcpServer(rig.Settings.Broker.Host, rig.Settings.Broker.Port).Build());
+        await client.PublishAsync(new MQTTnet.MqttApplicationMessageBuilder().WithTopic(rig.Settings.Topics.Tag("MT-P1-FEED")).WithPayload("{\"value\":1,\"unit\":\"<img src=x onerror=alert(1)>\"}").Build());
+        await page.WaitForFunctionAsync("() => document.getElementById('link').textContent.includes('<img src=x')");
         Assert.Equal(0, await page.Locator("img").CountAsync());
         Assert.NotEqual("taken", await page.TitleAsync());
 
