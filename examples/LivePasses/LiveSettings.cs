@@ -3,6 +3,7 @@ using System.Net;
 using LivePasses.Tags;
 using TwoPhase.Advisory;
 using TwoPhase.Json;
+using TwoPhase.Metering;
 using TwoPhase.Passes;
 using UnitsNet;
 
@@ -41,8 +42,10 @@ internal sealed record LiveSettings(SteamGenerator Generator, DnsEndPoint Broker
     /// <summary>How long the last value of a tag stands for it; longer ago, the tag counts as missing.</summary>
     public TimeSpan Hold { get; init; } = TimeSpan.FromSeconds(10);
 
-    public static LiveSettings Of(string? generatorFile, string? broker, string listen, string? topic, double speed, double limit, string stateFolder)
+    public static LiveSettings Of(string? generatorFile, string? broker, string listen, string? topic, double speed, double limit, string stateFolder, bool plant = false, int sampling = 1)
     {
+        if (plant && generatorFile is not null) throw new SettingsException("--plant with --generator: the simulated plant publishes invented values, under the tags of the invented generator only.");
+        if (sampling is < 1 or > 10) throw new SettingsException($"--sampling {sampling} is not between 1 and 10.");
         if (generatorFile is not null && broker is null) throw new SettingsException("--generator needs --broker: the simulated plant is that of the invented generator.");
         SteamGenerator generator = Read(generatorFile);
         if (!(speed >= 0 && speed <= 1e6)) throw new SettingsException(string.Create(CultureInfo.InvariantCulture, $"--speed {speed} is not between 0 and 1,000,000."));
@@ -51,7 +54,7 @@ internal sealed record LiveSettings(SteamGenerator Generator, DnsEndPoint Broker
             throw new SettingsException($"--listen {listen} is no address:port such as 127.0.0.1:5080.");
         var topics = new Topics(topic ?? Topics.Plain(generator.Name));
         var options = EstimatorOptions.Default.WithQualityLimit(MassFraction.FromDecimalFractions(limit));
-        return new(generator, BrokerOf(broker), page, topics, speed, options, Path.Combine(stateFolder, topics.Prefix.Replace('/', '_') + ".json")) { HasOwnBroker = broker is null };
+        return new(generator, BrokerOf(broker), page, topics, speed, options, Path.Combine(stateFolder, topics.Prefix.Replace('/', '_') + ".json")) { HasOwnBroker = broker is null, SimulatesPlant = plant || broker is null, PlantSampling = sampling };
     }
 
     private static DnsEndPoint BrokerOf(string? text)
@@ -62,6 +65,13 @@ internal sealed record LiveSettings(SteamGenerator Generator, DnsEndPoint Broker
             ? new(text[..colon], port)
             : throw new SettingsException($"--broker {text} is no host:port such as broker.example:1883.");
     }
+
+    private static string? Lack(SteamGenerator generator, Pass pass) =>
+        pass.Meter is null ? "has no meter"
+        : pass.Heat is null ? "has no heated section"
+        : pass.Interchanger is not null ? "has a feed interchanger, which the estimate does not model"
+        : generator.TagsOf(pass)[PassSignal.FeedFlow] is null || generator.TagsOf(pass)[PassSignal.Differential] is null ? "names no tag of its feed flow or its differential"
+        : null;
 
     private static SteamGenerator Read(string? file)
     {
@@ -75,7 +85,11 @@ internal sealed record LiveSettings(SteamGenerator Generator, DnsEndPoint Broker
             throw new SettingsException($"{file}: {error.Message}");
         }
 
-        Pass? blind = generator.Passes.FirstOrDefault(pass => pass.Meter is null || pass.Heat is null);
-        return blind is null ? generator : throw new SettingsException($"{file}: pass '{blind.Name}' has no {(blind.Meter is null ? "meter" : "heated section")}, so its quality cannot be estimated.");
+        foreach (Pass pass in generator.Passes)
+        {
+            if (Lack(generator, pass) is { } lack) throw new SettingsException($"{file}: pass '{pass.Name}' {lack}, so its quality cannot be estimated.");
+        }
+
+        return generator;
     }
 }

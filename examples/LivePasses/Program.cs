@@ -32,12 +32,12 @@ internal static class Program
                 parsed.GetValue(topic),
                 parsed.GetValue(speed),
                 parsed.GetValue(limit),
-                parsed.GetValue(state)!.FullName) with
+                parsed.GetValue(state)!.FullName,
+                parsed.GetValue(plant),
+                parsed.GetValue(sampling)) with
             {
                 User = parsed.GetValue(user),
                 UsesTls = parsed.GetValue(tls),
-                PlantSampling = Math.Clamp(parsed.GetValue(sampling), 1, 10),
-                SimulatesPlant = parsed.GetValue(plant) || parsed.GetValue(broker) is null,
             },
             cancellation));
         return await command.Parse(args).InvokeAsync();
@@ -51,7 +51,7 @@ internal static class Program
             await application.RunAsync(cancellation);
             return Done;
         }
-        catch (Exception fault) when (fault is SettingsException or IOException)
+        catch (Exception fault) when (fault is SettingsException or IOException or System.Net.Sockets.SocketException)
         {
             await Console.Error.WriteLineAsync(fault.Message);
             return BadSettings;

@@ -12,8 +12,12 @@ internal static partial class Words
         Broker(log, broker, settings.Topics.Prefix);
         if (settings.SimulatesPlant) Simulated(log, settings.Speed);
         if (!IPAddress.IsLoopback(settings.Listen.Address)) Open(log, settings.Listen);
+        if (settings.User is not null && !settings.UsesTls) Clear(log);
         Advisory(log);
     }
+
+    [LoggerMessage(Level = LogLevel.Warning, Message = "The password goes to the broker unencrypted: use --tls.")]
+    private static partial void Clear(ILogger log);
 
     [LoggerMessage(Level = LogLevel.Information, Message = "Page of {Generator}: http://{Listen}/")]
     private static partial void Page(ILogger log, IPEndPoint listen, string generator);

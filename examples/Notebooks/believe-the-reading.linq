@@ -7,7 +7,7 @@
   <Namespace>UnitsNet</Namespace>
 </Query>
 
-// Can the reading be believed, and if not, what is the real quality? A simulated, invented pass raises its firing by 6 % after 15 minutes.
+// Can the reading be believed, and if not, what is the real quality? A simulated, invented pass raises its firing from 90 to 95 % after 15 minutes.
 // Its flow has some noise, as every plant's has: one that stands still to the last digit for ten minutes is called frozen.
 // Advisory only: no trip, no limit and no test is replaced.
 var meter = new QualityMeter(new ClassicalVenturi(Length.FromMillimeters(77.9), Length.FromMillimeters(48), ConvergentFinish.Machined), WetSteamModel.Homogeneous);

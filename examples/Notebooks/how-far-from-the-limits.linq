@@ -11,7 +11,7 @@ var pass = new Pass("1", [Tubes("bank").AsConvective(), Tubes("coil")]).WithConv
 var conditions = new PassConditions(MassFlow.FromKilogramsPerSecond(4.6), Temperature.FromDegreesCelsius(168), Pressure.FromMegapascals(9.2), Power.FromMegawatts(8));
 PassProfile profile = SteadyState.Solve(pass, conditions);
 
-PassLimits.Of(profile).Select(limit => limit.ToString()).Dump("the nearest first");
+PassLimits.Of(profile).Select(limit => limit.ToString()).Dump("the site's own limit of quality first");
 DensityWave.Of(profile, Pressure.FromKilopascals(200)).Dump("density waves, with 200 kPa across the feed valve");
 FlowCharacteristic.Of(pass, conditions, MassFlow.FromKilogramsPerSecond(2.5), MassFlow.FromKilogramsPerSecond(7), 10)
     .Select(point => point.ToString())

@@ -6,7 +6,7 @@
   <Namespace>UnitsNet</Namespace>
 </Query>
 
-// Which instrument disagrees with the others? Three invented passes, a separator and the fuel; the differential of the second pass reads 8 % low.
+// Which instrument disagrees with the others? Three invented passes, a separator and the absorbed heat; the differential of the second pass reads 8 % low.
 var meter = new QualityMeter(new ClassicalVenturi(Length.FromMillimeters(77.9), Length.FromMillimeters(48), ConvergentFinish.Machined), WetSteamModel.Homogeneous);
 var generator = new SteamGenerator("invented", Enumerable.Range(1, 3).Select(i => new Pass($"Pass {i}", []).WithMeter(meter)));
 var pressure = Pressure.FromMegapascals(9.2);

@@ -28,7 +28,7 @@ public class PageTests
         await page.GotoAsync(rig.Page);
         await page.WaitForFunctionAsync("() => [...document.querySelectorAll('h2')].length === 6 && [...document.querySelectorAll('h2')].every(head => /reads 0\\.\\d\\d/.test(head.textContent))");
 
-        // Half an hour of plant time, so that there is a trend to look at.
+        // Seventeen minutes of plant time, so that there is a trend to look at.
         DateTimeOffset begin = rig.Part<PassWatch>().Time!.Value;
         await Rig.Until(() => rig.Part<PassWatch>().Time > begin.AddMinutes(17), "seventeen minutes of plant time");
         await page.WaitForTimeoutAsync(1500);

@@ -38,6 +38,7 @@ internal sealed class Rig : IAsyncDisposable
     {
         await _application.StopAsync();
         await _application.DisposeAsync();
+        if (Directory.Exists(Path.GetDirectoryName(Settings.StateFile))) Directory.Delete(Path.GetDirectoryName(Settings.StateFile)!, recursive: true);
     }
 
     /// <summary>Waits for something that must come, and fails where it does not.</summary>

@@ -1,3 +1,4 @@
+using System.Buffers;
 using System.Diagnostics;
 using System.Net;
 using System.Text.Json;
@@ -38,6 +39,26 @@ public class ServiceTests
     }
 
     [Fact]
+    public async Task Estimates_WithoutTags_AreRetainedAsNotKnown()
+    {
+        LiveSettings settings = Rig.Usual(0) with { SimulatesPlant = false };
+        await using Rig rig = await Rig.Start(settings);
+        string last = "";
+        using IMqttClient client = new MqttClientFactory().CreateMqttClient();
+        client.ApplicationMessageReceivedAsync += message =>
+        {
+            last = System.Text.Encoding.UTF8.GetString(message.ApplicationMessage.Payload.ToArray());
+            return Task.CompletedTask;
+        };
+        await client.ConnectAsync(new MqttClientOptionsBuilder().WithTcpServer(settings.Broker.Host, settings.Broker.Port).Build());
+        await client.SubscribeAsync(settings.Topics.Estimate("Pass 1"));
+        await Rig.Until(() => last.Length > 0, "an estimate");
+        using var document = JsonDocument.Parse(last);
+        Assert.Equal("no tags", document.RootElement.GetProperty("trust").GetString());
+        Assert.Equal(JsonValueKind.Null, document.RootElement.GetProperty("quality").GetProperty("value").ValueKind);
+    }
+
+    [Fact]
     public async Task Broker_Restarted_ServiceGoesOn()
     {
         LiveSettings settings = Rig.Usual(0) with { HasOwnBroker = false };
@@ -61,13 +82,12 @@ public class ServiceTests
         await using Rig steady = await Rig.Start(Rig.Usual(10) with { Broker = settings.Broker, HasOwnBroker = false });
         using HttpClient client = new() { BaseAddress = new Uri($"http://{settings.Listen}/") };
 
-        using Process first = Start(settings);
+        using Child first = Start(settings);
         await Rig.Until(() => KnownOf(client) is not null && File.Exists(settings.StateFile), "a known and saved quality");
         await Task.Delay(6000);   // a state is saved every five seconds
-        first.Kill(entireProcessTree: true);
-        await first.WaitForExitAsync();
+        await first.KillAsync();
 
-        using Process second = Start(settings);
+        using Child second = Start(settings);
         await Rig.Until(() => KnownOf(client) is not null, "a known quality again");
 
         // One that knew nothing would need a minute of plant time, and would begin with the reading of that minute. Both are asked at the same time of the plant.
@@ -79,7 +99,6 @@ public class ServiceTests
                 return expected is { } one && actual is { } other && (one.Time - other.Time).Duration() <= TimeSpan.FromSeconds(2);
             },
             "both at the same time of the plant");
-        second.Kill(entireProcessTree: true);
         Assert.Equal(expected!.Value.Quality, actual!.Value.Quality, 0.01);
     }
 
@@ -154,7 +173,7 @@ public class ServiceTests
         }
     }
 
-    private static Process Start(LiveSettings settings)
+    private static Child Start(LiveSettings settings)
     {
         string program = Path.Combine(AppContext.BaseDirectory, "LivePasses.dll");
         var start = new ProcessStartInfo("dotnet") { RedirectStandardOutput = true };
@@ -162,6 +181,22 @@ public class ServiceTests
         var process = Process.Start(start)!;
         process.OutputDataReceived += static (_, _) => { };
         process.BeginOutputReadLine();
-        return process;
+        return new(process);
+    }
+
+    /// <summary>A process that does not outlive its test.</summary>
+    private sealed class Child(Process process) : IDisposable
+    {
+        public async Task KillAsync()
+        {
+            process.Kill(entireProcessTree: true);
+            await process.WaitForExitAsync();
+        }
+
+        public void Dispose()
+        {
+            if (!process.HasExited) process.Kill(entireProcessTree: true);
+            process.Dispose();
+        }
     }
 }

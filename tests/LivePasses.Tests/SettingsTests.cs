@@ -19,6 +19,14 @@ public class SettingsTests
     public void Of_MissingFile_IsNamed() =>
         Assert.Contains("no-such.json", Assert.Throws<SettingsException>(() => LiveSettings.Of("no-such.json", "broker:1883", "127.0.0.1:5080", null, 1, 0.8, "out")).Message, StringComparison.Ordinal);
 
+    [Fact]
+    public void Of_SimulatedPlantUnderTheTagsOfAnother_IsRefused() =>
+        Assert.Contains("--plant with --generator", Assert.Throws<SettingsException>(() => LiveSettings.Of("mine.json", "broker:1883", "127.0.0.1:5080", null, 1, 0.8, "out", plant: true)).Message, StringComparison.Ordinal);
+
+    [Fact]
+    public void Of_SamplingOutOfRange_IsRefused() =>
+        Assert.Contains("--sampling 0", Assert.Throws<SettingsException>(() => LiveSettings.Of(null, null, "127.0.0.1:5080", null, 1, 0.8, "out", sampling: 0)).Message, StringComparison.Ordinal);
+
     [Theory]
     [InlineData("Marten 2", "marten-2")]
     [InlineData("  ", "generator")]

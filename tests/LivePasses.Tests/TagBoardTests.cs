@@ -52,6 +52,20 @@ public class TagBoardTests
     }
 
     [Fact]
+    public void Take_FalseClockBeforeAnyOther_DoesNotHoldUpTheRest()
+    {
+        Give(Pressure, 9507, 1e6);
+        for (int second = 0; second < 20; second++)
+        {
+            Give(Flow, 16, second);
+            Give(Differential, 60, second);
+        }
+
+        Assert.Equal(19, _readings.Count);
+        Assert.Equal(16, _readings[0].Passes[0].FeedFlow!.Value.TonnesPerHour, 9);
+    }
+
+    [Fact]
     public void Take_ValueOfTheNextSecond_DoesNotEnterThisOne()
     {
         Give(Flow, 16, 0);

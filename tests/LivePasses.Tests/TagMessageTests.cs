@@ -34,6 +34,7 @@ public class TagMessageTests
     [InlineData("""{"value":1,"time":"0001-01-01T00:00:00Z"}""")]
     [InlineData("""{"value":1,"time":"yesterday"}""")]
     [InlineData("""{"value":1,"time":7}""")]
+    [InlineData("""{"value":1,"time":"2031-03-09T12:00:00"}""")]
     [InlineData("<script>alert(1)</script>")]
     public void TryRead_AnythingElse_IsRefusedWithAReason(string payload)
     {

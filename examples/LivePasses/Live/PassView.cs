@@ -57,7 +57,7 @@ internal sealed record PassView
             Time = last,
             Sentence = Telling.Silence(pass.Name, last),
             Trust = "no tags",
-            Cautions = [],
+            Cautions = [Telling.Lost],
             IndicatedQuality = None(Fraction),
             Quality = None(Fraction),
             QualityWithinMotion = None(Fraction),

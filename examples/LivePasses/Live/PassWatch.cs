@@ -11,7 +11,8 @@ internal sealed class PassWatch
     public static readonly TimeSpan Patience = TimeSpan.FromSeconds(10);
 
     private readonly Lock _lock = new();
-    private readonly GeneratorEstimator _estimator;
+    private readonly EstimatorOptions _options;
+    private GeneratorEstimator _estimator;
     private readonly double _limit;
     private readonly Trend[] _trends;
     private readonly double[] _feeds;
@@ -25,7 +26,8 @@ internal sealed class PassWatch
         _log = log;
         Generator = settings.Generator;
         _limit = settings.Options.QualityLimit.DecimalFractions;
-        _estimator = new(Generator, settings.Options);
+        _options = settings.Options;
+        _estimator = new(Generator, _options);
         _trends = [.. Generator.Passes.Select(static _ => new Trend())];
         _feeds = new double[_trends.Length];
         _trusts = new Trust[_trends.Length];
@@ -83,20 +85,18 @@ internal sealed class PassWatch
 
     public SavedState Save()
     {
-        lock (_lock) return new(Generator.Name, _time, [.. _estimator.Estimators.Select(static one => new SavedPass(one.Pass.Name, one.Save().ToString()))]);
+        lock (_lock) return new(Generator.Name, _time, [.. Generator.Passes.Select(static pass => pass.Name)], _estimator.Save().ToString());
     }
 
     /// <summary>Goes on from a saved state.</summary>
     /// <exception cref="FormatException">It is of another generator, or of another version.</exception>
     public void Restore(SavedState saved)
     {
-        lock (_lock)
-        {
-            if (saved.Generator != Generator.Name || !saved.Passes.Select(static pass => pass.Name).SequenceEqual(Generator.Passes.Select(static pass => pass.Name)))
-                throw new FormatException($"it is of {saved.Generator}");
-            for (int i = 0; i < saved.Passes.Count; i++) _estimator.Estimators[i].Restore(EstimatorState.Parse(saved.Passes[i].State));
-            _time = saved.Time;
-        }
+        if (saved.Passes is null || saved.State is null) throw new FormatException("it is not whole");
+        if (saved.Generator != Generator.Name || !saved.Passes.SequenceEqual(Generator.Passes.Select(static pass => pass.Name))) throw new FormatException($"it is of {saved.Generator}");
+        var restored = new GeneratorEstimator(Generator, _options);
+        restored.Restore(EstimatorState.Parse(saved.State));
+        lock (_lock) (_estimator, _time) = (restored, saved.Time);
     }
 
     private static double? Rounded(double? quality) => quality is { } value ? Math.Round(value, 4) : null;
@@ -122,7 +122,4 @@ internal sealed class PassWatch
 internal sealed record WatchView(DateTimeOffset? Time, IReadOnlyList<PassView> Passes, IReadOnlyList<IReadOnlyList<TrendPoint>> Trends);
 
 /// <summary>What is written to disk.</summary>
-internal sealed record SavedState(string Generator, DateTimeOffset? Time, IReadOnlyList<SavedPass> Passes);
-
-/// <summary>What is written of one pass.</summary>
-internal sealed record SavedPass(string Name, string State);
+internal sealed record SavedState(string Generator, DateTimeOffset? Time, IReadOnlyList<string>? Passes, string? State);

@@ -8,6 +8,9 @@ namespace LivePasses.Live;
 /// <summary>Estimates in words.</summary>
 internal static class Telling
 {
+    /// <summary>What is said where nothing is known.</summary>
+    public const string Lost = "Nothing measured stands behind this pass now: go by what the plant's procedures name for a lost quality.";
+
     // Shorter waits are not counted out [s].
     private const double LeastWait = 15;
 
@@ -77,9 +80,10 @@ internal static class Telling
         if (estimate.Trust == TwoPhase.Advisory.Trust.ReadsLow)
             cautions.Add("A reading that is too low invites a cut of the feed, which is the dangerous move.");
         if (estimate.Trust == TwoPhase.Advisory.Trust.Disagreement && estimate.QualityIfHeatIsRight > estimate.QualityIfMeterIsRight)
-            cautions.Add("The reading may have fallen while the quality has not: a leak or a rising header pressure looks like this. Do not cut the feed on this reading alone.");
-        if (estimate.Trust is TwoPhase.Advisory.Trust.InputFault or TwoPhase.Advisory.Trust.Unknown)
-            cautions.Add("Nothing measured stands behind this pass now: go by what the plant's procedures name for a lost quality.");
+            cautions.Add("The reading may have fallen while the quality has not, or has risen: a leak, or a meter that drifts low, looks like this, and with a leak the quality is above both numbers. Do not cut the feed on this reading alone.");
+        if (estimate.Trust == TwoPhase.Advisory.Trust.InputFault)
+            cautions.Add("An input is missing: the model carries this number, and not for long. Have ready what the plant's procedures name for a lost quality.");
+        if (estimate.Trust == TwoPhase.Advisory.Trust.Unknown) cautions.Add(Lost);
         return cautions;
     }
 

@@ -43,7 +43,8 @@ internal sealed class Connection : IDisposable
             {
                 try
                 {
-                    await Client.ConnectAsync(_options, cancellation);
+                    MqttClientConnectResult answer = await Client.ConnectAsync(_options, cancellation);
+                    if (answer.ResultCode != MqttClientConnectResultCode.Success) throw new MqttCommunicationException($"it refuses: {answer.ResultCode}");
                     await connected();
                     told = false;
                 }
@@ -51,6 +52,7 @@ internal sealed class Connection : IDisposable
                 {
                     if (!told) failed(fault.InnerException?.Message ?? fault.Message);
                     told = true;
+                    await Client.TryDisconnectAsync();   // a link that is only half made is made anew
                 }
             }
 

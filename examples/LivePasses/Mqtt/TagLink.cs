@@ -2,6 +2,7 @@ using System.Text.Json;
 using LivePasses.Live;
 using LivePasses.Tags;
 using MQTTnet;
+using MQTTnet.Exceptions;
 using TwoPhase.Metering;
 
 namespace LivePasses.Mqtt;
@@ -57,19 +58,22 @@ internal sealed class TagLink : BackgroundService
 
     private async Task Greet()
     {
-        Words.Connected(_log);
         var all = new MqttClientSubscribeOptionsBuilder();
         foreach (string topic in _board.Topics) all = all.WithTopicFilter(topic);
-        await _connection.Client.SubscribeAsync(all.Build());
+        MqttClientSubscribeResult answer = await _connection.Client.SubscribeAsync(all.Build());
+        if (answer.Items.FirstOrDefault(static item => item.ResultCode > MqttClientSubscribeResultCode.GrantedQoS2) is { } refused)
+            throw new MqttCommunicationException($"it refuses {refused.TopicFilter.Topic}: {refused.ResultCode}");
         await _connection.Publish(_topics.Online, Online(true), retain: true, CancellationToken.None);
+        Words.Connected(_log);
     }
 
     private Task Take(MqttApplicationMessageReceivedEventArgs arrived)
     {
         string topic = arrived.ApplicationMessage.Topic;
         GeneratorReading? reading = null;
-        if (TagMessage.TryRead(arrived.ApplicationMessage.Payload, out TagMessage message, out string fault))
-            reading = _board.Take(topic, message, DateTimeOffset.UtcNow, out fault);
+        bool isRead = TagMessage.TryRead(arrived.ApplicationMessage.Payload, out TagMessage message, out string fault);
+        if (isRead && arrived.ApplicationMessage.Retain && message.Time is null) fault = "kept by the broker and without a time: its age is not known";
+        else if (isRead) reading = _board.Take(topic, message, DateTimeOffset.UtcNow, out fault);
         lock (_lock)
         {
             _read++;
@@ -83,16 +87,12 @@ internal sealed class TagLink : BackgroundService
     private async Task PublishEstimates(CancellationToken cancellation)
     {
         using var timer = new PeriodicTimer(Beat);
-        DateTimeOffset? published = null;
         long[] seen = _watch.NothingSeen();
         while (await timer.WaitForNextTickAsync(cancellation))
         {
-            WatchView now = _watch.Look(seen);
-            if (now.Time is null || now.Time == published) continue;
-            bool sent = true;
-            foreach (PassView pass in now.Passes)
-                sent &= await _connection.Publish(_topics.Estimate(pass.Pass), JsonSerializer.SerializeToUtf8Bytes(pass, LiveJson.Options), retain: true, cancellation);
-            if (sent) published = now.Time;
+            // Also when nothing came: what is retained must not stay the last good value.
+            foreach (PassView pass in _watch.Look(seen).Passes)
+                await _connection.Publish(_topics.Estimate(pass.Pass), JsonSerializer.SerializeToUtf8Bytes(pass, LiveJson.Options), retain: true, cancellation);
         }
     }
 }

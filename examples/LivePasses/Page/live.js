@@ -204,12 +204,14 @@ async function begin() {
     held = !held;
     byId('hold').setAttribute('aria-pressed', held);
     if (!held && latest) show(latest);
+    if (held) byId('clock').textContent += ' (held still: old)';
     if (held && latest) latest = { ...latest, trends: latest.trends.map(() => []) };
   });
   const source = new EventSource('/news');
   source.addEventListener('open', () => {
     // A new connection tells the whole trend again.
     passes.forEach(picture => { picture.points = []; });
+    if (latest) latest = { ...latest, trends: latest.trends.map(() => []) };
     document.body.classList.remove('lost');
   });
   source.addEventListener('news', event => take(JSON.parse(event.data)));

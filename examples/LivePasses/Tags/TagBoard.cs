@@ -19,6 +19,7 @@ internal sealed class TagBoard
     private readonly ReadingFormat[] _formats;
     private readonly int _witnesses;
     private DateTimeOffset _end = DateTimeOffset.MinValue;
+    private bool _hasClosed;
 
     public TagBoard(LiveSettings settings)
     {
@@ -51,7 +52,9 @@ internal sealed class TagBoard
         else if (message.Unit is { } unit && unit != slot.Tag.Unit) fault = $"its unit is '{unit}', that of the tag '{slot.Tag.Unit}'";
         if (fault.Length > 0) return null;
         DateTimeOffset time = message.Time ?? arrived;
-        if (_end == DateTimeOffset.MinValue) _end = EndOf(time);
+
+        // Until a second has ended, an earlier time brings its end back: the first message may have had the false clock.
+        if (_end == DateTimeOffset.MinValue || (!_hasClosed && EndOf(time) < _end)) Begin(EndOf(time));
         slot!.Take(time, message.Value, _end);
         if (_byTopic.Values.Count(static tag => tag.Late >= SetBack) >= _witnesses) StartOver();
         return _byTopic.Values.Count(static tag => tag.IsAhead) >= _witnesses ? Close() : null;
@@ -62,11 +65,19 @@ internal sealed class TagBoard
     private Slot SlotOf(string topic, Tag tag)
     {
         if (!_byTopic.TryGetValue(topic, out Slot? slot)) _byTopic.Add(topic, slot = new(tag));
+        else if (!slot.Tag.Equals(tag)) throw new SettingsException($"Tags '{slot.Tag}' and '{tag}' have one topic, {topic}.");
         return slot;
+    }
+
+    private void Begin(DateTimeOffset end)
+    {
+        _end = end;
+        foreach (Slot slot in _byTopic.Values) slot.HoldBack(end);
     }
 
     private GeneratorReading Close()
     {
+        _hasClosed = true;
         var passes = new PassReading[_formats.Length];
         for (int i = 0; i < passes.Length; i++) passes[i] = new(_end, null, null);
         foreach (Slot slot in _byTopic.Values)
@@ -87,7 +98,7 @@ internal sealed class TagBoard
     private void StartOver()
     {
         foreach (Slot slot in _byTopic.Values) slot.Forget();
-        _end = DateTimeOffset.MinValue;
+        (_end, _hasClosed) = (DateTimeOffset.MinValue, false);
     }
 
     private sealed class Slot(Tag tag)
@@ -119,6 +130,14 @@ internal sealed class TagBoard
             // A value before the one that waits is out of order; a row of them says that the one that waits had a false clock.
             _doubts = IsAhead && time < NextTime ? _doubts + 1 : 0;
             if (_doubts is 0 or >= SetBack) (_next, NextTime, IsAhead, _doubts) = (value, time, true, 0);
+        }
+
+        /// <summary>Puts a value of later than an end behind it.</summary>
+        public void HoldBack(DateTimeOffset end)
+        {
+            if (_time < end) return;
+            if (!IsAhead) (_next, NextTime, IsAhead) = (_value, _time, true);
+            (_value, _time) = (double.NaN, DateTimeOffset.MinValue);
         }
 
         public double At(DateTimeOffset end, TimeSpan hold) => end - _time <= hold ? _value : double.NaN;

@@ -73,6 +73,7 @@ internal readonly record struct TagMessage(double Value, DateTimeOffset? Time, s
             else if (reader.ValueTextEquals("time"u8))
             {
                 reader.Read();
+                if (reader.TryGetDateTime(out DateTime plain) && plain.Kind == DateTimeKind.Unspecified) return Refuse(out fault, "its time has no offset");
                 if (!reader.TryGetDateTimeOffset(out DateTimeOffset when) || when < Earliest || when > Latest) return Refuse(out fault, "its time is none of a plant");
                 time = when;
             }
