@@ -19,6 +19,24 @@ internal static class Browser
 
     public static string? Path { get; } = new[] { "/usr/bin/chromium", "/usr/bin/chromium-browser", "/usr/bin/google-chrome" }.FirstOrDefault(File.Exists);
 
-    public static async Task<IBrowser> Launch(IPlaywright playwright) =>
-        await playwright.Chromium.LaunchAsync(new() { ExecutablePath = Path ?? throw new FileNotFoundException("There is no Chromium on this machine, and the environment says that there must be one."), Headless = true, Args = Quiet });
+    /// <summary>An empty page in a browser of its own.</summary>
+    public static async Task<OpenPage> Open()
+    {
+        string path = Path ?? throw new FileNotFoundException("There is no Chromium on this machine, and the environment says that there must be one.");
+        IPlaywright playwright = await Playwright.CreateAsync();
+        IBrowser browser = await playwright.Chromium.LaunchAsync(new() { ExecutablePath = path, Headless = true, Args = Quiet });
+        return new(playwright, browser, await browser.NewPageAsync(new() { ViewportSize = new() { Width = 1240, Height = 1500 } }));
+    }
+}
+
+/// <summary>A page, and the browser that ends with it.</summary>
+internal sealed class OpenPage(IPlaywright playwright, IBrowser browser, IPage page) : IAsyncDisposable
+{
+    public IPage Page { get; } = page;
+
+    public async ValueTask DisposeAsync()
+    {
+        await browser.DisposeAsync();
+        playwright.Dispose();
+    }
 }

@@ -2,6 +2,7 @@ using Deque.AxeCore.Commons;
 using Deque.AxeCore.Playwright;
 using LivePasses.Live;
 using Microsoft.Playwright;
+using MQTTnet;
 
 namespace LivePasses.Tests;
 
@@ -12,9 +13,8 @@ public class PageTests
     public async Task Page_WholeService_ShowsEveryPassInWordsAndPictures()
     {
         await using Rig rig = await Rig.Start(Rig.Usual(0));
-        using IPlaywright playwright = await Playwright.CreateAsync();
-        await using IBrowser browser = await Browser.Launch(playwright);
-        IPage page = await browser.NewPageAsync(new() { ViewportSize = new() { Width = 1240, Height = 1500 } });
+        await using OpenPage open = await Browser.Open();
+        IPage page = open.Page;
         List<string> foreign = [], faults = [];
         page.Request += (_, request) =>
         {
@@ -52,9 +52,8 @@ public class PageTests
     public async Task Page_KeyboardAlone_ReachesEverything()
     {
         await using Rig rig = await Rig.Start(Rig.Usual(200));
-        using IPlaywright playwright = await Playwright.CreateAsync();
-        await using IBrowser browser = await Browser.Launch(playwright);
-        IPage page = await browser.NewPageAsync();
+        await using OpenPage open = await Browser.Open();
+        IPage page = open.Page;
         await page.GotoAsync(rig.Page);
         await page.WaitForSelectorAsync("article");
         await page.Keyboard.PressAsync("Tab");
@@ -76,9 +75,8 @@ public class PageTests
     public async Task Page_HeldStill_MovesNoMoreAndCatchesUp()
     {
         await using Rig rig = await Rig.Start(Rig.Usual(200));
-        using IPlaywright playwright = await Playwright.CreateAsync();
-        await using IBrowser browser = await Browser.Launch(playwright);
-        IPage page = await browser.NewPageAsync();
+        await using OpenPage open = await Browser.Open();
+        IPage page = open.Page;
         await page.GotoAsync(rig.Page);
         await page.WaitForFunctionAsync("() => /UTC/.test(document.getElementById('clock').textContent)");
         await page.ClickAsync("#hold");
@@ -97,18 +95,16 @@ public class PageTests
         var generator = new TwoPhase.Passes.SteamGenerator(hostile, usual.Generator.Passes.Select((pass, i) => i == 0 ? Renamed(pass, hostile) : pass))
             .WithTags(usual.Generator.Tags).WithBasis(usual.Generator.Basis);
         await using Rig rig = await Rig.Start(usual with { Generator = generator });
-        using IPlaywright playwright = await Playwright.CreateAsync();
-        await using IBrowser browser = await Browser.Launch(playwright);
-        IPage page = await browser.NewPageAsync();
+        await using OpenPage open = await Browser.Open();
+        IPage page = open.Page;
         await page.GotoAsync(rig.Page);
         await page.WaitForFunctionAsync("() => /UTC/.test(document.getElementById('clock').textContent)");
         Assert.Equal(hostile, await page.Locator("#generator").TextContentAsync());
         Assert.Contains(hostile, await page.Locator("h2").First.TextContentAsync(), StringComparison.Ordinal);
 
         // A payload as hostile as the names: refused, and what it holds is quoted as text.
-        using MQTTnet.IMqttClient client = new MQTTnet.MqttClientFactory().CreateMqttClient();
-        await client.ConnectAsync(new MQTTnet.MqttClientOptionsBuilder().WithTcpServer(rig.Settings.Broker.Host, rig.Settings.Broker.Port).Build());
-        await client.PublishAsync(new MQTTnet.MqttApplicationMessageBuilder().WithTopic(rig.Settings.Topics.Tag("MT-P1-FEED")).WithPayload("{\"value\":1,\"unit\":\"<img src=x onerror=alert(1)>\"}").Build());
+        using IMqttClient client = await rig.Connect();
+        await client.PublishAsync(new MqttApplicationMessageBuilder().WithTopic(rig.Settings.Topics.Tag("MT-P1-FEED")).WithPayload("{\"value\":1,\"unit\":\"<img src=x onerror=alert(1)>\"}").Build());
         await page.WaitForFunctionAsync("() => document.getElementById('link').textContent.includes('<img src=x')");
         Assert.Equal(0, await page.Locator("img").CountAsync());
         Assert.NotEqual("taken", await page.TitleAsync());

@@ -2,6 +2,7 @@ using System.Net;
 using System.Net.Sockets;
 using Microsoft.AspNetCore.Builder;
 using Microsoft.Extensions.DependencyInjection;
+using MQTTnet;
 
 namespace LivePasses.Tests;
 
@@ -21,7 +22,7 @@ internal sealed class Rig : IAsyncDisposable
     {
         string folder = Directory.CreateTempSubdirectory("live-passes-").FullName;
         LiveSettings settings = LiveSettings.Of(null, null, $"127.0.0.1:{FreePort()}", null, speed, 0.8, folder);
-        return settings with { Broker = new("127.0.0.1", FreePort()), SimulatesPlant = true };
+        return settings with { Broker = new("127.0.0.1", FreePort()) };
     }
 
     public static async Task<Rig> Start(LiveSettings settings)
@@ -29,6 +30,28 @@ internal sealed class Rig : IAsyncDisposable
         WebApplication application = Service.Build(settings);
         await application.StartAsync();
         return new(application, settings);
+    }
+
+    /// <summary>A client at the rig's broker.</summary>
+    public async Task<IMqttClient> Connect()
+    {
+        IMqttClient client = new MqttClientFactory().CreateMqttClient();
+        await client.ConnectAsync(new MqttClientOptionsBuilder().WithTcpServer(Settings.Broker.Host, Settings.Broker.Port).Build());
+        return client;
+    }
+
+    /// <summary>The next estimate of a pass on its topic.</summary>
+    public async Task<MqttApplicationMessage> Estimate(string pass)
+    {
+        var arrived = new TaskCompletionSource<MqttApplicationMessage>();
+        using IMqttClient client = await Connect();
+        client.ApplicationMessageReceivedAsync += message =>
+        {
+            arrived.TrySetResult(message.ApplicationMessage);
+            return Task.CompletedTask;
+        };
+        await client.SubscribeAsync(Settings.Topics.Estimate(pass));
+        return await arrived.Task.WaitAsync(TimeSpan.FromSeconds(60));
     }
 
     public T Part<T>()

@@ -49,29 +49,16 @@ internal sealed record PassView
     public required Quantity ExpectedWait { get; init; }
 
     /// <summary>A pass of which no tag arrives.</summary>
-    public static PassView Silent(Pass pass, DateTimeOffset? last)
+    /// <param name="pass">The pass.</param>
+    /// <param name="nothing">What an estimator says that has seen nothing.</param>
+    /// <param name="last">When the last tag came; null before the first.</param>
+    public static PassView Silent(Pass pass, in QualityEstimate nothing, DateTimeOffset? last) => Of(pass, nothing, default, double.NaN, 1) with
     {
-        QualityEstimate nothing = default;
-        return Of(pass, nothing, default, double.NaN, 1) with
-        {
-            Time = last,
-            Sentence = Telling.Silence(pass.Name, last),
-            Trust = "no tags",
-            Cautions = [Telling.Lost],
-            IndicatedQuality = None(Fraction),
-            Quality = None(Fraction),
-            QualityWithinMotion = None(Fraction),
-            UpperQuality = None(Fraction),
-            QualityIfMeterIsRight = None(Fraction),
-            QualityIfHeatIsRight = None(Fraction),
-            OutletFlow = None("kg/s"),
-            Holdup = None("kg"),
-            BoilingOnset = None("m"),
-            ExpectedWait = None("s"),
-        };
-
-        static Quantity None(string unit) => new(null, unit);
-    }
+        Time = last,
+        Sentence = Telling.Silence(pass.Name, last),
+        Trust = "no tags",
+        Cautions = [Telling.Lost],
+    };
 
     public static PassView Of(Pass pass, in QualityEstimate estimate, in PassShift shift, double feedFlow, double limit) => new()
     {

@@ -14,6 +14,7 @@ internal sealed class PassWatch
     private readonly EstimatorOptions _options;
     private GeneratorEstimator _estimator;
     private readonly double _limit;
+    private readonly QualityEstimate[] _nothing;
     private readonly Trend[] _trends;
     private readonly double[] _feeds;
     private readonly Trust[] _trusts;
@@ -28,6 +29,7 @@ internal sealed class PassWatch
         _limit = settings.Options.QualityLimit.DecimalFractions;
         _options = settings.Options;
         _estimator = new(Generator, _options);
+        _nothing = [.. _estimator.Estimates];
         _trends = [.. Generator.Passes.Select(static _ => new Trend())];
         _feeds = new double[_trends.Length];
         _trusts = new Trust[_trends.Length];
@@ -111,7 +113,7 @@ internal sealed class PassWatch
     private bool IsSilent => _arrived is not { } last || Environment.TickCount64 - last > Patience.TotalMilliseconds;
 
     private PassView ViewOf(int pass) => IsSilent
-        ? PassView.Silent(Generator.Passes[pass], _time)
+        ? PassView.Silent(Generator.Passes[pass], _nothing[pass], _time)
         : PassView.Of(Generator.Passes[pass], _estimator.Estimates[pass], _estimator.Shifts[pass], _feeds[pass], _limit);
 }
 
