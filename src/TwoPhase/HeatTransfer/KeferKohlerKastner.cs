@@ -14,7 +14,8 @@ public abstract partial class CriticalQualityModel
     /// <para>Range: tubes of 24.3 mm bore, 2.5 to 20 MPa, G 500 to 2500 kg/(m²·s), and the range of the mean. In the wider tubes
     /// of most evaporators Fr is smaller and the spread larger than in any data: an indicator only.</para>
     /// <para>Accuracy: none stated in the sources at hand.</para>
-    /// <para>Source: Kefer, Köhler and Kastner, Int. J. Multiphase Flow 15(3), 385-392 (1989); coefficients and range from memory.</para>
+    /// <para>Source: Kefer, Köhler and Kastner, Int. J. Multiphase Flow 15(3), 385-392 (1989); coefficients and range from memory, and
+    /// no second source found to check them against.</para>
     /// </remarks>
     public static CriticalQualityModel KeferKohlerKastner { get; } = new KeferKohlerKastnerModel(new KonkovModel());
 

@@ -12,7 +12,7 @@ public abstract partial class WetSteamModel
     /// <para>Range: one 4-inch Venturi tube of β = 0.401 (flagged beyond 0.05 of that), Fr ≥ 0.5, X ≤ 0.3, 1.5 MPa ≤ p ≤ 9.8 MPa (pressures from memory). The two laws meet at Fr = 1.513,
     /// not at 1.5 where the paper changes over with a step of 0.002 in n: the greater of the two is taken, so that quality and differential stay continuous. n exceeds the homogeneous 1/2 for Fr above 2.34.</para>
     /// <para>Accuracy: 2 % of gas flow in its own data (from memory).</para>
-    /// <para>Source: de Leeuw, North Sea Flow Measurement Workshop (1997), paper 21; as quoted by Steven, Flow Meas. Instrum. 12, 361-372 (2002).</para>
+    /// <para>Source: de Leeuw, North Sea Flow Measurement Workshop (1997), paper 21; as quoted by Steven, Flow Meas. Instrum. 12, 361-372 (2002), and with the same exponents in public wet-gas code.</para>
     /// </remarks>
     public static WetSteamModel DeLeeuw { get; } = new DeLeeuwModel();
 
