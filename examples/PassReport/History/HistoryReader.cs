@@ -12,6 +12,7 @@ internal sealed class HistoryReader : IDisposable
     private readonly IReadOnlyList<Tag> _wanted;
     private readonly StreamReader _stream;
     private readonly CsvParser _parser;
+    private readonly NumberFormatInfo _numbers;
 
     private HistoryReader(string file, HistorySettings settings, IReadOnlyList<Tag> wanted, SampleFaults faults, IProgress<double>? progress)
     {
@@ -25,6 +26,7 @@ internal sealed class HistoryReader : IDisposable
             throw new FileFault(file, "", error is FileNotFoundException or DirectoryNotFoundException ? "there is no such file" : error.Message);
         }
 
+        _numbers = new NumberFormatInfo { NumberDecimalSeparator = settings.DecimalComma ? "," : ".", NumberGroupSeparator = " " };
         var configuration = new CsvConfiguration(CultureInfo.InvariantCulture) { BadDataFound = null, Delimiter = Delimiter(file), IgnoreBlankLines = true };
         _parser = new CsvParser(_stream, configuration);
     }
@@ -49,7 +51,7 @@ internal sealed class HistoryReader : IDisposable
         reader.Header = [.. reader.Cells.Select(cell => cell.Trim())];
         bool isLong = reader.Find("tag") >= 0 && reader.Find("value") >= 0;
         HistoryTable table = isLong ? LongForm.Read(reader) : WideForm.Read(reader);
-        return table.Times.Length > 0 ? table : throw new FileFault(file, "", $"no row has a time that can be read ({string.Join(", ", faults.Counts.Select(pair => $"{pair.Value} × {SampleFaults.Words(pair.Key)}"))})".Replace(" ()", ""));
+        return table.Times.Length > 0 ? table : throw reader.NoTimes();
     }
 
     /// <summary>The next row; false at the end.</summary>
@@ -59,7 +61,7 @@ internal sealed class HistoryReader : IDisposable
         return _parser.Read();
     }
 
-    public int Find(string column) => Array.FindIndex(Header, name => string.Equals(Tag.Parse(Named(name)).Name, column, StringComparison.OrdinalIgnoreCase));
+    public int Find(string column) => Array.FindIndex(Header, heading => string.Equals(Heading(heading, column).Name, column, StringComparison.OrdinalIgnoreCase));
 
     public int Column(string column, string why) =>
         Find(column) is >= 0 and int index ? index : throw Fault($"there is no column '{column}' ({why}); the file has {Listed(Header)}");
@@ -74,7 +76,7 @@ internal sealed class HistoryReader : IDisposable
         if (counted && time.Unit is not ("s" or "sec" or "seconds")) throw Fault($"time column '{time}': a counted time is in seconds, [s]");
         TimeZoneInfo? zone = null;
         if (Settings.Zone is { } name && !TimeZoneInfo.TryFindSystemTimeZoneById(name, out zone)) throw Fault($"time zone '{name}' is not known to this computer");
-        return new TimeReader(zone, counted ? Settings.Start ?? DateTimeOffset.UnixEpoch : null);
+        return new TimeReader(zone, counted ? Settings.Start ?? DateTimeOffset.UnixEpoch : null, Settings.TimeFormat, _numbers);
     }
 
     public int TimeColumn() => Column(TimeTag().Name, "the time");
@@ -97,7 +99,7 @@ internal sealed class HistoryReader : IDisposable
     public double Number(string text, string column)
     {
         string trimmed = text.Trim();
-        if (double.TryParse(trimmed, NumberStyles.Float, CultureInfo.InvariantCulture, out double number) && double.IsFinite(number)) return number;
+        if (double.TryParse(trimmed, NumberStyles.Float, _numbers, out double number) && double.IsFinite(number)) return number;
         SampleFault fault = trimmed.Length == 0 ? SampleFault.Blank : Settings.BadValues.Contains(trimmed, StringComparer.OrdinalIgnoreCase) ? SampleFault.BadWord : SampleFault.Text;
         Faults.Add(fault, Row, column, trimmed);
         return double.NaN;
@@ -111,7 +113,22 @@ internal sealed class HistoryReader : IDisposable
 
     private Tag TimeTag() => Tag.Parse(Settings.Time);
 
-    private static string Named(string heading) => heading.Length == 0 || heading[0] == '[' ? "?" + heading : heading;
+    /// <summary>A heading as the tag of that name where it can be: <c>name [unit]</c>, or <c>name (unit)</c> as spreadsheets have it.</summary>
+    public static Tag Heading(string heading, string column)
+    {
+        if (heading.Length == 0 || heading[0] == '[') return Tag.Parse("?" + heading);
+        bool round = heading.Length > column.Length + 2 && heading[^1] == ')' && heading.StartsWith(column, StringComparison.OrdinalIgnoreCase) && heading[column.Length..].TrimStart()[0] == '(';
+        return round ? new Tag(column, heading[column.Length..].Trim()[1..^1]) : Tag.Parse(heading);
+    }
+
+    private FileFault NoTimes()
+    {
+        if (Faults.Entries is not [var first, ..]) return new(_file, "", "no row has a time that can be read: there are no rows");
+        string way = first.Fault == SampleFault.TimeWithoutZone
+            ? "has no offset; name its zone in the generator's file, \"history\": { \"zone\": \"America/Edmonton\" }"
+            : "is not ISO 8601; say how it is written in the generator's file, \"history\": { \"timeFormat\": \"MM/dd/yyyy HH:mm:ss\" }";
+        return new(_file, $"row {first.Row}", $"no row has a time that can be read; '{first.Text}' {(Settings.TimeFormat is { } format && first.Fault == SampleFault.TimeUnreadable ? $"is not written as \"{format}\"" : way)}");
+    }
 
     private static string Listed(string[] names) => names.Length <= 8 ? string.Join(", ", names) : string.Join(", ", names[..8]) + $" and {names.Length - 8} more";
 

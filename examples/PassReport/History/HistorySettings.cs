@@ -9,6 +9,12 @@ internal sealed class HistorySettings
     /// <summary>Zone of time stamps that carry no offset, by its IANA name; without one such stamps are refused.</summary>
     public string? Zone { get; set; }
 
+    /// <summary>How a time stamp is written where it is not ISO 8601, as .NET writes formats: <c>MM/dd/yyyy HH:mm:ss</c>.</summary>
+    public string? TimeFormat { get; set; }
+
+    /// <summary>Whether numbers have a decimal comma.</summary>
+    public bool DecimalComma { get; set; }
+
     /// <summary>Where a counted time starts.</summary>
     public DateTimeOffset? Start { get; set; }
 

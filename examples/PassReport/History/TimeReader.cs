@@ -3,10 +3,10 @@ using System.Globalization;
 namespace PassReport.History;
 
 /// <summary>
-/// Reads time stamps: ISO 8601 with an offset, local time of a zone, or seconds counted from a start. One reader per stream of
-/// samples, since the repeated hour of a clock change can only be told apart by the order of the samples.
+/// Reads time stamps: ISO 8601 or the format that is given, with an offset or as local time of a zone; or seconds counted from a start.
+/// One reader per stream of samples, since the repeated hour of a clock change can only be told apart by the order of the samples.
 /// </summary>
-internal sealed class TimeReader(TimeZoneInfo? zone, DateTimeOffset? start)
+internal sealed class TimeReader(TimeZoneInfo? zone, DateTimeOffset? start, string? format, NumberFormatInfo numbers)
 {
     // Ticks of year 1 and of year 9999 overflow as soon as an offset is applied.
     private static readonly DateTime Earliest = new(1900, 1, 1), Latest = new(2200, 1, 1);
@@ -23,10 +23,10 @@ internal sealed class TimeReader(TimeZoneInfo? zone, DateTimeOffset? start)
         return null;
     }
 
-    private static SampleFault? Elapsed(string text, DateTimeOffset zero, out DateTimeOffset time)
+    private SampleFault? Elapsed(string text, DateTimeOffset zero, out DateTimeOffset time)
     {
         time = zero;
-        if (!double.TryParse(text, NumberStyles.Float, CultureInfo.InvariantCulture, out double seconds) || !(Math.Abs(seconds) < 1e10)) return SampleFault.TimeUnreadable;
+        if (!double.TryParse(text, NumberStyles.Float, numbers, out double seconds) || !(Math.Abs(seconds) < 1e10)) return SampleFault.TimeUnreadable;
         time = zero.AddTicks((long)Math.Round(seconds * TimeSpan.TicksPerSecond));
         return null;
     }
@@ -34,18 +34,22 @@ internal sealed class TimeReader(TimeZoneInfo? zone, DateTimeOffset? start)
     private SampleFault? Stamp(string text, out DateTimeOffset time)
     {
         time = default;
-        if (!DateTime.TryParse(text, CultureInfo.InvariantCulture, DateTimeStyles.RoundtripKind, out DateTime stamp) || !LooksLikeIso(text) || stamp < Earliest || stamp > Latest) return SampleFault.TimeUnreadable;
+        if (!TryParse(text, out DateTime stamp) || stamp < Earliest || stamp > Latest) return SampleFault.TimeUnreadable;
         if (stamp.Kind != DateTimeKind.Unspecified)
         {
-            time = DateTimeOffset.Parse(text, CultureInfo.InvariantCulture, DateTimeStyles.AssumeUniversal);
+            time = format is null ? DateTimeOffset.Parse(text, CultureInfo.InvariantCulture) : DateTimeOffset.ParseExact(text, format, CultureInfo.InvariantCulture, DateTimeStyles.AllowWhiteSpaces);
             return null;
         }
 
-        if (zone is null) return SampleFault.TimeUnreadable;
+        if (zone is null) return SampleFault.TimeWithoutZone;
         if (zone.IsInvalidTime(stamp)) return SampleFault.TimeSkippedByClock;
         time = zone.IsAmbiguousTime(stamp) ? Repeated(stamp, zone) : new DateTimeOffset(stamp, zone.GetUtcOffset(stamp));
         return null;
     }
+
+    private bool TryParse(string text, out DateTime stamp) => format is null
+        ? DateTime.TryParse(text, CultureInfo.InvariantCulture, DateTimeStyles.RoundtripKind, out stamp) && LooksLikeIso(text)
+        : DateTime.TryParseExact(text, format, CultureInfo.InvariantCulture, DateTimeStyles.AllowWhiteSpaces, out stamp);
 
     /// <summary>The first of the two possible times that is not before the sample before it.</summary>
     private DateTimeOffset Repeated(DateTime stamp, TimeZoneInfo local)

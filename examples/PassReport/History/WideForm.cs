@@ -9,7 +9,7 @@ internal static class WideForm
     {
         int timeColumn = reader.TimeColumn();
         TimeReader times = reader.Times();
-        Dictionary<string, Tag> tags = reader.Tags(name => Tag.Parse(reader.Header[reader.Column(name, "a tag of the generator")]).Unit);
+        Dictionary<string, Tag> tags = reader.Tags(name => HistoryReader.Heading(reader.Header[reader.Column(name, "a tag of the generator")], name).Unit);
         (string Name, int Column, List<double> Values)[] columns = [.. tags.Keys.Select(name => (name, Single(reader, name), new List<double>()))];
 
         List<DateTimeOffset> stamps = [];
@@ -42,7 +42,7 @@ internal static class WideForm
     private static int Single(HistoryReader reader, string name)
     {
         int first = reader.Column(name, "a tag of the generator");
-        int last = Array.FindLastIndex(reader.Header, heading => heading.Length > 0 && heading[0] != '[' && Tag.Parse(heading).Name == name);
+        int last = Array.FindLastIndex(reader.Header, heading => HistoryReader.Heading(heading, name).Name == name);
         return last <= first ? first : throw reader.Fault($"columns {first + 1} and {last + 1} are both named '{name}'");
     }
 }

@@ -50,7 +50,7 @@ internal static class UnitText
         return suffix switch
         {
             'a' => size,
-            'g' => size.Above(basis.Atmosphere ?? throw new FormatException($"unit '{text}' is gauge and the site's atmospheric pressure is not given")),
+            'g' => size.Above(basis.Atmosphere ?? throw new FormatException($"unit '{text}' is gauge and the site's atmospheric pressure is not given: agree it for the site, or write '{unit} at 93 kPa(a)'")),
             'd' => throw new FormatException($"unit '{text}' is a pressure difference where a pressure with a basis is wanted: write {stem}(g) or {stem}(a)"),
             _ => throw new FormatException($"unit '{text}' does not say whether it is gauge or absolute: write {stem}(g) or {stem}(a)"),
         };
@@ -69,7 +69,7 @@ internal static class UnitText
         if (UnitTable.Find(unit, UnitKind.MassFlow) is { } mass) return mass;
         if (UnitTable.Find(unit, UnitKind.VolumeFlow) is { } volume)
         {
-            return volume.Times(basis.WaterDensity ?? throw new FormatException($"unit '{text}' is a volume flow and its base density is not given: write '{unit} at 998.2 kg/m3' or '{unit} at 15 degC'"));
+            return volume.Times(basis.WaterDensity ?? throw new FormatException($"unit '{text}' is a volume flow and its base density is not given: write '{unit} at 998.2 kg/m3' or '{unit} at 15 degC', or agree it for the site"));
         }
 
         if (UnitTable.Find(unit, UnitKind.StandardGasFlow) is not null) throw new FormatException($"unit '{text}' counts a gas, and water is measured here");
