@@ -22,10 +22,12 @@ internal sealed class Run(string? generatorFile, string? historyFile, string fol
         IReadOnlyList<Margins> margins = [];
         IAnsiConsole console = AnsiConsole.Create(new AnsiConsoleSettings { Out = new AnsiConsoleOutput(output), Ansi = isTerminal ? AnsiSupport.Detect : AnsiSupport.No, Interactive = isTerminal ? InteractionSupport.Detect : InteractionSupport.No });
         if (!isTerminal) console.Profile.Width = 150;
-        WithProgress(console, isTerminal, (reading, inferring, drawing) =>
+        WithProgress(console, isTerminal, (reading, inferring, estimating, drawing) =>
         {
             HistoryTable table = HistoryReader.Read(history, site.History, site.Tags, faults, reading);
-            passes = Comparison.Of(PassSeries.From(site.Generator, table, faults, history, inferring));
+            PassSeries[] series = PassSeries.From(site.Generator, table, faults, history, inferring);
+            Estimates.Find(site.Generator.Name, series, estimating);
+            passes = Comparison.Of(series);
             drawing?.Report(0.3);
             margins = Margins.Of(passes, site.Limits);
             Figures.Write(folder, passes, margins, faults);
@@ -50,18 +52,18 @@ internal sealed class Run(string? generatorFile, string? historyFile, string fol
         return file;
     }
 
-    private static void WithProgress(IAnsiConsole console, bool isTerminal, Action<IProgress<double>?, IProgress<double>?, IProgress<double>?> work)
+    private static void WithProgress(IAnsiConsole console, bool isTerminal, Action<IProgress<double>?, IProgress<double>?, IProgress<double>?, IProgress<double>?> work)
     {
         if (!isTerminal)
         {
-            work(null, null, null);
+            work(null, null, null, null);
             return;
         }
 
         console.Progress().AutoClear(true).Start(context =>
         {
-            var tasks = new[] { "Reading the history", "Inferring quality", "Drawing" }.Select(name => new Bar(context.AddTask(name, maxValue: 1))).ToArray();
-            work(tasks[0], tasks[1], tasks[2]);
+            var tasks = new[] { "Reading the history", "Inferring quality", "Estimating what left the passes", "Drawing" }.Select(name => new Bar(context.AddTask(name, maxValue: 1))).ToArray();
+            work(tasks[0], tasks[1], tasks[2], tasks[3]);
         });
     }
 

@@ -31,13 +31,18 @@ internal static class Figures
     {
         DateTimeOffset[] times = passes[0].Series.Times;
         bool[][] moving = [.. passes.Select(pass => Moves.Inside(times, pass.Moves))];
-        Table(file, ["time", .. passes.SelectMany(pass => new[] { $"{pass.Name} quality [kg/kg]", $"{pass.Name} status" })],
-            Enumerable.Range(0, times.Length).Select(i => (string[])[Iso(times[i]), .. passes.SelectMany((pass, p) => new[]
-            {
-                double.IsNaN(pass.Series.Quality[i]) ? "" : pass.Series.Quality[i].ToString("F6", CultureInfo.InvariantCulture),
+        Table(file, ["time", .. passes.SelectMany(pass => (string[])[$"{pass.Name} quality [kg/kg]", $"{pass.Name} status", .. Estimated(pass, $"{pass.Name} estimated [kg/kg]", $"{pass.Name} u motion [kg/kg]", $"{pass.Name} u absolute [kg/kg]", $"{pass.Name} trust")])],
+            Enumerable.Range(0, times.Length).Select(i => (string[])[Iso(times[i]), .. passes.SelectMany((pass, p) => (string[])
+            [
+                Six(pass.Series.Quality[i]),
                 moving[p][i] && !double.IsNaN(pass.Series.Quality[i]) ? pass.Series.Status[i] + ", inputs moving" : pass.Series.Status[i].ToString(),
-            })]));
+                .. pass.Series.Estimate is { } estimate ? [Six(estimate.Quality.Span[i]), Six(estimate.Motion.Span[i]), Six(estimate.Absolute.Span[i]), estimate.Trust.Span[i].ToString()] : Array.Empty<string>(),
+            ])]));
     }
+
+    private static string[] Estimated(PassSummary pass, params string[] headings) => pass.Series.Estimate is null ? [] : headings;
+
+    private static string Six(double quality) => double.IsNaN(quality) ? "" : quality.ToString("F6", CultureInfo.InvariantCulture);
 
     private static void Table(string file, string[] heading, IEnumerable<string[]> rows)
     {

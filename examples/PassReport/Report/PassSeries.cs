@@ -1,5 +1,6 @@
 using System.Globalization;
 using PassReport.History;
+using TwoPhase.Advisory;
 using TwoPhase.Metering;
 using TwoPhase.Passes;
 using TwoPhase.Units;
@@ -27,6 +28,9 @@ internal sealed class PassSeries(Pass pass, DateTimeOffset[] times)
     public double[] Quality { get; } = new double[times.Length];
 
     public ReadingStatus[] Status { get; } = new ReadingStatus[times.Length];
+
+    /// <summary>What left the pass, as estimated, with its uncertainty and whether the reading could be believed; null where the pass cannot be estimated.</summary>
+    public EstimateColumns? Estimate { get; set; }
 
     /// <summary>Reads every pass of a generator out of its history.</summary>
     public static PassSeries[] From(SteamGenerator generator, HistoryTable history, SampleFaults faults, string file, IProgress<double>? progress = null)

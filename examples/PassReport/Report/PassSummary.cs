@@ -1,3 +1,4 @@
+using TwoPhase.Advisory;
 using TwoPhase.Metering;
 using UnitsNet;
 
@@ -19,6 +20,8 @@ internal sealed class PassSummary
         (Flow, Pressure, Differential) = (Mean(series.Flow, end), Mean(series.Pressure, end), Mean(series.Differential, end));
         Quality = Mean(series.Quality, end);
         FeedTemperature = Mean(series.FeedTemperature, end);
+        Estimated = EstimatedAround(end, Now);
+        if (series.Estimate is { } estimate) (Uncertainty, Trust, DisagreesSince) = (2 * estimate.Absolute.Span[^1], estimate.Trust.Span[^1], Disagreement(estimate.Trust.Span, series.Times));
         Models = ReadByModels();
         Skipped = series.Quality.Count(double.IsNaN) / (double)series.Quality.Length;
         OutsideDome = series.Status.Count(status => status is ReadingStatus.SubcooledOutlet or ReadingStatus.SuperheatedOutlet) / (double)series.Status.Length;
@@ -46,6 +49,18 @@ internal sealed class PassSummary
     public double Quality { get; }
 
     public double FeedTemperature { get; }
+
+    /// <summary>Mean of the last ten minutes of the quality that left the pass, as estimated; NaN where it is not known.</summary>
+    public double Estimated { get; }
+
+    /// <summary>Two standard uncertainties of the estimate at the end, all of the meter's included.</summary>
+    public double Uncertainty { get; } = double.NaN;
+
+    /// <summary>Whether the reading at the end can be believed; null where the pass cannot be estimated.</summary>
+    public Trust? Trust { get; }
+
+    /// <summary>Since when reading and model disagree at the end; null while they do not.</summary>
+    public DateTimeOffset? DisagreesSince { get; }
 
     /// <summary>What stands inside the pass if it is at rest and its meter right; null where that cannot be told.</summary>
     public Interior? Interior { get; }
@@ -80,6 +95,19 @@ internal sealed class PassSummary
     /// <summary>How much the pass asks for attention, in points of quality; skipped samples count a point for each four per cent.</summary>
     public double Attention =>
         100 * (Math.Abs(Apart) + (double.IsFinite(Wander) ? Math.Abs(Wander) : 0) + (0.5 * Math.Abs(Largest?.Overshoot ?? 0)) + (0.25 * Skipped) + OutsideDome + (double.IsNaN(Quality) ? 1 : 0));
+
+    /// <summary>Mean estimate over a span of time that ends then.</summary>
+    public double EstimatedAround(DateTimeOffset end, TimeSpan length) =>
+        Series.Estimate is { } estimate ? new Windows(Series.Times, estimate.Quality.ToArray()).Mean(end, length) : double.NaN;
+
+    /// <summary>Mean reading over a span of time that ends then.</summary>
+    public double ReadAround(DateTimeOffset end, TimeSpan length) => new Windows(Series.Times, Series.Quality).Mean(end, length);
+
+    private static DateTimeOffset? Disagreement(ReadOnlySpan<Trust> trust, DateTimeOffset[] times)
+    {
+        int agreed = trust.LastIndexOfAnyExcept(TwoPhase.Advisory.Trust.Disagreement);
+        return agreed == trust.Length - 1 ? null : times[agreed + 1];
+    }
 
     private double Mean(double[] values, DateTimeOffset end) => new Windows(Series.Times, values).Mean(end, Now);
 

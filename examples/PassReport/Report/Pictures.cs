@@ -6,7 +6,7 @@ namespace PassReport.Report;
 /// <summary>The pictures, each as SVG and PNG. Colours are those of Okabe and Ito (2008), safe for colour-blind eyes; no meaning hangs on colour alone.</summary>
 internal sealed class Pictures
 {
-    private static readonly Color Ink = Color.FromHex("#222222"), Line = Color.FromHex("#0072B2"), Shade = Color.FromHex("#E69F00").WithAlpha(0.30);
+    private static readonly Color Ink = Color.FromHex("#222222"), Line = Color.FromHex("#0072B2"), Shade = Color.FromHex("#E69F00").WithAlpha(0.30), Estimated = Color.FromHex("#D55E00");
     private static readonly Color[] Several = [Color.FromHex("#0072B2"), Color.FromHex("#D55E00"), Color.FromHex("#009E73"), Color.FromHex("#CC79A7"), Color.FromHex("#56B4E9"), Color.FromHex("#000000")];
     private static readonly MarkerShape[] Shapes = [MarkerShape.FilledCircle, MarkerShape.FilledSquare, MarkerShape.FilledDiamond, MarkerShape.FilledTriangleUp, MarkerShape.OpenCircle, MarkerShape.OpenSquare, MarkerShape.OpenDiamond, MarkerShape.OpenTriangleUp, MarkerShape.Cross, MarkerShape.Asterisk];
 
@@ -45,7 +45,7 @@ internal sealed class Pictures
         plot.YLabel("Quality [kg/kg]");
         TimeAxis(plot, passes[0].Series.Times);
         plot.Axes.SetLimitsY(-0.03 * height, (passes.Length * height) - (0.1 * height));
-        Legend(plot);
+        Legend(plot, passes.Any(pass => pass.Series.Estimate is not null));
         return plot;
     }
 
@@ -61,6 +61,7 @@ internal sealed class Pictures
         double[] xs = [.. pass.Series.Times.Select(At)], ys = [.. pass.Series.Quality.Select(quality => quality >= low && quality <= high ? quality + offset : double.NaN)];
         ScottPlot.Plottables.Scatter line = plot.Add.ScatterLine(xs, ys, Line);
         line.LineWidth = 1;
+        if (pass.Series.Estimate is { } estimate) plot.Add.ScatterLine(xs, [.. estimate.Quality.ToArray().Select(quality => quality >= low && quality <= high ? quality + offset : double.NaN)], Estimated).LineWidth = 2;
         ScottPlot.Plottables.Text name = plot.Add.Text(pass.Name, At(pass.Series.Times[0]), high + offset);
         name.LabelAlignment = Alignment.UpperLeft;
         name.LabelFontSize = 14;
@@ -70,9 +71,10 @@ internal sealed class Pictures
         name.OffsetX = 6;
     }
 
-    private static void Legend(Plot plot)
+    private static void Legend(Plot plot, bool isEstimated)
     {
         plot.Legend.ManualItems.Add(new LegendItem { LabelText = "quality as the meter reads it", LineColor = Line, LineWidth = 2 });
+        if (isEstimated) plot.Legend.ManualItems.Add(new LegendItem { LabelText = "quality that left the pass, as estimated", LineColor = Estimated, LineWidth = 3 });
         plot.Legend.ManualItems.Add(new LegendItem { LabelText = "inputs moving or settling: not to be believed", FillColor = Shade, LineWidth = 0 });
         plot.ShowLegend(Edge.Bottom).Legend.Orientation = Orientation.Horizontal;
     }

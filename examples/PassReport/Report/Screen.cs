@@ -15,7 +15,8 @@ internal static class Screen
         foreach (string sentence in Verdict.Sentences(passes)) console.WriteLine(sentence);
         console.WriteLine();
         console.Write(Rows(passes));
-        console.WriteLine("Means of the last ten minutes; most in need of attention first. Models: what the published wet-steam models make of the same reading.");
+        console.WriteLine("Means of the last ten minutes; most in need of attention first. Models: what the published wet-steam models make of the same reading."
+            + (passes.Any(pass => pass.Series.Estimate is not null) ? " Estimated: ± twice the standard uncertainty, the meter's own and the wet-steam model's included." : ""));
         if (passes.Any(pass => pass.Interior is not null))
         {
             console.WriteLine();
@@ -43,16 +44,18 @@ internal static class Screen
     private static Table Rows(IReadOnlyList<PassSummary> passes)
     {
         Table table = new Table().Border(TableBorder.Simple).AddColumn("Pass");
-        foreach (string heading in new[] { "Flow\nkg/s", "Pressure\nMPa abs", "Differential\nkPa", "Quality\nread", "Models\nlow – high" }) table.AddColumn(new TableColumn(new Text(heading)).RightAligned().NoWrap());
+        foreach (string heading in new[] { "Flow\nkg/s", "Pressure\nMPa abs", "Differential\nkPa", "Quality\nread", "Left the pass,\nestimated", "Models\nlow – high" }) table.AddColumn(new TableColumn(new Text(heading)).RightAligned().NoWrap());
         table.AddColumn("Why");
         foreach (PassSummary pass in passes)
         {
             table.AddRow(new Text(pass.Name), new Text(Number(pass.Flow, "0.000")), new Text(Number(pass.Pressure / 1e6, "0.000")), new Text(Number(pass.Differential / 1e3, "0.00")),
-                new Text(Number(pass.Quality, "0.000")), new Text($"{Number(pass.LowestModel, "0.00")} – {Number(pass.HighestModel, "0.00")}"), new Text(Verdict.Why(pass)));
+                new Text(Number(pass.Quality, "0.000")), new Text(Estimate(pass)), new Text($"{Number(pass.LowestModel, "0.00")} – {Number(pass.HighestModel, "0.00")}"), new Text(Verdict.Why(pass)));
         }
 
         return table;
     }
+
+    private static string Estimate(PassSummary pass) => double.IsFinite(pass.Estimated) ? $"{Number(pass.Estimated, "0.000")} ± {Number(pass.Uncertainty, "0.000")}" : "–";
 
     private static Table Interiors(IReadOnlyList<PassSummary> passes)
     {

@@ -8,6 +8,8 @@ internal static class Verdict
     // Two points are what noise and small differences between passes leave; common practice, no source.
     private const double Notable = 0.02;
 
+    private static readonly TimeSpan Peak = TimeSpan.FromSeconds(30);
+
     public static IEnumerable<string> Sentences(IReadOnlyList<PassSummary> passes)
     {
         PassSummary[] reading = [.. passes.Where(pass => double.IsFinite(pass.Quality))];
@@ -23,6 +25,8 @@ internal static class Verdict
         foreach (PassSummary pass in passes.Where(pass => Math.Abs(pass.Wander) > Notable)) yield return Wandering(pass, passes.Count);
         PassSummary[] swung = [.. passes.Where(pass => Math.Abs(pass.Largest?.Overshoot ?? 0) > Notable)];
         if (swung.Length > 0) yield return False(swung.MaxBy(pass => Math.Abs(pass.Largest!.Overshoot))!, swung.Length);
+        foreach (PassSummary pass in passes.Where(pass => pass.DisagreesSince is not null))
+            yield return $"{pass.Name}: meter and model disagree since {Time(pass.DisagreesSince!.Value)}: its heat, its meter or its feed flow, which one pass alone cannot tell apart.";
         if (passes.Where(pass => pass.IsMovingNow).Select(pass => pass.Name).ToArray() is { Length: > 0 } moving)
             yield return $"At the end of the history the inputs of {Listed(moving)} are still moving or settling: do not believe the last reading yet.";
         if (swung.Length == 0 && passes.All(pass => !(Math.Abs(pass.Wander) > Notable) && Math.Abs(pass.Apart) <= Notable)) yield return "Nothing here asks for attention.";
@@ -30,7 +34,8 @@ internal static class Verdict
 
     public static IEnumerable<string> Cautions(IReadOnlyList<PassSummary> passes)
     {
-        yield return "A quality is inferred from the differential and the feed flow; it is right only while as much leaves the pass as enters it. A move counts as settled five minutes after the inputs rest: a rule of thumb, not a model of your pass.";
+        yield return "A quality is inferred from the differential and the feed flow; it is right only while as much leaves the pass as enters it. A move counts as settled five minutes after the inputs rest: a rule of thumb.";
+        if (passes.Any(pass => pass.Series.Estimate is not null)) yield return "The estimate is the library's model of the pass, corrected by the meter: it takes away what the water on the move does to a reading, not what is wrong with a meter.";
         if (passes.FirstOrDefault(pass => pass.Models.Count > 1) is { } pass)
         {
             yield return $"The wet-steam models differ by {Size(pass.HighestModel - pass.LowestModel)} points on one and the same reading. Until a separator or laboratory test has settled the model, compare passes, not absolute values.";
@@ -69,6 +74,10 @@ internal static class Verdict
     {
         Move move = pass.Largest!;
         string others = count == 1 ? "" : $" The same happened, smaller, in {Words.Count(count - 1, "other pass", "other passes")}.";
-        return $"The reading was false while inputs moved: at {Time(move.PeakTime)} {pass.Name} stood {Size(move.Overshoot)} points {(move.Overshoot > 0 ? "above" : "below")} its level before and after ({Number(move.Before, "0.000")} and {Number(move.After, "0.000")}), after a move of the {move.Cause}. At least that much of it was water on the move, not quality.{others}";
+        double left = pass.EstimatedAround(move.PeakTime, Peak), read = pass.ReadAround(move.PeakTime, Peak);
+        string truth = double.IsFinite(left)
+            ? $"By the estimate {Number(left, "0.000")} left the pass then: the reading of {Number(read, "0.000")} was {Size(read - left)} points false."
+            : "At least that much of it was water on the move, not quality.";
+        return $"The reading was false while inputs moved: at {Time(move.PeakTime)} {pass.Name} stood {Size(move.Overshoot)} points {(move.Overshoot > 0 ? "above" : "below")} its level before and after ({Number(move.Before, "0.000")} and {Number(move.After, "0.000")}), after a move of the {move.Cause}. {truth}{others}";
     }
 }

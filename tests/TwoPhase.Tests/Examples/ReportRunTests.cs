@@ -39,6 +39,11 @@ public sealed class ReportRunTests : IDisposable
         Assert.DoesNotContain("\u001b", output, StringComparison.Ordinal);
         string[] move = File.ReadAllLines(Out("moves.csv"))[1].Split(',');
         Assert.InRange(double.Parse(move[6], CultureInfo.InvariantCulture), 0.02, 0.12);
+        Assert.Contains("By the estimate", output, StringComparison.Ordinal);
+        string[][] rows = [.. File.ReadAllLines(Out("quality.csv")).Select(line => line.Replace(", inputs moving", "", StringComparison.Ordinal).Split(','))];
+        int read = Array.IndexOf(rows[0], "Pass quality [kg/kg]"), estimated = Array.IndexOf(rows[0], "Pass estimated [kg/kg]"), trust = Array.IndexOf(rows[0], "Pass trust");
+        Assert.Contains(rows, row => row[trust] == "ReadsHigh");
+        Assert.InRange(rows.Skip(100).Max(row => double.Parse(row[read], CultureInfo.InvariantCulture) - double.Parse(row[estimated], CultureInfo.InvariantCulture)), 0.04, 0.15);
         Assert.Contains("Boils from", output, StringComparison.Ordinal);
         Assert.Contains("never a substitute for tube-skin thermocouples or trips", output, StringComparison.Ordinal);
         Assert.Contains("It is for you to confirm", output, StringComparison.Ordinal);
@@ -125,6 +130,43 @@ public sealed class ReportRunTests : IDisposable
         Assert.Contains("5,DA,flagged by its status,Uncertain", File.ReadAllLines(Out("faults.csv")));
         string[] status = [.. File.ReadAllLines(Out("quality.csv")).Skip(1).Select(line => line.Split(',')[2])];
         Assert.Equal(["Missing", "WetSteam", "Missing", "WetSteam", "Missing"], status);
+    }
+
+    // A spreadsheet's export: semicolons, decimal commas, days before months, units in round brackets. The same numbers as written the ISO way.
+    [Fact]
+    public void Run_SpreadsheetExport_ReadsAsTheIsoFileDoes()
+    {
+        string[] rows = ["17.28,9507,41.6,38096,167.2", "17.31,9508,41.7,38100,167.4"];
+        string iso = Write("iso.csv", Heading, "2031-05-14T12:00:00," + rows[0], "2031-05-14T12:00:10," + rows[1]);
+        Assert.Equal(0, Run(Write("g.json", Generator), iso).Code);
+        string expected = File.ReadAllText(Out("quality.csv"));
+        string sheet = Write("sheet.csv", "time;FA (t/h);PA (kPa(g));DA (kPa);FB (lb/h);DB (inH2O at 60 degF)",
+            "14.05.2031 12:00:00;" + rows[0].Replace(',', ';').Replace('.', ','), "14.05.2031 12:00:10;" + rows[1].Replace(',', ';').Replace('.', ','));
+        string settings = Generator.Replace("\"time\": \"time\",", "\"timeFormat\": \"dd.MM.yyyy HH:mm:ss\", \"decimalComma\": true,", StringComparison.Ordinal);
+        (int code, _, string error) = Run(Write("s.json", settings), sheet);
+        Assert.Equal(("", 0), (error, code));
+        Assert.Equal(expected, File.ReadAllText(Out("quality.csv")));
+    }
+
+    [Theory]
+    [InlineData("\"timeFormat\": \"MM/dd/yyyy HH:mm zzz\",", "05/14/2031 12:00 -07:00", "2031-05-14T12:00:00-07:00")]
+    [InlineData("\"timeFormat\": \"M/d/yyyy h:mm:ss tt\",", "5/14/2031 1:02:03 PM", "2031-05-14T13:02:03+02:00")]
+    public void Run_TimeFormat_TellsMonthFromDay(string setting, string stamp, string expected)
+    {
+        string settings = Generator.Replace("\"time\": \"time\",", setting, StringComparison.Ordinal);
+        (int code, _, string error) = Run(Write("g.json", settings), Write("h.csv", Heading, stamp + ",17.28,9507,41.6,38096,167.2"));
+        Assert.Equal(("", 0), (error, code));
+        Assert.StartsWith(expected + ",", File.ReadAllLines(Out("quality.csv"))[1], StringComparison.Ordinal);
+    }
+
+    [Theory]
+    [InlineData("", "05/14/2031 12:00", "h.csv, row 2: no row has a time that can be read; '05/14/2031 12:00' is not ISO 8601")]
+    [InlineData("\"timeFormat\": \"dd.MM.yyyy\",", "05/14/2031 12:00", "is not written as \"dd.MM.yyyy\"")]
+    [InlineData("no zone", "2031-05-14T12:00:00", "has no offset; name its zone")]
+    public void Run_UnreadableTimes_AreShownWithTheWayOut(string setting, string stamp, string expected)
+    {
+        string settings = setting == "no zone" ? Generator.Replace("\"zone\": \"Europe/Berlin\", ", "", StringComparison.Ordinal) : Generator.Replace("\"time\": \"time\",", setting, StringComparison.Ordinal);
+        IsOneLine(Run(Write("g.json", settings), Write("h.csv", Heading, stamp + ",17.28,9507,41.6,38096,167.2")), expected);
     }
 
     [Theory]
