@@ -1,5 +1,6 @@
 using System.Globalization;
 using TwoPhase.Metering;
+using TwoPhase.Numerics;
 using UnitsNet;
 
 namespace TwoPhase.Advisory;
@@ -42,16 +43,16 @@ public readonly record struct QualityEstimate
     public MassFraction? MotionOfEither => Fraction(RawEnds);
 
     /// <summary>Flow that leaves the pass.</summary>
-    public MassFlow? OutletFlow => double.IsNaN(RawOutletFlow) ? null : MassFlow.FromKilogramsPerSecond(RawOutletFlow);
+    public MassFlow? OutletFlow => double.IsNaN(RawOutletFlow) ? null : MassFlow.FromKilogramsPerSecond((double)RawOutletFlow);
 
     /// <summary>Rate of change of the water held; negative while it is pushed out.</summary>
-    public MassFlow? HoldupRate => double.IsNaN(RawHoldupRate) ? null : MassFlow.FromKilogramsPerSecond(RawHoldupRate);
+    public MassFlow? HoldupRate => double.IsNaN(RawHoldupRate) ? null : MassFlow.FromKilogramsPerSecond((double)RawHoldupRate);
 
     /// <summary>Water and steam held.</summary>
-    public Mass? Holdup => double.IsNaN(RawHoldup) ? null : Mass.FromKilograms(RawHoldup);
+    public Mass? Holdup => double.IsNaN(RawHoldup) ? null : Mass.FromKilograms((double)RawHoldup);
 
     /// <summary>Distance from the inlet at which boiling begins; null for nowhere.</summary>
-    public Length? BoilingOnset => double.IsNaN(RawOnset) ? null : Length.FromMeters(RawOnset);
+    public Length? BoilingOnset => double.IsNaN(RawOnset) ? null : Length.FromMeters((double)RawOnset);
 
     /// <summary>Absorbed heat per firing over that of the calibration, as the meter has it.</summary>
     public double? HeatFactor => double.IsNaN(RawHeatFactor) ? null : RawHeatFactor;
@@ -60,7 +61,7 @@ public readonly record struct QualityEstimate
     public Trust Trust { get; internal init; }
 
     /// <summary>How much longer, by the water's way through the pass, before the reading can be believed; null where time does not mend it.</summary>
-    public Duration? ExpectedWait => double.IsNaN(RawWait) ? null : Duration.FromSeconds(RawWait);
+    public Duration? ExpectedWait => double.IsNaN(RawWait) ? null : Duration.FromSeconds((double)RawWait);
 
     /// <summary>The input at fault; <see cref="PassSignal.None"/> for none.</summary>
     public PassSignal Fault { get; internal init; }
@@ -80,64 +81,47 @@ public readonly record struct QualityEstimate
     /// <summary>The third largest.</summary>
     public EstimateReason ThirdReason { get; internal init; }
 
-    internal double RawIndicated { get; init; }
+    internal Known RawIndicated { get; init; }
 
-    internal double RawQuality { get; init; }
+    internal Known RawQuality { get; init; }
 
-    internal double RawMotion { get; init; }
+    internal Known RawMotion { get; init; }
 
-    internal double RawAbsolute { get; init; }
+    internal Known RawAbsolute { get; init; }
 
-    internal double RawLimit { get; init; }
+    internal Known RawLimit { get; init; }
 
-    internal double RawIfMeter { get; init; }
+    internal Known RawIfMeter { get; init; }
 
-    internal double RawIfHeat { get; init; }
+    internal Known RawIfHeat { get; init; }
 
-    internal double RawEnds { get; init; }
+    internal Known RawEnds { get; init; }
 
-    internal double RawOutletFlow { get; init; }
+    internal Known RawOutletFlow { get; init; }
 
-    internal double RawHoldupRate { get; init; }
+    internal Known RawHoldupRate { get; init; }
 
-    internal double RawHoldup { get; init; }
+    internal Known RawHoldup { get; init; }
 
-    internal double RawOnset { get; init; }
+    internal Known RawOnset { get; init; }
 
-    internal double RawHeatFactor { get; init; }
+    internal Known RawHeatFactor { get; init; }
 
-    internal double RawWait { get; init; }
+    internal Known RawWait { get; init; }
 
     /// <summary>One that knows nothing but the reading.</summary>
-    internal static QualityEstimate Nothing(DateTimeOffset time, double indicated) => new()
-    {
-        Time = time,
-        RawIndicated = indicated,
-        RawQuality = double.NaN,
-        RawMotion = double.NaN,
-        RawAbsolute = double.NaN,
-        RawLimit = double.NaN,
-        RawIfMeter = double.NaN,
-        RawIfHeat = double.NaN,
-        RawEnds = double.NaN,
-        RawOutletFlow = double.NaN,
-        RawHoldupRate = double.NaN,
-        RawHoldup = double.NaN,
-        RawOnset = double.NaN,
-        RawHeatFactor = double.NaN,
-        RawWait = double.NaN,
-    };
+    internal static QualityEstimate Nothing(DateTimeOffset time, double indicated) => new() { Time = time, RawIndicated = indicated };
 
-    private static MassFraction? Fraction(double value) => Numerics.Fast.IsFinite(value) ? MassFraction.FromDecimalFractions(value) : null;
+    private static MassFraction? Fraction(double value) => Fast.IsFinite(value) ? MassFraction.FromDecimalFractions(value) : null;
 
     internal object ToDump() => ToString();
 
     /// <summary>The estimate in a sentence, invariant culture.</summary>
     public override string ToString()
     {
-        string reads = double.IsNaN(RawIndicated) ? "no reading" : string.Format(CultureInfo.InvariantCulture, "reads {0:F3}", RawIndicated);
-        string known = double.IsNaN(RawQuality) ? "not known" : string.Format(CultureInfo.InvariantCulture, "is {0:F3} ± {1:F3}", RawQuality, 2 * RawMotion);
-        string wait = double.IsNaN(RawWait) ? "" : string.Format(CultureInfo.InvariantCulture, " for about {0:F0} s", RawWait);
+        string reads = double.IsNaN(RawIndicated) ? "no reading" : string.Format(CultureInfo.InvariantCulture, "reads {0:F3}", (double)RawIndicated);
+        string known = double.IsNaN(RawQuality) ? "not known" : string.Format(CultureInfo.InvariantCulture, "is {0:F3} ± {1:F3}", (double)RawQuality, 2 * RawMotion);
+        string wait = double.IsNaN(RawWait) ? "" : string.Format(CultureInfo.InvariantCulture, " for about {0:F0} s", (double)RawWait);
         return string.Format(CultureInfo.InvariantCulture, "{0:HH:mm:ss}: {1}, {2}; {3}{4}", Time, reads, known, Trust == Trust.InputFault ? $"{Trust} ({Fault})" : Trust == Trust.NotRunning ? State : Trust, wait);
     }
 }

@@ -25,10 +25,10 @@ public class QualityBackfillTests
             var estimator = new QualityEstimator(Three.Passes[i], Three.Passes[i].Meter!, Coarse);
             PassColumns columns = Columns(Live[i]);
             QualityEstimate[] estimates = [.. Enumerable.Range(0, columns.Count).Select(t => estimator.Update(columns[t]))];
-            Assert.Equal(estimates.Select(estimate => estimate.RawQuality), whole[i].Quality.ToArray());
-            Assert.Equal(estimates.Select(estimate => estimate.RawIndicated), whole[i].Indicated.ToArray());
-            Assert.Equal(estimates.Select(estimate => estimate.RawMotion), whole[i].Motion.ToArray());
-            Assert.Equal(estimates.Select(estimate => estimate.RawAbsolute), whole[i].Absolute.ToArray());
+            Assert.Equal(estimates.Select(estimate => (double)estimate.RawQuality), whole[i].Quality.ToArray());
+            Assert.Equal(estimates.Select(estimate => (double)estimate.RawIndicated), whole[i].Indicated.ToArray());
+            Assert.Equal(estimates.Select(estimate => (double)estimate.RawMotion), whole[i].Motion.ToArray());
+            Assert.Equal(estimates.Select(estimate => (double)estimate.RawAbsolute), whole[i].Absolute.ToArray());
             Assert.Equal(estimates.Select(estimate => estimate.Trust), whole[i].Trust.ToArray());
             Assert.Equal(whole[i].Quality.ToArray()[1500..], second[i].Quality.ToArray());
             Assert.Equal(whole[i].EndState.ToString(), second[i].EndState.ToString());

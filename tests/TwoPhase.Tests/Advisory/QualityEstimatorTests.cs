@@ -15,6 +15,20 @@ public class QualityEstimatorTests
 {
     private static readonly (PassReading Reading, double Truth)[] Quiet = [.. Readings(Still, 900, 1)];
 
+    // An app shows what its variable holds before the first reading came.
+    [Fact]
+    public void Default_OfAnEstimate_KnowsNothing()
+    {
+        QualityEstimate nothing = default;
+        Assert.Null(nothing.Quality);
+        Assert.Null(nothing.IndicatedQuality);
+        Assert.Null(nothing.UpperQuality);
+        Assert.Null(nothing.SolidsConcentration);
+        Assert.Null(nothing.OutletFlow);
+        Assert.Null(nothing.ExpectedWait);
+        Assert.Equal("00:00:00: no reading, not known; Unknown", nothing.ToString());
+    }
+
     [Fact]
     public void Update_FirstMinute_KnowsNothingAndSaysSo()
     {
@@ -40,7 +54,7 @@ public class QualityEstimatorTests
         Approx.Relative(1 / (1 - last.RawQuality), last.SolidsConcentration!.Value, 1e-12);
         Approx.Relative(last.RawQuality + (1.645 * last.RawAbsolute), last.UpperQuality!.Value.DecimalFractions, 1e-12);
         Approx.Relative(Start.RawAbsorbedHeat / 8.4e6, last.HeatFactor!.Value, 0.003);
-        Assert.InRange(last.RawAbsolute, 0.015, 0.04);
+        Assert.InRange<double>(last.RawAbsolute, 0.015, 0.04);
         Assert.True(last.RawMotion < 0.001);
     }
 
