@@ -37,7 +37,8 @@ public static class GeneratorReconciliation
         {
             Instrument[] measured = Measured(measurements, balances, aside);
             Instrument worst = measured[suspects[0]];
-            if (Without(balances, [.. aside, worst]) is not { } without) break;
+            NonlinearReconciliation? without = Without(balances, [.. aside, worst]);
+            if (without is null) break;
 
             found.Add([.. suspects.Select(j => SuspectOf(last.RowOf(measured[j]), solution.Linear.MeasurementTests[suspects[0]]))]);
             aside.Add(worst);

@@ -81,9 +81,11 @@ public sealed class HealthFigures
         int count = 0;
         foreach (Temperature? temperature in reading.MetalTemperatures)
         {
-            if (temperature is not { } known) continue;
-            sum += known.Si();
-            count++;
+            if (temperature is { } known)
+            {
+                sum += known.Si();
+                count++;
+            }
         }
 
         return count > 0 ? sum / count : double.NaN;

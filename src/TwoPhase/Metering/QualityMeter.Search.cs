@@ -24,9 +24,9 @@ public sealed partial class QualityMeter
             return new QualitySolution(Model.QualityFromVolume(state, target * c * c));
         }
 
-        if (Model is WetSteamModel.ExponentModel sloped && TryNewton(sloped, geometry, state, target, out double quality)) return new QualitySolution(quality);
+        if (Model is WetSteamModel.ExponentModel sloped && TryNewton(sloped, geometry, state, target, out double newton)) return new QualitySolution(newton);
         var reduced = new ReducedVolume(this, geometry, state, target);
-        if (Model.Trend != DifferentialTrend.Unknown && TryChords(reduced, out quality)) return new QualitySolution(quality);
+        if (Model.Trend != DifferentialTrend.Unknown && TryChords(reduced, out double chords)) return new QualitySolution(chords);
         double low = Model.LowestQuality, atLow = reduced.Value(low), atDry = reduced.Value(1);
         return Model.Trend == DifferentialTrend.Unknown ? SearchEverywhere(reduced, low, atLow, atDry)
             : atLow >= 0 ? Continued(geometry, state, target, low)

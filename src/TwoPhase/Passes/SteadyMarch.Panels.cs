@@ -98,8 +98,11 @@ internal partial struct SteadyMarch<TFluid>
         for (int j = 1; j <= Panel.Intervals; j++)
         {
             double quality = Nodes[first + j].EquilibriumQuality;
-            double? boundary = reference <= 0 ? (quality > 0 ? 0 : null) : reference >= 1 ? (quality < 1 ? 1 : null) : quality < 0 ? 0 : quality > 1 ? 1 : null;
-            if (boundary is not { } phaseEnd || Math.Abs(quality - phaseEnd) <= BoundaryTolerance) continue;
+
+            // Where a phase ends on the way to this node; the node's own quality if none does.
+            double phaseEnd = reference <= 0 ? Math.Min(quality, 0) : reference >= 1 ? Math.Max(quality, 1) : Math.Min(Math.Max(quality, 0), 1);
+            if (!(Math.Abs(quality - phaseEnd) > BoundaryTolerance)) continue;
+
             double before = Nodes[first + j - 1].EquilibriumQuality - phaseEnd, after = quality - phaseEnd, spacing = attempt.Length / Panel.Intervals;
             double share = before / (before - after);
             if (j > 1) share += share * (1 - share) * (Nodes[first + j - 2].EquilibriumQuality - phaseEnd - (2 * before) + after) / (2 * (after - before));
