@@ -18,8 +18,6 @@ internal readonly struct SurfaceFluid : IPassFluid
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public SaturatedPair Saturated(double pressure) => default(SteamFluid).Saturated(pressure);
 
-    public SaturatedPair SaturatedSlopes(double pressure) => default(SteamFluid).SaturatedSlopes(pressure);
-
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated, double near = 0)
     {

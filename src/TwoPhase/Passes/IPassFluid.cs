@@ -19,9 +19,6 @@ internal interface IPassFluid
     /// <summary>Both phases in equilibrium at a pressure below <see cref="HighestPressure"/>.</summary>
     SaturatedPair Saturated(double pressure);
 
-    /// <summary>How both phases change along the saturation line.</summary>
-    SaturatedPair SaturatedSlopes(double pressure);
-
     /// <summary>The equilibrium state at p and h with its derivatives; T = 0 where the fluid has no such state.</summary>
     /// <param name="pressure">p [Pa].</param>
     /// <param name="enthalpy">h [J/kg].</param>
@@ -48,7 +45,7 @@ internal interface IPassFluid
     double Film(in FlowState flow, FilmModel model, double heatFlux);
 }
 
-/// <summary>Liquid and vapour in equilibrium, or (as <see cref="IPassFluid.SaturatedSlopes"/>) their derivatives by pressure along the line.</summary>
+/// <summary>Liquid and vapour in equilibrium.</summary>
 internal readonly struct SaturatedPair
 {
     /// <summary>p [Pa].</summary>

@@ -36,21 +36,6 @@ internal readonly struct SteamFluid : IPassFluid
         };
     }
 
-    public SaturatedPair SaturatedSlopes(double pressure)
-    {
-        SaturationCore steam = SaturationLine.AtPressure(pressure);
-        double slope = steam.TemperatureByPressure;
-        return new()
-        {
-            Pressure = 1,
-            Temperature = slope,
-            LiquidEnthalpy = steam.Liquid.EnthalpyAlong(slope),
-            VapourEnthalpy = steam.Vapour.EnthalpyAlong(slope),
-            LiquidVolume = steam.Liquid.VolumeAlong(slope),
-            VapourVolume = steam.Vapour.VolumeAlong(slope),
-        };
-    }
-
     public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated, double near = 0)
     {
         if (saturated.Temperature <= Water97.Border13Temperature)

@@ -323,6 +323,39 @@ public class GeneratorReconciliationTests
         Approx.Absolute(Plant.Truth[Instrument.FeedFlowOf(1)], result.Passes[1].FeedFlow!.Value.Value.KilogramsPerSecond, 1e-6);
     }
 
+    [Fact]
+    public void FromReading_EverySignal_IsAnInstrument()
+    {
+        DateTimeOffset noon = new(2031, 5, 14, 12, 0, 0, TimeSpan.Zero);
+        PassReading[] passes = [.. Enumerable.Range(0, 6).Select(i => new PassReading(noon, MassFlow.FromKilogramsPerSecond(4), Pressure.FromKilopascals(40)).WithFeedTemperature(Temperature.FromKelvins(440 + i)))];
+        GeneratorReading reading = new GeneratorReading(noon, passes).WithHeaderPressure(Pressure.FromMegapascals(9.6)).WithFeedTemperature(Temperature.FromKelvins(445))
+            .WithSeparatorFlows(MassFlow.FromKilogramsPerSecond(18), MassFlow.FromKilogramsPerSecond(6));
+        GeneratorUncertainty uncertainty = new(new(Ratio.FromPercent(0.8), Pressure.FromKilopascals(0.25), Pressure.FromKilopascals(20)), Ratio.FromPercent(0.5), Ratio.FromPercent(2), TemperatureDelta.FromKelvins(1));
+        GeneratorMeasurements measured = GeneratorMeasurements.FromReading(Plant.Generator, reading, uncertainty);
+        Assert.Equal((9.6e6, 20e3), measured.Readings[Instrument.HeaderPressure]);
+        Assert.Equal((445.0, 1.0), measured.Readings[Instrument.FeedTemperature]);
+        Assert.Equal((18, 0.36), measured.Readings[Instrument.SeparatorSteam]);
+        Assert.Equal((6, 0.12), measured.Readings[Instrument.SeparatorWater]);
+        Assert.Equal((443.0, 1.0), measured.Readings[Instrument.FeedTemperatureOf(3)]);
+        Assert.Throws<ArgumentException>(() => GeneratorMeasurements.FromReading(Plant.Generator, new GeneratorReading(noon, passes[..5]), uncertainty));
+        Assert.DoesNotContain(Instrument.SeparatorWater, measured.Without(Instrument.SeparatorWater).Instruments);
+    }
+
+    // JCGM 100:2008, 5.2.2: u² of a sum is u1² + u2² + 2 r u1 u2.
+    [Theory]
+    [InlineData(-0.5)]
+    [InlineData(0)]
+    [InlineData(0.9)]
+    public void WithCorrelation_OfSteamAndWater_IsInTheCovariance(double coefficient)
+    {
+        Instrument[] both = [Instrument.SeparatorSteam, Instrument.SeparatorWater];
+        double[,] covariance = Plant.Measure(both).WithCorrelation(both[1], both[0], coefficient).Covariance(both);
+        double steam = Plant.Uncertainty[both[0]], water = Plant.Uncertainty[both[1]];
+        Approx.Relative((steam * steam) + (water * water) + (2 * coefficient * steam * water), covariance[0, 0] + covariance[1, 1] + covariance[0, 1] + covariance[1, 0], 1e-12);
+        Assert.Throws<ArgumentException>(() => Plant.Measure(both).WithCorrelation(both[0], both[0], coefficient));
+        Assert.Throws<ArgumentOutOfRangeException>(() => Plant.Measure(both).WithCorrelation(both[0], both[1], 1.1));
+    }
+
     // One meter, its model as it comes: quality good to some 0.03; with one solids check good to 0.006 to less than 0.007.
     [Fact]
     public void Solve_WithSolids_AnchorsTheQuality()

@@ -58,6 +58,21 @@ public class QualityEstimatorTests
         Assert.True(last.RawMotion < 0.001);
     }
 
+    // At rest what leaves is what is fed, the holdup stands, and the two ends of a disagreement that is none are the estimate itself.
+    [Fact]
+    public void Update_AtRest_HasTheFiguresOfTheSteadyState()
+    {
+        QualityEstimate last = Run(new QualityEstimator(KnownPass, Meter), Quiet).Last();
+        PassProfile rest = SteadyState.Solve(KnownPass, Start);
+        Approx.Relative(Start.RawFeedFlow, last.OutletFlow!.Value.KilogramsPerSecond, 0.01);
+        Approx.Absolute(0, last.HoldupRate!.Value.KilogramsPerSecond, 0.02 * Start.RawFeedFlow);
+        Approx.Relative(TwoPhase.Holdup.WaterHoldup.Of(rest).Total.Kilograms, last.Holdup!.Value.Kilograms, 0.02);
+        Approx.Relative(rest.First(point => point.EquilibriumQuality.DecimalFractions >= 0).Position.Meters, last.BoilingOnset!.Value.Meters, 0.02);
+        Approx.Absolute(0.78, last.QualityIfMeterIsRight!.Value.DecimalFractions, 0.005);
+        Approx.Absolute(0.78, last.QualityIfHeatIsRight!.Value.DecimalFractions, 0.005);
+        Assert.True(last.MotionOfEither!.Value.DecimalFractions >= last.Motion!.Value.DecimalFractions);
+    }
+
     [Fact]
     public void Update_SameReadings_GivesTheSameBits() =>
         Assert.Equal(Run(new QualityEstimator(KnownPass, Meter), Quiet.Take(200)), Run(new QualityEstimator(KnownPass, Meter), Quiet.Take(200)));

@@ -62,6 +62,38 @@ public class PrimaryElementTests
         Approx.Absolute(1 - Math.Pow(0.6, 1.9), ratio, 0.01);   // ISO 5167-2:2003, 5.4, the approximate form
     }
 
+    // Borda and Carnot: a jet of the throat's area that fills the pipe again loses (1 - β²)² of its velocity head, which is (1 - β²)/(1 + β²) of the
+    // differential where C is 1. What C lacks is friction before the throat, which changes nothing, or a jet narrower than the throat: Cβ² in place of β².
+    [Theory]
+    [InlineData(0.4)]
+    [InlineData(0.6)]
+    [InlineData(0.75)]
+    public void PermanentPressureLoss_Nozzles_IsThatOfASuddenEnlargement(double beta)
+    {
+        Length pipe = Length.FromMillimeters(100), throat = beta * pipe;
+        foreach (PrimaryElement nozzle in new PrimaryElement[] { new Isa1932Nozzle(pipe, throat), new LongRadiusNozzle(pipe, throat) })
+        {
+            double loss = nozzle.PermanentPressureLoss(Pressure.FromKilopascals(100), 1e6).Kilopascals / 100, full = beta * beta, narrow = full * nozzle.DischargeCoefficient(1e6);
+            Assert.InRange(loss, (1 - full) / (1 + full), (1 - narrow) / (1 + narrow));
+        }
+    }
+
+    // ISO 5167-3:2003, 5.1.7.2, 5.2.7.2 and 5.3.5.2: per cent of the expansibility.
+    [Fact]
+    public void ExpansibilityUncertainty_Nozzles_IsTheStandards()
+    {
+        Length pipe = Length.FromMillimeters(100), throat = Length.FromMillimeters(60);
+        Pressure pressure = Pressure.FromMegapascals(2), differential = Pressure.FromKilopascals(100);
+        Approx.Relative(2 * 0.05, 100 * ShareOf(new Isa1932Nozzle(pipe, throat)), 1e-12);
+        Approx.Relative(2 * 0.05, 100 * ShareOf(new LongRadiusNozzle(pipe, throat)), 1e-12);
+        Approx.Relative((4 + (100 * Math.Pow(0.6, 8))) * 0.05, 100 * ShareOf(new VenturiNozzle(pipe, throat)), 1e-12);
+        double ShareOf(PrimaryElement element) => element.ExpansibilityUncertainty(pressure, differential, 1.3).DecimalFractions;
+    }
+
+    [Fact]
+    public void VelocityOfApproachFactor_BetaOfSixTenths_IsItsDefinition() =>
+        Approx.Relative(1 / Math.Sqrt(1 - Math.Pow(0.6, 4)), new OrificePlate(Length.FromMillimeters(100), Length.FromMillimeters(60), OrificeTappings.Corner).VelocityOfApproachFactor, 1e-12);
+
     [Fact]
     public void PermanentPressureLoss_WithDiffuser_IsWithinTheStandardsRange()
     {

@@ -64,6 +64,34 @@ public class DriftFluxTests
         Approx.Relative(0.555258 * Math.Sqrt(9.80665 / 9.81), DriftVelocity.Bestion.Of(new TwoPhaseFlow(tube)).MetersPerSecond, 1e-6);
     }
 
+    // Viana et al., J. Fluid Mech. 494, 379 (2003), from all published measurements of long bubbles in standing liquid: U = 0.34 (g D)^(1/2) where neither
+    // viscosity nor surface tension slows them, as air in water in 50 mm; Zuber and Findlay round the same law to 0.35.
+    [Fact]
+    public void Slug_LongBubbleInWater_RisesAsMeasured()
+    {
+        FlowState water = new() { LiquidDensity = 998, VapourDensity = 1.2, Bore = 0.05 };
+        Approx.Relative(0.34 * Math.Sqrt(9.81 * 0.05), DriftVelocity.Slug.Of(new TwoPhaseFlow(water)).MetersPerSecond, 0.03);
+    }
+
+    // Phases of one density have no buoyancy.
+    [Fact]
+    public void Drift_AtTheCriticalPoint_IsNone()
+    {
+        DriftVelocity[] laws = [DriftVelocity.RouhaniAxelsson, DriftVelocity.RouhaniAxelssonVertical, DriftVelocity.Churn, DriftVelocity.Bubbly, DriftVelocity.Slug, DriftVelocity.Dix, DriftVelocity.Bestion];
+        Assert.All(laws, law => Assert.Equal(0, law.Core(AnyFlow.Critical(0.5))));
+    }
+
+    public static TheoryData<VoidFractionModel> Vertical =>
+        [VoidFractionModel.Premoli, VoidFractionModel.RouhaniAxelssonVertical, VoidFractionModel.ZuberFindlay, VoidFractionModel.Dix, VoidFractionModel.Bestion];
+
+    // What their documents say of their range; the limit at 60° is our own reading of "vertical".
+    [Theory, MemberData(nameof(Vertical), DisableDiscoveryEnumeration = true)]
+    public void Check_ModelOfVerticalTubes_IsFlaggedBelowSixtyDegrees(VoidFractionModel model)
+    {
+        bool Flagged(double degrees) => (model.Check(new TwoPhaseFlow(Outlet with { Inclination = degrees * Math.PI / 180 })).Exceeded & ApplicabilityLimits.Inclination) != 0;
+        Assert.Equal([true, true, false, false], new double[] { 0, 59, 61, 90 }.Select(Flagged));
+    }
+
     [Fact]
     public void Laws_AtAFlow_ReadAsQuantities()
     {

@@ -36,6 +36,7 @@ public class PhaseSplitTests
         double density = 1 / ((0.78 / flow.VapourDensity) + (0.22 / flow.LiquidDensity));
         Approx.Relative(density, split.StaticDensity.KilogramsPerCubicMeter, 1e-14);
         Approx.Relative(density, split.MomentumDensity.KilogramsPerCubicMeter, 1e-14);
+        Approx.Relative(density, split.HomogeneousDensity.KilogramsPerCubicMeter, 1e-14);
         Approx.Relative(1000 / density, split.VapourVelocity.MetersPerSecond, 1e-14);
         Approx.Relative(1000 / density, split.LiquidVelocity.MetersPerSecond, 1e-14);
     }

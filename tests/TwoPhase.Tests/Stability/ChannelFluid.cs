@@ -54,8 +54,6 @@ internal readonly struct ChannelFluid : IPassFluid
         };
     }
 
-    public SaturatedPair SaturatedSlopes(double pressure) => Fluid.SaturatedSlopes(pressure);
-
     public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated, double near = 0) => Fluid.At(pressure, enthalpy, saturated, near);
 
     public double Viscosity(double density, double temperature) => 1e-16;

@@ -33,8 +33,6 @@ internal readonly struct ConstantDensityFluid : IPassFluid
         SurfaceTension = Sigma,
     };
 
-    public SaturatedPair SaturatedSlopes(double pressure) => new() { Pressure = 1 };
-
     public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated, double near = 0)
     {
         const double slope = ((1 / VapourDensity) - (1 / LiquidDensity)) / Latent;
