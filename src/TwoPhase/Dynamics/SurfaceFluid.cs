@@ -1,6 +1,7 @@
 using System.Runtime.CompilerServices;
 using TwoPhase.Flow;
 using TwoPhase.HeatTransfer;
+using TwoPhase.Numerics;
 using TwoPhase.Passes;
 using TwoPhase.Steam;
 
@@ -21,15 +22,8 @@ internal readonly struct SurfaceFluid : IPassFluid
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated, double near = 0)
     {
-        if (!_surface.TrySinglePhase(pressure, enthalpy, saturated.LiquidEnthalpy, saturated.VapourEnthalpy, out SurfacePoint point)) return default(SteamFluid).At(pressure, enthalpy, saturated, near);
-        double squared = point.SpecificVolume * point.SpecificVolume;
-        return new()
-        {
-            Temperature = point.Temperature,
-            SpecificVolume = point.SpecificVolume,
-            VolumeByEnthalpy = -squared * point.DensityByEnthalpy,
-            VolumeByPressure = -squared * point.DensityByPressure,
-        };
+        if (!_surface.TrySinglePhase(pressure, enthalpy, saturated.LiquidEnthalpy, saturated.VapourEnthalpy, out Four point)) return default(SteamFluid).At(pressure, enthalpy, saturated, near);
+        return new() { Temperature = point.A, SpecificVolume = point.B, VolumeByEnthalpy = point.C, VolumeByPressure = point.D };
     }
 
     public double Viscosity(double density, double temperature) => default(SteamFluid).Viscosity(density, temperature);

@@ -1,3 +1,4 @@
+using System.Diagnostics;
 using System.Runtime.CompilerServices;
 #if NET
 using System.Runtime.InteropServices;
@@ -27,11 +28,19 @@ internal readonly struct CoefficientBlock
 
     public int Length { get; }
 
-    /// <summary>The number at an index, to read on from.</summary>
+    /// <summary>The number at an index, to read on from; unchecked.</summary>
     public ref double this[int index]
     {
         [MethodImpl(MethodImplOptions.AggressiveInlining)]
-        get => ref _values[_start + index];
+        get
+        {
+            Debug.Assert(index >= 0 && index < Length);
+#if NET
+            return ref Unsafe.Add(ref MemoryMarshal.GetArrayDataReference(_values), _start + index);
+#else
+            return ref _values[index];
+#endif
+        }
     }
 
     public Span<double> Slice(int start, int length) => _values.AsSpan(_start + start, length);

@@ -9,18 +9,26 @@ namespace TwoPhase.Numerics;
 internal sealed class EightCurves(FourCurves first, FourCurves second)
 {
 #if NET
+    private readonly int _first = first.First;
     private readonly CoefficientBlock _coefficients = FourCurves.Interleave(first, second);
 
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public (Four First, Four Second) At(double x)
     {
-        int cell = first.Locate(x, out double s);
+        Vector512<double> both = InRegister(x);
+        return (Unsafe.BitCast<Vector256<double>, Four>(both.GetLower()), Unsafe.BitCast<Vector256<double>, Four>(both.GetUpper()));
+    }
+
+    /// <summary>The eight, left where they were computed.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public Vector512<double> InRegister(double x)
+    {
+        int cell = OctaveGrid.Locate(x, FourCurves.Bits, out double s) - _first;
         ref double c = ref _coefficients[cell * 2 * FourCurves.Stride];
         Vector512<double> one = Vector512.Create(s), two = one * one, four = two * two;
         Vector512<double> low = Vector512.FusedMultiplyAdd(Pair(ref c, 2, one), two, Pair(ref c, 0, one));
         Vector512<double> high = Vector512.FusedMultiplyAdd(Pair(ref c, 6, one), two, Pair(ref c, 4, one));
-        Vector512<double> sum = Vector512.FusedMultiplyAdd(high, four, low);
-        return (Unsafe.BitCast<Vector256<double>, Four>(sum.GetLower()), Unsafe.BitCast<Vector256<double>, Four>(sum.GetUpper()));
+        return Vector512.FusedMultiplyAdd(high, four, low);
     }
 
     [MethodImpl(MethodImplOptions.AggressiveInlining)]

@@ -52,6 +52,22 @@ internal static class Fast
         (int)value;
 #endif
 
+    /// <summary>The nearest whole number to one between −2^30 and 2^30, twice; halves either way. Shorter to wait for than a cast there and back.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static double Round(double value, out int whole)
+    {
+#if NET
+        // Here the last bit counts ones, so the sum rounds.
+        const double large = 3L << 51;
+        double sum = value + large;
+        whole = (int)BitConverter.DoubleToInt64Bits(sum);
+        return sum - large;
+#else
+        whole = (int)Math.Floor(value + 0.5);
+        return whole;
+#endif
+    }
+
     /// <summary>The lesser of two numbers, in one instruction: without what the usual function does for NaN and for zeros of both signs.</summary>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public static double Min(double a, double b) =>

@@ -8,7 +8,7 @@ namespace TwoPhase.Numerics;
 /// <summary>Four smooth functions of one positive variable, as polynomials of the seventh degree on an <see cref="OctaveGrid"/>.</summary>
 internal sealed class FourCurves
 {
-    private const int Bits = 4;
+    public const int Bits = 4;
     private const int Degree = 7;
     public const int Stride = Four.Count * (Degree + 1);
 
@@ -37,9 +37,8 @@ internal sealed class FourCurves
         }
     }
 
-    /// <summary>The cell of a place, and the place in it.</summary>
-    [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    public int Locate(double x, out double place) => OctaveGrid.Locate(x, Bits, out place) - _first;
+    /// <summary>The lowest cell.</summary>
+    public int First => _first;
 
     /// <summary>The coefficients of two over one grid: of each power four and four.</summary>
     public static CoefficientBlock Interleave(FourCurves first, FourCurves second)

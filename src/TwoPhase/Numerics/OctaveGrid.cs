@@ -21,7 +21,7 @@ internal static class OctaveGrid
     {
         long pattern = BitConverter.DoubleToInt64Bits(value);
         long rest = (pattern << bits) & ((1L << MantissaBits) - 1);
-        place = (2 * BitConverter.Int64BitsToDouble(rest | One)) - 3;
+        place = Fast.MultiplyAdd(2, BitConverter.Int64BitsToDouble(rest | One), -3);
         return (int)(pattern >> (MantissaBits - bits));
     }
 

@@ -34,55 +34,57 @@ public readonly partial record struct Saturation
     {
         int count = pressure.Length;
         if (status.Length != count) throw WrongLength(nameof(status), status.Length, count);
-
-        var ts = temperature.IsEmpty ? default : new Sink(temperature.Values, temperature.Unit.ToSi(), count, nameof(temperature));
-        var hl = liquidEnthalpy.IsEmpty ? default : new Sink(liquidEnthalpy.Values, liquidEnthalpy.Unit.ToSi(), count, nameof(liquidEnthalpy));
-        var hg = vapourEnthalpy.IsEmpty ? default : new Sink(vapourEnthalpy.Values, vapourEnthalpy.Unit.ToSi(), count, nameof(vapourEnthalpy));
-        var vl = liquidVolume.IsEmpty ? default : new Sink(liquidVolume.Values, liquidVolume.Unit.ToSi(), count, nameof(liquidVolume));
-        var vg = vapourVolume.IsEmpty ? default : new Sink(vapourVolume.Values, vapourVolume.Unit.ToSi(), count, nameof(vapourVolume));
-        if (count == 0) return;
-
-        LinearMap toPascals = pressure.Unit.ToSi();
-        FillStatus(pressure.Values, toPascals, status);
-        if (ts.IsWanted) FillTemperature(pressure.Values, toPascals, ts);
-        if (hl.IsWanted || hg.IsWanted || vl.IsWanted || vg.IsWanted) FillPhases(pressure.Values, toPascals, hl, hg, vl, vg);
+        Sink ts = temperature.IsEmpty ? default : new(temperature.Values, temperature.Unit.ToSi(), count, nameof(temperature));
+        Sink hl = liquidEnthalpy.IsEmpty ? default : new(liquidEnthalpy.Values, liquidEnthalpy.Unit.ToSi(), count, nameof(liquidEnthalpy));
+        Sink hg = vapourEnthalpy.IsEmpty ? default : new(vapourEnthalpy.Values, vapourEnthalpy.Unit.ToSi(), count, nameof(vapourEnthalpy));
+        Sink vl = liquidVolume.IsEmpty ? default : new(liquidVolume.Values, liquidVolume.Unit.ToSi(), count, nameof(liquidVolume));
+        Sink vg = vapourVolume.IsEmpty ? default : new(vapourVolume.Values, vapourVolume.Unit.ToSi(), count, nameof(vapourVolume));
+        if (count > 0) Fill(pressure.Values, pressure.Unit.ToSi(), ts, hl, hg, vl, vg, status);
     }
 
     [MethodImpl(Fast.Hot)]
-    private static void FillStatus(ReadOnlySpan<double> pressures, LinearMap toPascals, Span<SaturationStatus> status)
+    private static void Fill(ReadOnlySpan<double> pressures, LinearMap toPascals, Sink ts, Sink hl, Sink hg, Sink vl, Sink vg, Span<SaturationStatus> status)
     {
-        for (int i = 0; i < pressures.Length; i++) status[i] = StatusOf(toPascals.Map(pressures[i]));
-    }
-
-    [MethodImpl(Fast.Hot)]
-    private static void FillTemperature(ReadOnlySpan<double> pressures, LinearMap toPascals, Sink temperature)
-    {
-        for (int i = 0; i < pressures.Length; i++) temperature.Put(i, SaturationTable.Temperature(toPascals.Map(pressures[i])));
-    }
-
-    [MethodImpl(Fast.Hot)]
-    private static void FillPhases(ReadOnlySpan<double> pressures, LinearMap toPascals, Sink hl, Sink hg, Sink vl, Sink vg)
-    {
-        for (int i = 0; i < pressures.Length; i++)
+        SaturationCells cells = SaturationCells.Shared;
+        for (int i = 0; i < status.Length; i++)
         {
-            SaturatedPhases phases = SaturationTable.Phases(toPascals.Map(pressures[i]));
-            hl.Put(i, phases.LiquidEnthalpy);
-            hg.Put(i, phases.VapourEnthalpy);
-            vl.Put(i, phases.LiquidVolume);
-            vg.Put(i, phases.VapourVolume);
+            double pressure = toPascals.Map(pressures[i]);
+            if (SaturationTable.Covers(pressure))
+            {
+                ref double cell = ref cells.Locate(pressure, out double place);
+                if (ts.IsWanted) ts.Put(i, SaturationCells.At(ref cell, place, SaturatedProperty.Temperature));
+                if (hl.IsWanted) hl.Put(i, SaturationCells.At(ref cell, place, SaturatedProperty.LiquidEnthalpy));
+                if (hg.IsWanted) hg.Put(i, SaturationCells.At(ref cell, place, SaturatedProperty.VapourEnthalpy));
+                if (vl.IsWanted) vl.Put(i, SaturationCells.At(ref cell, place, SaturatedProperty.LiquidVolume));
+                if (vg.IsWanted) vg.Put(i, SaturationCells.At(ref cell, place, SaturatedProperty.VapourVolume));
+                status[i] = SaturationStatus.Saturated;
+            }
+            else
+            {
+                status[i] = FillOutside(i, pressure, ts, hl, hg, vl, vg);
+            }
         }
     }
 
-    [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    private static SaturationStatus StatusOf(double pressure) =>
-        pressure >= SaturationLine.LowestPressure && pressure <= Water97.CriticalPressure ? SaturationStatus.Saturated
-        : Fast.IsFinite(pressure) ? SaturationStatus.OutOfRange
-        : SaturationStatus.Missing;
+    // Where the table ends the formulation itself answers, and NaN where nothing is saturated.
+    [MethodImpl(MethodImplOptions.NoInlining)]
+    private static SaturationStatus FillOutside(int i, double pressure, Sink ts, Sink hl, Sink hg, Sink vl, Sink vg)
+    {
+        bool isSaturated = SaturationLine.Covers(pressure);
+        SaturationCore core = isSaturated ? SaturationLine.AtPressure(pressure) : default;
+        double orNaN = isSaturated ? 0 : double.NaN;
+        if (ts.IsWanted) ts.Put(i, core.Temperature + orNaN);
+        if (hl.IsWanted) hl.Put(i, core.Liquid.Enthalpy + orNaN);
+        if (hg.IsWanted) hg.Put(i, core.Vapour.Enthalpy + orNaN);
+        if (vl.IsWanted) vl.Put(i, core.Liquid.SpecificVolume + orNaN);
+        if (vg.IsWanted) vg.Put(i, core.Vapour.SpecificVolume + orNaN);
+        return isSaturated ? SaturationStatus.Saturated : Fast.IsFinite(pressure) ? SaturationStatus.OutOfRange : SaturationStatus.Missing;
+    }
 
     private static ArgumentException WrongLength(string parameter, int length, int expected) =>
         new($"The column has {length} places for {expected} pressures.", parameter);
 
-    /// <summary>Where one result goes: nowhere if it is not wanted.</summary>
+    /// <summary>Where one result goes; <c>default</c> where it is not wanted.</summary>
     private readonly ref struct Sink
     {
         private readonly Span<double> _values;
@@ -98,9 +100,6 @@ public readonly partial record struct Saturation
         public bool IsWanted => !_values.IsEmpty;
 
         [MethodImpl(MethodImplOptions.AggressiveInlining)]
-        public void Put(int index, double si)
-        {
-            if (IsWanted) _values[index] = _fromSi.Map(si);
-        }
+        public void Put(int index, double si) => _values[index] = _fromSi.Map(si);
     }
 }

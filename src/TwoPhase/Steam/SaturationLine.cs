@@ -1,10 +1,16 @@
+using System.Runtime.CompilerServices;
+
 namespace TwoPhase.Steam;
 
 /// <summary>Saturated liquid and vapour, from the forward equations: regions 1 and 2 up to 623.15 K, region 3 above.</summary>
 internal static class SaturationLine
 {
-    /// <summary>ps at 273.15 K, where the formulation begins [Pa].</summary>
-    public static readonly double LowestPressure = Region4.Pressure(Water97.LowestTemperature);
+    /// <summary>ps at 273.15 K, where the formulation begins [Pa]; written out, so that loops hold it as a constant from their first call on.</summary>
+    public const double LowestPressure = 611.2126774443453;
+
+    /// <summary>Whether anything is saturated at a pressure; false for NaN.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static bool Covers(double pressure) => pressure >= LowestPressure && pressure <= Water97.CriticalPressure;
 
     /// <summary>ps(T) [Pa].</summary>
     public static double Pressure(double temperature) => Region4.Pressure(temperature);

@@ -18,8 +18,8 @@ internal static class SaturationTable
     /// <summary>Lowest pressure of the table [Pa], 2^16.</summary>
     public const double LowestPressure = 65536;
 
-    /// <summary>Highest pressure of the table [Pa], ps(623.15 K): above it the saturated states are those of region 3.</summary>
-    public static readonly double HighestPressure = Region4.Pressure(Water97.Border13Temperature);
+    /// <summary>Highest pressure of the table [Pa], ps(623.15 K) written out: above it the saturated states are those of region 3.</summary>
+    public const double HighestPressure = 16529164.252604509;
 
     /// <summary>Whether the table holds a pressure; false for NaN.</summary>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
@@ -73,7 +73,7 @@ internal static class SaturationTable
         });
 
     private static Four Exact(double pressure, Func<SaturationCore, Four> group) =>
-        pressure >= SaturationLine.LowestPressure && pressure <= Water97.CriticalPressure ? group(SaturationLine.AtPressure(pressure)) : Four.NaN;
+        SaturationLine.Covers(pressure) ? group(SaturationLine.AtPressure(pressure)) : Four.NaN;
 
     // One class for each group, so that each is built when it is first asked for.
     private static class PhaseCurves

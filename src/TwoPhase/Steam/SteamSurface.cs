@@ -1,4 +1,7 @@
 using System.Runtime.CompilerServices;
+#if NET
+using System.Runtime.Intrinsics;
+#endif
 using TwoPhase.Numerics;
 using TwoPhase.Units;
 using UnitsNet;
@@ -21,8 +24,12 @@ namespace TwoPhase.Steam;
 /// </remarks>
 public sealed class SteamSurface
 {
-    private const int LiquidColumns = 24;
-    private const int VapourColumns = 16;
+    private const int LiquidColumns = 31;
+    private const int WetColumns = 1;
+    private const int VapourColumns = 25;
+
+    // Just short of where a further column would begin.
+    private const double LastOfVapour = VapourColumns - 1e-13;
 
     // Each grid reaches a little into its phase even where the range asked for does not.
     private const double LeastReach = 50e3;
@@ -37,10 +44,9 @@ public sealed class SteamSurface
     private readonly double _liquidFloor;
     private readonly double _vapourCeiling;
 
-    // h′, h″, and over what u is measured: 1/(h′ − floor) and 1/(ceiling − h″).
-    private readonly FourCurves _edges;
-    private readonly FourPatches _liquid;
-    private readonly FourPatches _vapour;
+    // Where liquid, wet steam and vapour begin, the floor, h′ and h″, and how many columns of each a J/kg crosses.
+    private readonly EightCurves _phases;
+    private readonly FourPatches _patches;
 
     /// <summary>A surface over a range of one's own; building it takes some tenths of a second at the most.</summary>
     /// <param name="lowestPressure">Lowest pressure, at least 0.065536 MPa.</param>
@@ -63,10 +69,10 @@ public sealed class SteamSurface
         _liquidFloor = Math.Min(lowestEnthalpy, SaturationTable.Phases(lowestPressure).LiquidEnthalpy - LeastReach);
         _vapourCeiling = Math.Max(highestEnthalpy, HighestVapourEnthalpy + LeastReach);
 
-        _edges = SaturationTable.Curves(s =>
-            new(s.Liquid.Enthalpy, s.Vapour.Enthalpy, 1 / (s.Liquid.Enthalpy - _liquidFloor), 1 / (_vapourCeiling - s.Vapour.Enthalpy)));
-        _liquid = new(lowestPressure, highestPressure, LiquidColumns, (p, u) => SurfaceNodes.Liquid(p, _liquidFloor, u));
-        _vapour = new(lowestPressure, highestPressure, VapourColumns, (p, u) => SurfaceNodes.Vapour(p, _vapourCeiling, u));
+        _phases = new(
+            SaturationTable.Curves(s => new(_liquidFloor, s.Liquid.Enthalpy, s.Vapour.Enthalpy, 0)),
+            SaturationTable.Curves(s => new(LiquidColumns / (s.Liquid.Enthalpy - _liquidFloor), WetColumns / s.LatentHeat, VapourColumns / (_vapourCeiling - s.Vapour.Enthalpy), 0)));
+        _patches = new(lowestPressure, highestPressure, LiquidColumns + WetColumns + VapourColumns, Node);
     }
 
     /// <summary>The shared surface from 0.5 to 16.5 MPa and from 100 to 3600 kJ/kg, built when it is first asked for.</summary>
@@ -85,7 +91,7 @@ public sealed class SteamSurface
     public SpecificEnergy HighestEnthalpy => SpecificEnergy.FromJoulesPerKilogram(_highestEnthalpy);
 
     /// <summary>Bytes that the tables take.</summary>
-    internal long Bytes => _liquid.Bytes + _vapour.Bytes;
+    internal long Bytes => _patches.Bytes;
 
     /// <summary>The state at a pressure and an enthalpy.</summary>
     /// <param name="pressure">p, absolute pressure, inside the range.</param>
@@ -96,37 +102,74 @@ public sealed class SteamSurface
         Require.Within(enthalpy.Si(), _lowestEnthalpy, _highestEnthalpy, "Specific enthalpy h", Scale.KilojoulesPerKilogram, nameof(enthalpy))));
 
     /// <summary>Raw SI for loops; NaN throughout outside the range. Quality is (h − h′)/(h″ − h′), below 0 or above 1 outside wet steam.</summary>
+    [MethodImpl(Fast.Hot | MethodImplOptions.AggressiveInlining)]
     internal SurfacePoint Evaluate(double pressure, double enthalpy)
     {
-        bool inside = pressure >= _lowestPressure && pressure <= _highestPressure && enthalpy >= _lowestEnthalpy && enthalpy <= _highestEnthalpy;
-        if (!inside) return SurfacePoint.NaN;
+        if (!IsInside(pressure, enthalpy)) return SurfacePoint.NaN;
 
-        Four edges = _edges.At(pressure);
-        double liquid = edges.A, vapour = edges.B, quality = (enthalpy - liquid) / (vapour - liquid);
-        if (enthalpy < liquid) return Single(_liquid.At(pressure, (enthalpy - _liquidFloor) * edges.C), pressure, quality);
-        if (enthalpy > vapour) return Single(_vapour.At(pressure, (enthalpy - vapour) * edges.D), pressure, quality);
-
-        SaturatedPhases phases = SaturationTable.Continued(pressure);
-        SaturatedSlopes slopes = SaturationTable.Slopes(pressure);
-        double volume = ((1 - quality) * phases.LiquidVolume) + (quality * phases.VapourVolume), byVolume = -1 / (volume * volume);
-        return new(slopes.Temperature, volume, quality, byVolume * slopes.VolumeByEnthalpy, byVolume * slopes.VolumeByPressure(quality));
+        // Which phase it is makes no branch: over states in no order a processor guesses every second one wrong, which takes as long as all the rest.
+        double across = Across(pressure, enthalpy, out double quality);
+#if NET
+        Vector256<double> values = _patches.InRegister(pressure, across);
+        Vector128<double> slopes = values.GetUpper();
+        return Point(values.ToScalar(), values.GetElement(1), slopes.ToScalar(), slopes.GetElement(1), pressure, quality);
+#else
+        Four values = _patches.At(pressure, across);
+        return Point(values.A, values.B, values.C, values.D, pressure, quality);
+#endif
     }
 
-    /// <summary>As <see cref="Evaluate"/> outside wet steam, for whoever knows h′ and h″ already; the quality is left out. False inside it and outside the range.</summary>
+    /// <summary>T, v, (∂v/∂h)p and (∂v/∂p)h outside wet steam, for whoever knows h′ and h″ already. False inside it and outside the range.</summary>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    internal bool TrySinglePhase(double pressure, double enthalpy, double liquidEnthalpy, double vapourEnthalpy, out SurfacePoint point)
+    internal bool TrySinglePhase(double pressure, double enthalpy, double liquidEnthalpy, double vapourEnthalpy, out Four point)
     {
-        bool liquid = enthalpy <= liquidEnthalpy, inside = pressure >= _lowestPressure && pressure <= _highestPressure && enthalpy >= _lowestEnthalpy && enthalpy <= _highestEnthalpy;
-        point = SurfacePoint.NaN;
-        if (!inside || !(liquid || enthalpy >= vapourEnthalpy)) return false;
-        Four values = liquid
-            ? _liquid.At(pressure, (enthalpy - _liquidFloor) / (liquidEnthalpy - _liquidFloor))
-            : _vapour.At(pressure, (enthalpy - vapourEnthalpy) / (_vapourCeiling - vapourEnthalpy));
-        point = Single(values, pressure, double.NaN);
+        bool liquid = enthalpy <= liquidEnthalpy;
+        point = default;
+        if (!IsInside(pressure, enthalpy) || !(liquid || enthalpy >= vapourEnthalpy)) return false;
+        double across = liquid
+            ? (LiquidColumns * (enthalpy - _liquidFloor) / (liquidEnthalpy - _liquidFloor)) - 0.5
+            : LiquidColumns + WetColumns - 0.5 + (LastOfVapour * (enthalpy - vapourEnthalpy) / (_vapourCeiling - vapourEnthalpy));
+        Four values = At(pressure, across);
+        point = new(values.A, values.B / pressure, values.C, values.D);
         return true;
     }
 
+    // v and ρ = 1/v by one division.
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    private static SurfacePoint Single(Four values, double pressure, double quality) =>
-        new(values.A, values.B / pressure, quality, values.C, values.D);
+    private static SurfacePoint Point(double temperature, double work, double volumeByEnthalpy, double volumeByPressure, double pressure, double quality)
+    {
+        double inverse = 1 / (pressure * work), density = pressure * pressure * inverse, byVolume = -density * density;
+        return new(temperature, work * work * inverse, quality, byVolume * volumeByEnthalpy, byVolume * volumeByPressure);
+    }
+
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    private bool IsInside(double pressure, double enthalpy) =>
+        pressure >= _lowestPressure && pressure <= _highestPressure && enthalpy >= _lowestEnthalpy && enthalpy <= _highestEnthalpy;
+
+    // How many columns lie below h: what it has crossed of liquid, and of wet steam, and of vapour, none less than nothing or more than all.
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    private double Across(double pressure, double enthalpy, out double quality)
+    {
+#if NET
+        Vector512<double> phases = _phases.InRegister(pressure);
+        Vector256<double> crossed = (Vector256.Create(enthalpy) - phases.GetLower()) * phases.GetUpper();
+        quality = crossed.GetElement(1);
+        crossed = Vector256.MinNative(Vector256.MaxNative(crossed, Vector256<double>.Zero), Vector256.Create(LiquidColumns, WetColumns, LastOfVapour, -0.5));
+        return Vector128.Sum(crossed.GetLower() + crossed.GetUpper());
+#else
+        (Four begin, Four columns) = _phases.At(pressure);
+        quality = (enthalpy - begin.B) * columns.B;
+        return -0.5 + Fast.Clamp((enthalpy - begin.A) * columns.A, 0, LiquidColumns) + Fast.Clamp(quality, 0, WetColumns) + Fast.Clamp((enthalpy - begin.C) * columns.C, 0, LastOfVapour);
+#endif
+    }
+
+    [MethodImpl(Fast.Hot)]
+    private Four At(double pressure, double across) => _patches.At(pressure, across);
+
+    private Four Node(double pressure, int column, double u) => column switch
+    {
+        < LiquidColumns => SurfaceNodes.Liquid(pressure, _liquidFloor, (column + u) / LiquidColumns),
+        LiquidColumns => SurfaceNodes.Wet(pressure, u),
+        _ => SurfaceNodes.Vapour(pressure, _vapourCeiling, (column - LiquidColumns - WetColumns + u) / VapourColumns),
+    };
 }

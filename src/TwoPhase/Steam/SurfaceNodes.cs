@@ -4,7 +4,7 @@ using TwoPhase.Steam.Backward;
 
 namespace TwoPhase.Steam;
 
-/// <summary>The formulation's values at the nodes of a surface: T, p v, (∂ρ/∂h)p and (∂ρ/∂p)h of a phase that is known beforehand.</summary>
+/// <summary>The formulation's values at the nodes of a surface: T, p v, (∂v/∂h)p and (∂v/∂p)h of a phase that is known beforehand.</summary>
 internal static class SurfaceNodes
 {
     private const int MaximumSteps = 8;
@@ -25,12 +25,17 @@ internal static class SurfaceNodes
         return Values(Solve(Region2.At, pressure, enthalpy, Backward2.TemperatureFromEnthalpy(pressure, enthalpy)));
     }
 
-    [MethodImpl(Fast.Hot)]
-    private static Four Values(in PhaseCore phase)
+    /// <summary>Wet steam of quality <paramref name="u"/>.</summary>
+    public static Four Wet(double pressure, double u)
     {
-        double densityByVolume = -phase.Density * phase.Density;
-        return new(phase.Temperature, phase.Pressure * phase.SpecificVolume, densityByVolume * phase.VolumeByEnthalpy, densityByVolume * phase.VolumeByPressure);
+        SaturatedPhases phases = SaturationTable.Continued(pressure);
+        SaturatedSlopes slopes = SaturationTable.Slopes(pressure);
+        double volume = ((1 - u) * phases.LiquidVolume) + (u * phases.VapourVolume);
+        return new(slopes.Temperature, pressure * volume, slopes.VolumeByEnthalpy, slopes.VolumeByPressure(u));
     }
+
+    private static Four Values(in PhaseCore phase) =>
+        new(phase.Temperature, phase.Pressure * phase.SpecificVolume, phase.VolumeByEnthalpy, phase.VolumeByPressure);
 
     // Newton from the backward equation, 25 mK away at the most: two or three steps.
     [MethodImpl(Fast.Hot)]

@@ -1,3 +1,4 @@
+using TwoPhase.Numerics;
 using static TwoPhase.Steam.Water97;
 
 namespace TwoPhase.Steam;
@@ -44,9 +45,9 @@ internal static partial class Water
     }
 
     // In region 3 density is a variable of the equation: only T is left to solve for, on p(T), which is all but straight.
-    private static WaterCore Dense(in Branch branch, double pressure, double density)
+    private static PhaseCore OnIsochore(double pressure, double density, double temperature)
     {
-        double temperature = (branch.Cold + branch.Hot) / 2, step = double.PositiveInfinity;
+        double step = double.PositiveInfinity;
         PhaseCore phase = Region3.At(density, temperature);
         for (int i = 0; i < 50 && Math.Abs(step) > 1e-15 * temperature; i++)
         {
@@ -55,9 +56,27 @@ internal static partial class Water
             phase = Region3.At(density, temperature);
         }
 
+        return phase;
+    }
+
+    private static WaterCore Dense(in Branch branch, double pressure, double density)
+    {
+        PhaseCore phase = OnIsochore(pressure, density, (branch.Cold + branch.Hot) / 2);
         const double tolerance = EdgeTolerance * CriticalTemperature;
-        bool isInside = temperature >= branch.SearchFrom(0) - tolerance && temperature <= branch.SearchTo(pressure, 0) + tolerance;
+        bool isInside = phase.Temperature >= branch.SearchFrom(0) - tolerance && phase.Temperature <= branch.SearchTo(pressure, 0) + tolerance;
         return isInside && Math.Abs(phase.Pressure - pressure) <= EdgeTolerance * pressure ? new(3, phase with { Pressure = pressure }) : default;
+    }
+
+    // Beside the critical point a property climbs by kilojoules while T moves by its last digit: there density tells states apart, T does not.
+    private static WaterCore Found(in Branch branch, in PhaseCore phase, Property property, double value)
+    {
+        if (branch.Region != 3 || Math.Abs(value - phase.Value(property)) <= EdgeTolerance * value) return new(branch.Region, phase);
+
+        // Saturated densities are known to round-off only, which is large there.
+        const double slack = 1e-4;
+        double pressure = phase.Pressure, lowest = branch.At(pressure, branch.Hot).Density * (1 - slack), highest = branch.At(pressure, branch.Cold).Density * (1 + slack);
+        RootResult density = BracketedRoot.TryFind(new ByDensity(pressure, property, value), lowest, highest, 0);
+        return density.Converged ? new(3, OnIsochore(pressure, density.X, CriticalTemperature) with { Pressure = pressure }) : default;
     }
 
     // Newton's method in T inside the stretch, halving where a step would leave what is left of it.
@@ -76,7 +95,7 @@ internal static partial class Water
 
             // Once steps no longer shrink they are round-off.
             bool settled = Math.Abs(step) <= EdgeTolerance * temperature && Math.Abs(step) >= previous / 2;
-            if (temperature + step == temperature || settled) return new(branch.Region, phase);
+            if (temperature + step == temperature || settled) return Found(branch, phase, property, value);
             previous = Math.Abs(step);
 
             if (step > 0) low = temperature;
@@ -86,7 +105,7 @@ internal static partial class Water
                 // The phase is known, so at saturation only round-off can be left; the other ends are the formulation's.
                 bool onTheEdge = Math.Abs(step) <= EdgeTolerance * temperature
                     || (branch.IsSaturatedAt(temperature) && Math.Abs(value - phase.Value(property)) <= EdgeTolerance * Math.Abs(value));
-                return onTheEdge ? new(branch.Region, phase) : default;
+                return onTheEdge ? Found(branch, phase, property, value) : default;
             }
 
             double next = temperature + step;
@@ -111,5 +130,11 @@ internal static partial class Water
         }
 
         return high;
+    }
+
+    // What a property is short of a value, along an isobar of region 3.
+    private readonly struct ByDensity(double pressure, Property property, double value) : IScalarFunction
+    {
+        public double Value(double density) => OnIsochore(pressure, density, CriticalTemperature).Value(property) - value;
     }
 }

@@ -1,3 +1,5 @@
+using System.Runtime.CompilerServices;
+
 namespace TwoPhase.Units;
 
 /// <summary>Makes columns of data; the unit type is inferred: <c>Column.Of(samples, PressureUnit.Kilopascal)</c>.</summary>
@@ -7,7 +9,7 @@ public static class Column
     /// <typeparam name="TUnit">A unit enumeration of UnitsNet, such as <c>PressureUnit</c>.</typeparam>
     /// <param name="values">The samples; NaN marks a missing one.</param>
     /// <param name="unit">The unit of every sample.</param>
-    /// <exception cref="ArgumentOutOfRangeException"><paramref name="unit"/> is no member of its enumeration.</exception>
+    /// <exception cref="ArgumentOutOfRangeException"><paramref name="unit"/> is none, the default of its enumeration.</exception>
     public static Column<TUnit> Of<TUnit>(ReadOnlySpan<double> values, TUnit unit)
         where TUnit : struct, Enum => new(values, unit);
 
@@ -15,9 +17,23 @@ public static class Column
     /// <typeparam name="TUnit">A unit enumeration of UnitsNet, such as <c>TemperatureUnit</c>.</typeparam>
     /// <param name="values">Where the results go.</param>
     /// <param name="unit">The unit that they are wanted in.</param>
-    /// <exception cref="ArgumentOutOfRangeException"><paramref name="unit"/> is no member of its enumeration.</exception>
+    /// <exception cref="ArgumentOutOfRangeException"><paramref name="unit"/> is none, the default of its enumeration.</exception>
     public static ResultColumn<TUnit> Into<TUnit>(Span<double> values, TUnit unit)
         where TUnit : struct, Enum => new(values, unit);
+
+    /// <summary>
+    /// The unit, unless it is zero, which none is. Any other number that no unit has is refused by whoever reads the column: to look it up
+    /// among the names, by reflection, costs a fresh process a millisecond for each kind of unit.
+    /// </summary>
+    internal static TUnit Known<TUnit>(TUnit unit)
+        where TUnit : struct, Enum
+    {
+        long number = 0;
+        Unsafe.As<long, TUnit>(ref number) = unit;
+        return number == 0 ? throw NoUnit(typeof(TUnit)) : unit;
+    }
+
+    private static ArgumentOutOfRangeException NoUnit(Type enumeration) => new("unit", $"0 is no member of {enumeration.Name}.");
 }
 
 /// <summary>
@@ -31,19 +47,11 @@ public readonly ref struct Column<TUnit>
     /// <summary>A column over samples that are all in one unit.</summary>
     /// <param name="values">The samples; NaN marks a missing one.</param>
     /// <param name="unit">The unit of every sample.</param>
-    /// <exception cref="ArgumentOutOfRangeException"><paramref name="unit"/> is no member of its enumeration.</exception>
+    /// <exception cref="ArgumentOutOfRangeException"><paramref name="unit"/> is none, the default of its enumeration.</exception>
     public Column(ReadOnlySpan<double> values, TUnit unit)
     {
-#if NET
-        bool known = Enum.IsDefined(unit);
-#else
-        // Enum.IsDefined allocates there; no unit of UnitsNet is numbered zero.
-        bool known = !EqualityComparer<TUnit>.Default.Equals(unit, default);
-#endif
-        if (!known)
-            throw new ArgumentOutOfRangeException(nameof(unit), $"{unit} is no member of {typeof(TUnit).Name}.");
+        Unit = Column.Known(unit);
         Values = values;
-        Unit = unit;
     }
 
     /// <summary>The samples, in <see cref="Unit"/>.</summary>

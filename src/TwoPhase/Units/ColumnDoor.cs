@@ -44,11 +44,11 @@ internal static class ColumnDoor
         LinearMap.Through(SiDoor.Si(0, unit), SiDoor.Si(LinearMap.Far, unit));
 
     public static LinearMap ToSi(this PowerUnit unit) =>
-        LinearMap.Through(new Power(0, unit).Si(), new Power(LinearMap.Far, unit).Si());
+        LinearMap.Through(new Power(0, RareUnit.Known(unit)).Si(), new Power(LinearMap.Far, unit).Si());
 
     public static LinearMap ToSi(this MassUnit unit) =>
-        LinearMap.Through(new Mass(0, unit).Si(), new Mass(LinearMap.Far, unit).Si());
+        LinearMap.Through(new Mass(0, RareUnit.Known(unit)).Si(), new Mass(LinearMap.Far, unit).Si());
 
     public static LinearMap ToSi(this MassConcentrationUnit unit) =>
-        LinearMap.Through(new MassConcentration(0, unit).Si(), new MassConcentration(LinearMap.Far, unit).Si());
+        LinearMap.Through(new MassConcentration(0, RareUnit.Known(unit)).Si(), new MassConcentration(LinearMap.Far, unit).Si());
 }

@@ -8,10 +8,10 @@ public readonly ref struct ResultColumn<TUnit>
     /// <summary>A column to be filled.</summary>
     /// <param name="values">Where the results go.</param>
     /// <param name="unit">The unit that they are wanted in.</param>
-    /// <exception cref="ArgumentOutOfRangeException"><paramref name="unit"/> is no member of its enumeration.</exception>
+    /// <exception cref="ArgumentOutOfRangeException"><paramref name="unit"/> is none, the default of its enumeration.</exception>
     public ResultColumn(Span<double> values, TUnit unit)
     {
-        Unit = new Column<TUnit>(values, unit).Unit;
+        Unit = Column.Known(unit);
         Values = values;
     }
 

@@ -5,7 +5,7 @@ namespace TwoPhase.Units;
 
 /// <summary>
 /// The one way in: a quantity becomes a coherent SI double. Units that plants use are converted with factors of our own,
-/// since reading t/h or psi through UnitsNet allocates; any other unit goes through UnitsNet.
+/// since reading t/h or psi through UnitsNet allocates; any other unit goes through UnitsNet (<see cref="RareUnit"/>).
 /// A number with its unit is for columns.
 /// </summary>
 internal static class SiDoor
@@ -31,7 +31,7 @@ internal static class SiDoor
         PressureUnit.Millibar or PressureUnit.Hectopascal => value * 100,
         PressureUnit.PoundForcePerSquareInch => value * PascalsPerPsi,
         PressureUnit.KilogramForcePerSquareCentimeter => value * (StandardGravity * 1e4),
-        _ => new Pressure(value, unit).As(PressureUnit.Pascal),
+        _ => RareUnit.Si(value, unit),
     };
 
     public static double Si(this Temperature quantity) => Si(quantity.Value, quantity.Unit);
@@ -41,7 +41,7 @@ internal static class SiDoor
         TemperatureUnit.Kelvin => value,
         TemperatureUnit.DegreeCelsius => value + 273.15,
         TemperatureUnit.DegreeFahrenheit => (value + 459.67) / 1.8,
-        _ => new Temperature(value, unit).As(TemperatureUnit.Kelvin),
+        _ => RareUnit.Si(value, unit),
     };
 
     public static double Si(this TemperatureDelta quantity) => quantity.Unit switch
@@ -62,7 +62,7 @@ internal static class SiDoor
         MassFlowUnit.TonnePerDay => value / 86.4,
         MassFlowUnit.PoundPerHour => value * (KilogramsPerPound / 3600),
         MassFlowUnit.PoundPerSecond => value * KilogramsPerPound,
-        _ => new MassFlow(value, unit).As(MassFlowUnit.KilogramPerSecond),
+        _ => RareUnit.Si(value, unit),
     };
 
     public static double Si(this VolumeFlow quantity) => Si(quantity.Value, quantity.Unit);
@@ -72,7 +72,7 @@ internal static class SiDoor
         VolumeFlowUnit.CubicMeterPerSecond => value,
         VolumeFlowUnit.CubicMeterPerHour => value / 3600,
         VolumeFlowUnit.CubicMeterPerDay => value / 86400,
-        _ => new VolumeFlow(value, unit).As(VolumeFlowUnit.CubicMeterPerSecond),
+        _ => RareUnit.Si(value, unit),
     };
 
     public static double Si(this Length quantity) => Si(quantity.Value, quantity.Unit);
@@ -85,7 +85,7 @@ internal static class SiDoor
         LengthUnit.Micrometer => value * 1e-6,
         LengthUnit.Inch => value * MetresPerInch,
         LengthUnit.Foot => value * MetresPerFoot,
-        _ => new Length(value, unit).As(LengthUnit.Meter),
+        _ => RareUnit.Si(value, unit),
     };
 
     public static double Si(this Area quantity) => quantity.Unit switch
@@ -113,7 +113,7 @@ internal static class SiDoor
         SpecificEnergyUnit.KilojoulePerKilogram => value * 1e3,
         SpecificEnergyUnit.MegajoulePerKilogram => value * 1e6,
         SpecificEnergyUnit.BtuPerPound => value * 2326,
-        _ => new SpecificEnergy(value, unit).As(SpecificEnergyUnit.JoulePerKilogram),
+        _ => RareUnit.Si(value, unit),
     };
 
     public static double Si(this EnergyDensity quantity) => quantity.As(EnergyDensityUnit.JoulePerCubicMeter);
@@ -133,7 +133,7 @@ internal static class SiDoor
         DensityUnit.KilogramPerCubicMeter => value,
         DensityUnit.GramPerCubicCentimeter => value * 1e3,
         DensityUnit.PoundPerCubicFoot => value * (KilogramsPerPound / (MetresPerFoot * MetresPerFoot * MetresPerFoot)),
-        _ => new Density(value, unit).As(DensityUnit.KilogramPerCubicMeter),
+        _ => RareUnit.Si(value, unit),
     };
 
     public static double Si(this MassFraction quantity) => Si(quantity.Value, quantity.Unit);
@@ -142,7 +142,7 @@ internal static class SiDoor
     {
         MassFractionUnit.DecimalFraction => value,
         MassFractionUnit.Percent => value / 100,
-        _ => new MassFraction(value, unit).As(MassFractionUnit.DecimalFraction),
+        _ => RareUnit.Si(value, unit),
     };
 
     public static double Si(this Ratio quantity) => Si(quantity.Value, quantity.Unit);
@@ -151,7 +151,7 @@ internal static class SiDoor
     {
         RatioUnit.DecimalFraction => value,
         RatioUnit.Percent => value / 100,
-        _ => new Ratio(value, unit).As(RatioUnit.DecimalFraction),
+        _ => RareUnit.Si(value, unit),
     };
 
     public static double Si(this MassConcentration quantity) => quantity.As(MassConcentrationUnit.KilogramPerCubicMeter);
@@ -181,7 +181,7 @@ internal static class SiDoor
         DurationUnit.Minute => value * 60,
         DurationUnit.Hour => value * 3600,
         DurationUnit.Day => value * 86400,
-        _ => new Duration(value, unit).As(DurationUnit.Second),
+        _ => RareUnit.Si(value, unit),
     };
 
     public static double Si(this Mass quantity) => quantity.Unit switch
@@ -225,6 +225,6 @@ internal static class SiDoor
     public static double Si(double value, SpecificVolumeUnit unit) => unit switch
     {
         SpecificVolumeUnit.CubicMeterPerKilogram => value,
-        _ => new SpecificVolume(value, unit).As(SpecificVolumeUnit.CubicMeterPerKilogram),
+        _ => RareUnit.Si(value, unit),
     };
 }

@@ -77,6 +77,30 @@ public class SaturationColumnsTests
         }
     }
 
+    // What the cells of columns are laid from: ours, so that the formulation is the outside check.
+    [Fact]
+    public void Series_AnyPressureOfTheTable_AgreesWithTheFormulation()
+    {
+        for (int i = 0; i <= 20000; i++)
+        {
+            double p = Math.Min(SaturationTable.LowestPressure * Math.Pow(SaturationTable.HighestPressure / SaturationTable.LowestPressure, i / 20000.0), SaturationTable.HighestPressure);
+            SaturationCore exact = SaturationLine.AtPressure(p);
+            Approx.Relative(exact.Temperature, SaturationSeries.At(SaturatedProperty.Temperature, p), 5e-13);
+            Approx.Relative(exact.Liquid.Enthalpy, SaturationSeries.At(SaturatedProperty.LiquidEnthalpy, p), 5e-13);
+            Approx.Relative(exact.Vapour.Enthalpy, SaturationSeries.At(SaturatedProperty.VapourEnthalpy, p), 5e-13);
+            Approx.Relative(exact.Liquid.SpecificVolume, SaturationSeries.At(SaturatedProperty.LiquidVolume, p), 5e-13);
+            Approx.Relative(exact.Vapour.SpecificVolume, SaturationSeries.At(SaturatedProperty.VapourVolume, p), 5e-13);
+        }
+    }
+
+    [Fact]
+    public void FromPressure_NumberThatNoUnitHas_Throws()
+    {
+        ArgumentOutOfRangeException error = Assert.Throws<ArgumentOutOfRangeException>(() => Saturation.FromPressure(
+            Column.Of([1], (PressureUnit)9999), Column.Into(new double[1], TemperatureUnit.Kelvin), default, default, default, default, new SaturationStatus[1]));
+        Assert.Contains("9999", error.Message, StringComparison.Ordinal);
+    }
+
     [Fact]
     public void FromPressure_ColumnOfAnotherLength_ThrowsNamingIt()
     {

@@ -109,6 +109,14 @@ public class SaturationTableTests
         }
     }
 
+    // Both ends are written out as constants.
+    [Fact]
+    public void Ends_AreThoseOfTheSaturationPressureEquation()
+    {
+        Approx.Relative(SaturationLine.Pressure(623.15), SaturationTable.HighestPressure, 1e-15);
+        Approx.Relative(SaturationLine.Pressure(273.15), SaturationLine.LowestPressure, 1e-15);
+    }
+
     [Fact]
     public void Phases_AllocatesNothing() =>
         Assert.Equal(0, AllocationProbe.Bytes(() => SaturationTable.Phases(7e6)));

@@ -66,10 +66,10 @@ public class SteamSurfaceTests
     [Fact]
     public void Evaluate_OneBitOfPressureFurther_IsContinuous()
     {
-        int first = OctaveGrid.Locate(0.5e6, 3, out _) + 1, last = OctaveGrid.Locate(16.5e6, 3, out _);
+        int first = OctaveGrid.Locate(0.5e6, 4, out _) + 1, last = OctaveGrid.Locate(16.5e6, 4, out _);
         for (int row = first; row <= last; row++)
         {
-            double p = OctaveGrid.Start(row, 3);
+            double p = OctaveGrid.Start(row, 4);
             for (double h = 100e3; h <= 3600e3; h += 12.34e3)
             {
                 SurfacePoint below = Surface.Evaluate(Math.BitDecrement(p), h), at = Surface.Evaluate(p, h);
