@@ -30,10 +30,10 @@ public static class Column
     {
         long number = 0;
         Unsafe.As<long, TUnit>(ref number) = unit;
-        return number == 0 ? throw NoUnit(typeof(TUnit)) : unit;
+        return number == 0 ? throw NoUnit(typeof(TUnit), nameof(unit)) : unit;
     }
 
-    private static ArgumentOutOfRangeException NoUnit(Type enumeration) => new("unit", $"0 is no member of {enumeration.Name}.");
+    private static ArgumentOutOfRangeException NoUnit(Type enumeration, string parameter) => new(parameter, $"0 is no member of {enumeration.Name}.");
 }
 
 /// <summary>
