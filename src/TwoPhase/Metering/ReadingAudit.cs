@@ -107,7 +107,7 @@ public sealed class ReadingAudit
             for (int halvings = 0; limit != 0 && halvings < 6 && double.IsNaN(Excess(entry, limit)); halvings++) limit /= 2;
             if (limit == 0 || !((Excess(entry, limit) - wanted) * -wanted <= 0)) continue;
             var balance = new ExcessBalance(this, entry, wanted);
-            RootResult result = limit > 0 ? BracketedRoot.TryFind(balance, 0, limit, 1e-9 * limit) : BracketedRoot.TryFind(balance, limit, 0, -1e-9 * limit);
+            RootResult result = BracketedRoot.TryFind(balance, Math.Min(limit, 0), Math.Max(limit, 0), 1e-9 * Math.Abs(limit));
             if (result.Converged) return new(entry, result.X, wanted);
         }
 

@@ -147,6 +147,19 @@ public class MeterFitTests
         Assert.True(fit.Warnings.HasFlag(FitWarnings.AtLimit));
     }
 
+    // Chisholm's coefficient with n = 1/2 is that of flow with one velocity.
+    [Fact]
+    public void ChisholmCoefficient_OfOneHalf_IsHomogeneous()
+    {
+        QualityMeter own = new(Venturi, new ExponentModel(0.5)), homogeneous = new(Venturi, WetSteamModel.Homogeneous);
+        foreach (ReferenceReading point in Readings(homogeneous, 0, 4))
+            Approx.Relative(homogeneous.Differential(point.Flow, point.Pressure, point.Quality).Pascals, own.Differential(point.Flow, point.Pressure, point.Quality).Pascals, 1e-12);
+    }
+
+    [Fact]
+    public void Warnings_FourReadings_AreNotFew() =>
+        Assert.False(MeterFit.LumpedConstant(WetSteamModel.Homogeneous, Readings(new QualityMeter(Site, WetSteamModel.Homogeneous), 0.002, 4)).Warnings.HasFlag(FitWarnings.FewReadings));
+
     [Fact]
     public void Fit_BadInput_Throws()
     {

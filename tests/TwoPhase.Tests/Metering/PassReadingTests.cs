@@ -58,4 +58,14 @@ public class PassReadingTests
     [Fact]
     public void ToString_CommaCulture_IsInvariant() =>
         Culture.Run("de-DE", () => Assert.Equal("2031-05-14 12:00:00 +00:00: flow 4.8 kg/s, outlet pressure 9.6 MPa, differential Bad", Good.Without(PassSignal.Differential, SignalStatus.Bad).ToString()));
+
+    [Fact]
+    public void Equals_OtherTimeOrOtherMetal_IsAnotherReading()
+    {
+        Assert.Equal(Good, Good.WithOutletPressure(Good.OutletPressure));
+        PassReading warm = Good.WithMetalTemperatures([Temperature.FromKelvins(600)]), warmer = Good.WithMetalTemperatures([Temperature.FromKelvins(601)]);
+        Assert.NotEqual(warm, warmer);
+        Assert.True(warm == Good.WithMetalTemperatures([Temperature.FromKelvins(600)]));
+        Assert.NotEqual(Good, new PassReading(Good.Time.AddSeconds(1), Good.FeedFlow, Good.Differential).WithOutletPressure(Good.OutletPressure));
+    }
 }

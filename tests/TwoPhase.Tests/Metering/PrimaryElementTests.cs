@@ -90,6 +90,21 @@ public class PrimaryElementTests
         double ShareOf(PrimaryElement element) => element.ExpansibilityUncertainty(pressure, differential, 1.3).DecimalFractions;
     }
 
+    // ISO 5167-2:2003, 5.3.1: 5000 up to β = 0.56 and 16 000 β² beyond for corner and D-D/2 tappings; the greater of 5000 and 170 β² D (mm) for flange tappings.
+    [Theory]
+    [InlineData(OrificeTappings.Corner, 0.4, 5000)]
+    [InlineData(OrificeTappings.DiameterAndHalf, 0.56, 5000)]
+    [InlineData(OrificeTappings.Corner, 0.7, 7840)]
+    [InlineData(OrificeTappings.DiameterAndHalf, 0.6, 5760)]
+    [InlineData(OrificeTappings.Flange, 0.5, 5000)]
+    [InlineData(OrificeTappings.Flange, 0.7, 8330)]
+    public void Check_Orifice_HasTheStandardsLowestReynoldsNumber(OrificeTappings tappings, double beta, double lowest)
+    {
+        var plate = new OrificePlate(Length.FromMillimeters(100), beta * Length.FromMillimeters(100), tappings);
+        Assert.True(plate.Check(lowest * 1.001).IsInside);
+        Assert.Equal(ApplicabilityLimits.Reynolds, plate.Check(lowest * 0.999).Exceeded);
+    }
+
     [Fact]
     public void VelocityOfApproachFactor_BetaOfSixTenths_IsItsDefinition() =>
         Approx.Relative(1 / Math.Sqrt(1 - Math.Pow(0.6, 4)), new OrificePlate(Length.FromMillimeters(100), Length.FromMillimeters(60), OrificeTappings.Corner).VelocityOfApproachFactor, 1e-12);

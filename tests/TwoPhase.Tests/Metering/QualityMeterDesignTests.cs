@@ -54,6 +54,16 @@ public class QualityMeterDesignTests
     }
 
     [Fact]
+    public void Ranges_LowestAboveHighest_AreRefused()
+    {
+        var meter = new QualityMeter(Venturi, WetSteamModel.Homogeneous);
+        Pressure low = Pressure.FromKilopascals(10), high = Pressure.FromKilopascals(60);
+        Assert.True(meter.FlowRange(TenMegapascals, Design, low, high).Lowest < meter.FlowRange(TenMegapascals, Design, low, high).Highest);
+        Assert.Throws<ArgumentOutOfRangeException>(() => meter.FlowRange(TenMegapascals, Design, high, low));
+        Assert.Throws<ArgumentOutOfRangeException>(() => meter.QualityRange(Flow, TenMegapascals, high, low));
+    }
+
+    [Fact]
     public void ThroatFor_WhatNoThroatGives_SaysSo()
     {
         var meter = new QualityMeter(Venturi, WetSteamModel.Homogeneous);

@@ -46,6 +46,11 @@ public class HeatModelTests
         Assert.InRange(misses.Max() - misses.Min(), 0, 0.2);
     }
 
+    // H2S + 3/2 O2 = H2O + SO2, CH4 + 2 O2 = CO2 + 2 H2O; oxygen in the gas is oxygen that the air need not bring.
+    [Fact]
+    public void OxygenNeed_SourGasWithOxygen_IsThatOfTheReactions() => Approx.Relative(
+        (0.3 * 1.5) + (0.6 * 2) - 0.1, new FuelGas(Part(GasComponent.HydrogenSulphide, 0.3), Part(GasComponent.Methane, 0.6), Part(GasComponent.Oxygen, 0.1)).OxygenNeed, 1e-14);
+
     // Kern, Process Heat Transfer (1950), example 19.3: 38 % absorbed with 25 % excess air; with 40 % and half as much fuel again, 31 %.
     [Fact]
     public void Burn_MoreAirAndFuel_SplitsAsInTheExampleOfKern()

@@ -34,8 +34,24 @@ public class HeatProfileTests
         // Trapezia by hand: 0.5 * (1 + 3) / 2 + 0.5 * (3 + 0) / 2 = 1.75.
         Approx.Relative(3 / 1.75, curve.Flux[1], 1e-14);
         Approx.Relative(1 / 1.75, curve.Cumulated(0.5), 1e-14);
+        Approx.Relative(0.25 * (1 + 2) / 2 / 1.75, curve.Cumulated(0.25), 1e-14);
         Approx.Relative(1, curve.Cumulated(1), 1e-14);
         Approx.Relative((1 + (0.25 * (3 + 1.5) / 2)) / 1.75, curve.Cumulated(0.75), 1e-14);
+    }
+
+    // A flux of (1 + 4s)/2 up to the middle and its mirror image: the integral by hand is s/2 + s².
+    [Fact]
+    public void Solve_PeakedFlux_HasTheEnthalpyOfItsIntegral()
+    {
+        Pass pass = new Pass("1", [ExamplePass.Tubes("tubes", 500)]).WithHeat(new(new SectionHeat("tubes", Ratio.FromPercent(100), Point(0, 1), Point(0.5, 3), Point(1, 1))));
+        PassProfile profile = SteadyState.Solve(pass, ExamplePass.Conditions);
+        double feed = profile.Inlet.Enthalpy.JoulesPerKilogram;
+        Assert.True(profile.Count > 40);
+        foreach (ProfilePoint point in profile)
+        {
+            double s = point.Position.Meters / 500, near = Math.Min(s, 1 - s), integral = (near / 2) + (near * near);
+            Approx.Relative(feed + (8.2e6 / 4.8 * (s <= 0.5 ? integral : 1 - integral)), point.Enthalpy.JoulesPerKilogram, 1e-10);
+        }
     }
 
     [Theory]

@@ -66,6 +66,7 @@ public class PassCalibrationTests
         Approx.Relative(8.2e6 / 0.95, (double)fit.HeatAtFullFiring.Watts, 2e-3);
         Approx.Relative(1.37, fit.FrictionFactor!.Value, 0.01);
         Assert.True(fit.FrictionInterval!.Value.Contains(1.37));
+        Assert.InRange(fit.FrictionInterval.Value.High - fit.FrictionInterval.Value.Low, 1e-5, 0.1);
         Approx.Relative(rest.PressureDrop.Total.Pascals, SteadyState.Solve(fit.Pass, conditions).PressureDrop.Total.Pascals, 0.01);
         Assert.Contains("MW at full firing", fit.ToString(), StringComparison.Ordinal);
     }

@@ -1,4 +1,5 @@
 using TwoPhase.Passes;
+using TwoPhase.Steam;
 using UnitsNet;
 
 namespace TwoPhase.Tests.Passes;
@@ -24,6 +25,7 @@ public class PassFigureTests
         PassAudit audit = SteadyState.Solve(ExamplePass.Pass, ExamplePass.Conditions).Audit;
         Approx.Relative(4.8, audit.MassFlow.KilogramsPerSecond, 1e-12);
         Approx.Relative(8.2, (double)audit.Heat.Megawatts, 1e-12);
+        Assert.InRange(SteadyState.Solve(new Pass("two", [ExamplePass.Tubes("tubes", 300).WithParallelTubes(2)]), ExamplePass.Conditions).Audit.MassResidual, 0, 1e-12);
         Approx.Relative((double)audit.EnthalpyOut.Megawatts, (double)(audit.EnthalpyIn.Megawatts + audit.Heat.Megawatts), 1e-9);
     }
 
@@ -35,11 +37,53 @@ public class PassFigureTests
         double flux = 4.8 / (Math.PI / 4 * 0.0779 * 0.0779);
         foreach (ProfilePoint point in profile.Where(point => point.EquilibriumQuality.DecimalFractions is > 0.05 and < 0.95))
         {
-            TwoPhase.Steam.Saturation steam = TwoPhase.Steam.Saturation.FromPressure(point.Pressure);
+            Saturation steam = Saturation.FromPressure(point.Pressure);
             double vapour = point.VoidFraction.DecimalFractions * steam.Vapour.Density.KilogramsPerCubicMeter * point.VapourVelocity!.Value.MetersPerSecond;
             double liquid = (1 - point.VoidFraction.DecimalFractions) * steam.Liquid.Density.KilogramsPerCubicMeter * point.LiquidVelocity!.Value.MetersPerSecond;
             Approx.Relative(flux, vapour + liquid, 1e-6);
             Approx.Relative(point.EquilibriumQuality.DecimalFractions, vapour / flux, 1e-6);
         }
+    }
+
+    // Where the tube widens, the mixture of one velocity gives its momentum back: p + G²v/2 stays.
+    [Fact]
+    public void Solve_WiderLine_KeepsPressureAndVelocityHead()
+    {
+        Pass pass = new("step", [ExamplePass.Tubes("tubes", 500), TubeSection.Crossover("line", Length.FromMillimeters(110), Length.FromMillimeters(125), Length.FromMeters(3))]);
+        PassProfile profile = SteadyState.Solve(pass, ExamplePass.Conditions);
+        ProfilePoint line = profile.First(point => point.Section == "line"), tubes = profile.Last(point => point.Section == "tubes");
+        Saturation steam = Saturation.FromPressure(line.Pressure);
+        double x = line.EquilibriumQuality.DecimalFractions, volume = (x * steam.Vapour.SpecificVolume.CubicMetersPerKilogram) + ((1 - x) * steam.Liquid.SpecificVolume.CubicMetersPerKilogram);
+        double gained = (Square(tubes) - Square(line)) / 2 * volume;
+        Assert.True(gained > 1000);
+        Approx.Relative(gained, line.Pressure.Pascals - tubes.Pressure.Pascals, 1e-6);
+        double Square(ProfilePoint point) => Math.Pow(point.MassFlux.KilogramsPerSecondPerSquareMeter, 2);
+    }
+
+    [Fact]
+    public void Solve_LevelPassWithoutGravity_IsTheSame()
+    {
+        PassProfile all = SteadyState.Solve(ExamplePass.Pass, ExamplePass.Conditions), level = SteadyState.Solve(ExamplePass.Pass, ExamplePass.Conditions, null, SteadyOptions.Default.WithoutGravity());
+        Approx.Relative(all.Inlet.Pressure.Pascals, level.Inlet.Pressure.Pascals, 1e-12);
+    }
+
+    // Bayley and Hammersley (1946): n readings of lag-one correlation r count as n (1 - r)/(1 + r).
+    [Fact]
+    public void Series_OfCorrelatedReadings_CountsFewer()
+    {
+        var normal = new MathNet.Numerics.Distributions.Normal(0, 1, new Random(7));
+        double[] values = new double[4000];
+        for (int i = 1; i < values.Length; i++) values[i] = (0.8 * values[i - 1]) + normal.Sample();
+        Assert.InRange(new Series(values).Effective, 0.85 * 4000 / 9, 1.15 * 4000 / 9);
+    }
+
+    [Fact]
+    public void Parts_WithoutSense_AreRefusedByName()
+    {
+        TubeSection tubes = ExamplePass.Tubes("bank", 100);
+        Assert.Contains("'bank'", Assert.Throws<ArgumentException>(() => new Pass("1", [tubes, tubes])).Message, StringComparison.Ordinal);
+        Assert.Throws<ArgumentException>(() => new SteamGenerator(" ", []));
+        Assert.Contains("Return bends", Assert.Throws<ArgumentOutOfRangeException>(() => tubes.WithReturnBends(-1, Length.FromMeters(0.2), 0.3)).Message, StringComparison.Ordinal);
+        Assert.True(double.IsNaN(default(SteamFluid).LiquidEnthalpy(10e6, 270)) && double.IsNaN(default(SteamFluid).LiquidEnthalpy(10e6, 640)));
     }
 }
