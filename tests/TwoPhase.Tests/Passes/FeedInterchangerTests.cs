@@ -23,6 +23,7 @@ public class FeedInterchangerTests
         Approx.Relative(moved / (4.8 * 0.8), coldOut.Enthalpy.JoulesPerKilogram - coldIn.Enthalpy.JoulesPerKilogram, 1e-9);
         Approx.Relative(moved / 4.8, hotIn.Enthalpy.JoulesPerKilogram - hotOut.Enthalpy.JoulesPerKilogram, 1e-9);
         Approx.Absolute(0, profile.Audit.EnergyResidual, 1e-9);
+        Approx.Absolute(0, profile.Audit.MassResidual, 1e-12);
     }
 
     // The definition of effectiveness: what is moved over what would be, were the cold side heated to where the hot side enters.

@@ -25,7 +25,6 @@ public class PassFigureTests
         PassAudit audit = SteadyState.Solve(ExamplePass.Pass, ExamplePass.Conditions).Audit;
         Approx.Relative(4.8, audit.MassFlow.KilogramsPerSecond, 1e-12);
         Approx.Relative(8.2, (double)audit.Heat.Megawatts, 1e-12);
-        Assert.InRange(SteadyState.Solve(new Pass("two", [ExamplePass.Tubes("tubes", 300).WithParallelTubes(2)]), ExamplePass.Conditions).Audit.MassResidual, 0, 1e-12);
         Approx.Relative((double)audit.EnthalpyOut.Megawatts, (double)(audit.EnthalpyIn.Megawatts + audit.Heat.Megawatts), 1e-9);
     }
 
@@ -81,8 +80,8 @@ public class PassFigureTests
     public void Parts_WithoutSense_AreRefusedByName()
     {
         TubeSection tubes = ExamplePass.Tubes("bank", 100);
-        Assert.Contains("'bank'", Assert.Throws<ArgumentException>(() => new Pass("1", [tubes, tubes])).Message, StringComparison.Ordinal);
-        Assert.Throws<ArgumentException>(() => new SteamGenerator(" ", []));
+        Assert.Contains("two sections", Assert.Throws<ArgumentException>(() => new Pass("1", [tubes, tubes])).Message, StringComparison.Ordinal);
+        Assert.Contains("needs a name", Assert.Throws<ArgumentException>(() => new SteamGenerator(" ", [ExamplePass.Pass])).Message, StringComparison.Ordinal);
         Assert.Contains("Return bends", Assert.Throws<ArgumentOutOfRangeException>(() => tubes.WithReturnBends(-1, Length.FromMeters(0.2), 0.3)).Message, StringComparison.Ordinal);
         Assert.True(double.IsNaN(default(SteamFluid).LiquidEnthalpy(10e6, 270)) && double.IsNaN(default(SteamFluid).LiquidEnthalpy(10e6, 640)));
     }
