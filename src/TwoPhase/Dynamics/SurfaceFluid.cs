@@ -20,6 +20,9 @@ internal readonly struct SurfaceFluid : IPassFluid
     public SaturatedPair Saturated(double pressure) => default(SteamFluid).Saturated(pressure);
 
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public void Saturated(double pressure, out SaturatedPair pair) => default(SteamFluid).Saturated(pressure, out pair);
+
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated, double near = 0)
     {
         if (!_surface.TrySinglePhase(pressure, enthalpy, saturated.LiquidEnthalpy, saturated.VapourEnthalpy, out Four point)) return default(SteamFluid).At(pressure, enthalpy, saturated, near);

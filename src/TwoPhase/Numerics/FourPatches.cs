@@ -57,7 +57,8 @@ internal sealed class FourPatches
     public Four At(double x, double across)
     {
 #if NET
-        return Unsafe.BitCast<Vector256<double>, Four>(InRegister(x, across));
+        Vector256<double> sum = InRegister(x, across);
+        return new(sum[0], sum[1], sum[2], sum[3]);
 #else
         ref double c = ref Locate(x, across, out double r, out double s);
         return new(Sum(ref c, r, s), Sum(ref Unsafe.Add(ref c, 1), r, s), Sum(ref Unsafe.Add(ref c, 2), r, s), Sum(ref Unsafe.Add(ref c, 3), r, s));

@@ -1,5 +1,8 @@
+using System.Runtime.CompilerServices;
 using TwoPhase.Flow;
 using TwoPhase.HeatTransfer;
+using TwoPhase.Numerics;
+using TwoPhase.Steam;
 
 namespace TwoPhase.Passes;
 
@@ -18,6 +21,9 @@ internal interface IPassFluid
 
     /// <summary>Both phases in equilibrium at a pressure below <see cref="HighestPressure"/>.</summary>
     SaturatedPair Saturated(double pressure);
+
+    /// <summary>The same, straight to where it is wanted.</summary>
+    void Saturated(double pressure, out SaturatedPair pair);
 
     /// <summary>The equilibrium state at p and h with its derivatives; T = 0 where the fluid has no such state.</summary>
     /// <param name="pressure">p [Pa].</param>
@@ -46,40 +52,57 @@ internal interface IPassFluid
 }
 
 /// <summary>Liquid and vapour in equilibrium.</summary>
-internal readonly struct SaturatedPair
+internal struct SaturatedPair
 {
+    // In the order in which they are found and side by side as they are.
+    private Eight _values;
+    private double _pressure;
+
+    /// <summary>Both phases from numbers of their own.</summary>
+    /// <param name="pressure">p [Pa].</param>
+    /// <param name="values">v′, v″ [m³/kg], h′, h″ [J/kg], Ts [K], σ [N/m], μ′ and μ″ [Pa·s].</param>
+    public SaturatedPair(double pressure, Eight values) => (_pressure, _values) = (pressure, values);
+
     /// <summary>p [Pa].</summary>
-    public double Pressure { get; init; }
-
-    /// <summary>Ts [K].</summary>
-    public double Temperature { get; init; }
-
-    /// <summary>h′ [J/kg].</summary>
-    public double LiquidEnthalpy { get; init; }
-
-    /// <summary>h″ [J/kg].</summary>
-    public double VapourEnthalpy { get; init; }
+    public readonly double Pressure => _pressure;
 
     /// <summary>v′ [m³/kg].</summary>
-    public double LiquidVolume { get; init; }
+    public readonly double LiquidVolume => _values.A;
 
     /// <summary>v″ [m³/kg].</summary>
-    public double VapourVolume { get; init; }
+    public readonly double VapourVolume => _values.B;
 
-    /// <summary>μ′ [Pa·s].</summary>
-    public double LiquidViscosity { get; init; }
+    /// <summary>h′ [J/kg].</summary>
+    public readonly double LiquidEnthalpy => _values.C;
 
-    /// <summary>μ″ [Pa·s].</summary>
-    public double VapourViscosity { get; init; }
+    /// <summary>h″ [J/kg].</summary>
+    public readonly double VapourEnthalpy => _values.D;
+
+    /// <summary>Ts [K].</summary>
+    public readonly double Temperature => _values.E;
 
     /// <summary>σ [N/m].</summary>
-    public double SurfaceTension { get; init; }
+    public readonly double SurfaceTension => _values.F;
+
+    /// <summary>μ′ [Pa·s].</summary>
+    public readonly double LiquidViscosity => _values.G;
+
+    /// <summary>μ″ [Pa·s].</summary>
+    public readonly double VapourViscosity => _values.H;
 
     /// <summary>h″ − h′ [J/kg].</summary>
-    public double LatentHeat => VapourEnthalpy - LiquidEnthalpy;
+    public readonly double LatentHeat => VapourEnthalpy - LiquidEnthalpy;
 
     /// <summary>xe = (h − h′)/(h″ − h′), any value.</summary>
-    public double Quality(double enthalpy) => (enthalpy - LiquidEnthalpy) / LatentHeat;
+    public readonly double Quality(double enthalpy) => (enthalpy - LiquidEnthalpy) / LatentHeat;
+
+    /// <summary>Water and steam at a pressure.</summary>
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public static void Find(double pressure, out SaturatedPair pair)
+    {
+        SaturationTable.PhasesAndFluid(pressure, out pair._values);
+        pair._pressure = pressure;
+    }
 }
 
 /// <summary>An equilibrium state at p and h.</summary>
@@ -102,4 +125,11 @@ internal readonly struct FluidPoint
 /// <param name="Viscosity">μ [Pa·s].</param>
 /// <param name="Conductivity">k [W/(m·K)].</param>
 /// <param name="HeatCapacity">cp [J/(kg·K)].</param>
-internal readonly record struct PhaseTransport(double Viscosity, double Conductivity, double HeatCapacity);
+internal readonly record struct PhaseTransport(double Viscosity, double Conductivity, double HeatCapacity)
+{
+    /// <summary>On the straight line from one to another.</summary>
+    public static PhaseTransport Between(in PhaseTransport from, in PhaseTransport to, double share) => new(
+        from.Viscosity + (share * (to.Viscosity - from.Viscosity)),
+        from.Conductivity + (share * (to.Conductivity - from.Conductivity)),
+        from.HeatCapacity + (share * (to.HeatCapacity - from.HeatCapacity)));
+}

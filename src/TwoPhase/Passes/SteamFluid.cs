@@ -21,20 +21,12 @@ internal readonly struct SteamFluid : IPassFluid
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
     public SaturatedPair Saturated(double pressure)
     {
-        (SaturatedPhases phases, SaturatedFluid fluid) = SaturationTable.PhasesAndFluid(pressure);
-        return new()
-        {
-            Pressure = pressure,
-            Temperature = fluid.Temperature,
-            LiquidEnthalpy = phases.LiquidEnthalpy,
-            VapourEnthalpy = phases.VapourEnthalpy,
-            LiquidVolume = phases.LiquidVolume,
-            VapourVolume = phases.VapourVolume,
-            LiquidViscosity = fluid.LiquidViscosity,
-            VapourViscosity = fluid.VapourViscosity,
-            SurfaceTension = fluid.SurfaceTension,
-        };
+        Saturated(pressure, out SaturatedPair pair);
+        return pair;
     }
+
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
+    public void Saturated(double pressure, out SaturatedPair pair) => SaturatedPair.Find(pressure, out pair);
 
     public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated, double near = 0)
     {
@@ -109,17 +101,18 @@ internal readonly struct SteamFluid : IPassFluid
     public double Film(in PhaseTransport phase, double massFlux, double bore) =>
         SinglePhaseFilm.GnielinskiCore(new(massFlux, bore, phase.Viscosity, phase.Conductivity, phase.HeatCapacity));
 
-    public double Film(in FlowState flow, FilmModel model, double heatFlux)
+    public double Film(in FlowState flow, FilmModel model, double heatFlux) => model.CoefficientCore(WithHeat(flow), heatFlux);
+
+    /// <summary>A flow with the conductivities and heat capacities of both saturated phases.</summary>
+    public static FlowState WithHeat(in FlowState flow)
     {
         SaturatedHeat heat = SaturationTable.Heat(flow.Pressure);
-        return model.CoefficientCore(
-            flow with
-            {
-                LiquidConductivity = heat.LiquidConductivity,
-                VapourConductivity = heat.VapourConductivity,
-                LiquidHeatCapacity = heat.LiquidHeatCapacity,
-                VapourHeatCapacity = heat.VapourHeatCapacity,
-            },
-            heatFlux);
+        return flow with
+        {
+            LiquidConductivity = heat.LiquidConductivity,
+            VapourConductivity = heat.VapourConductivity,
+            LiquidHeatCapacity = heat.LiquidHeatCapacity,
+            VapourHeatCapacity = heat.VapourHeatCapacity,
+        };
     }
 }

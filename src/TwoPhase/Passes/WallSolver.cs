@@ -1,6 +1,5 @@
 using TwoPhase.Flow;
 using TwoPhase.HeatTransfer;
-using TwoPhase.Steam;
 
 namespace TwoPhase.Passes;
 
@@ -37,18 +36,13 @@ internal static class WallSolver
     public static FlowState Saturated(in PassNode node)
     {
         SaturatedPair pair = Fluid.Saturated(node.Pressure);
-        SaturatedHeat heat = SaturationTable.Heat(node.Pressure);
-        return node.Flow with
+        return SteamFluid.WithHeat(node.Flow with
         {
             LiquidDensity = 1 / pair.LiquidVolume,
             VapourDensity = 1 / pair.VapourVolume,
             LiquidViscosity = pair.LiquidViscosity,
             VapourViscosity = pair.VapourViscosity,
-            LiquidConductivity = heat.LiquidConductivity,
-            VapourConductivity = heat.VapourConductivity,
-            LiquidHeatCapacity = heat.LiquidHeatCapacity,
-            VapourHeatCapacity = heat.VapourHeatCapacity,
-        };
+        });
     }
 
     /// <summary>h [W/(m²·K)] over the difference between wetted surface and flow.</summary>

@@ -35,7 +35,7 @@ public abstract partial class VoidFractionModel
             double vapour = flow.Quality, liquid = (1 - flow.Quality) * (flow.VapourDensity / flow.LiquidDensity);
 
             // Without vapour C0 and Vgj may both be 0 (Dix at the critical point).
-            return vapour > 0 ? vapour / ((distribution.Core(flow) * (vapour + liquid)) + (drift.Core(flow) * flow.VapourDensity / flow.MassFlux)) : 0;
+            return vapour > 0 ? vapour / ((distribution.Core(flow) * (vapour + liquid)) + (drift.Core(flow) * (flow.VapourDensity / flow.MassFlux))) : 0;
         }
 
         // S = [(C0 − 1) jg + C0 jl + Vgj] / jl: the same as from α, but without 1 − α.

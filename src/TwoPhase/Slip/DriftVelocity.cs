@@ -73,7 +73,7 @@ public abstract class DriftVelocity
 
     /// <summary>u = [g σ (ρl − ρg)/ρl²]^(1/4) [m/s], the velocity on which the rise of bubbles in boiling liquids scales.</summary>
     private static double BubbleVelocity(in FlowState flow) =>
-        Fast.Sqrt(Fast.Sqrt(SiDoor.StandardGravity * flow.SurfaceTension * (flow.LiquidDensity - flow.VapourDensity)) / flow.LiquidDensity);
+        Fast.Sqrt(Fast.Sqrt(SiDoor.StandardGravity * flow.SurfaceTension * (flow.LiquidDensity - flow.VapourDensity)) * (1 / flow.LiquidDensity));
 
     private sealed class Formula(string name, Law law) : DriftVelocity
     {

@@ -46,13 +46,12 @@ internal static class SaturationTable
     public static SaturatedFluid Fluid(double pressure) =>
         new(Covers(pressure) ? FluidCurves.Table.At(pressure) : Exact(pressure, FluidCurves.Of));
 
-    /// <summary><see cref="Phases"/> and <see cref="Fluid"/> in one go.</summary>
+    /// <summary>What <see cref="Phases"/> and <see cref="Fluid"/> give, in one go and in their order.</summary>
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    public static (SaturatedPhases Phases, SaturatedFluid Fluid) PhasesAndFluid(double pressure)
+    public static void PhasesAndFluid(double pressure, out Eight values)
     {
-        if (!Covers(pressure)) return (Phases(pressure), Fluid(pressure));
-        (Four phases, Four fluid) = BothCurves.Table.At(pressure);
-        return (new(phases), new(fluid));
+        if (Covers(pressure)) BothCurves.Table.At(pressure, out values);
+        else values = new(Exact(pressure, PhaseCurves.Of), Exact(pressure, FluidCurves.Of));
     }
 
     /// <summary>k′ and k″ [W/(m·K)], cp′ and cp″ [J/(kg·K)].</summary>

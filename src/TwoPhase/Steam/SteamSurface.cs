@@ -157,9 +157,10 @@ public sealed class SteamSurface
         crossed = Vector256.MinNative(Vector256.MaxNative(crossed, Vector256<double>.Zero), Vector256.Create(LiquidColumns, WetColumns, LastOfVapour, -0.5));
         return Vector128.Sum(crossed.GetLower() + crossed.GetUpper());
 #else
-        (Four begin, Four columns) = _phases.At(pressure);
-        quality = (enthalpy - begin.B) * columns.B;
-        return -0.5 + Fast.Clamp((enthalpy - begin.A) * columns.A, 0, LiquidColumns) + Fast.Clamp(quality, 0, WetColumns) + Fast.Clamp((enthalpy - begin.C) * columns.C, 0, LastOfVapour);
+        // Where each begins, then how many columns a joule crosses.
+        _phases.At(pressure, out Eight phases);
+        quality = (enthalpy - phases.B) * phases.F;
+        return -0.5 + Fast.Clamp((enthalpy - phases.A) * phases.E, 0, LiquidColumns) + Fast.Clamp(quality, 0, WetColumns) + Fast.Clamp((enthalpy - phases.C) * phases.G, 0, LastOfVapour);
 #endif
     }
 

@@ -40,19 +40,10 @@ internal readonly struct ChannelFluid : IPassFluid
     public SaturatedPair Saturated(double pressure)
     {
         SaturatedPair pair = Fluid.Saturated(pressure);
-        return new()
-        {
-            Pressure = pair.Pressure,
-            Temperature = pair.Temperature,
-            LiquidEnthalpy = pair.LiquidEnthalpy,
-            VapourEnthalpy = pair.VapourEnthalpy,
-            LiquidVolume = pair.LiquidVolume,
-            VapourVolume = pair.VapourVolume,
-            LiquidViscosity = 1e-16,
-            VapourViscosity = 1e-16,
-            SurfaceTension = pair.SurfaceTension,
-        };
+        return new(pressure, new(pair.LiquidVolume, pair.VapourVolume, pair.LiquidEnthalpy, pair.VapourEnthalpy, pair.Temperature, pair.SurfaceTension, 1e-16, 1e-16));
     }
+
+    public void Saturated(double pressure, out SaturatedPair pair) => pair = Saturated(pressure);
 
     public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated, double near = 0) => Fluid.At(pressure, enthalpy, saturated, near);
 

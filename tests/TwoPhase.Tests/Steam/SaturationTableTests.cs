@@ -1,3 +1,4 @@
+using TwoPhase.Numerics;
 using TwoPhase.Steam;
 
 namespace TwoPhase.Tests.Steam;
@@ -103,9 +104,9 @@ public class SaturationTableTests
     {
         foreach (double pressure in Pressures(500).Concat([5e4, 18e6, 22.1e6]))
         {
-            (SaturatedPhases phases, SaturatedFluid fluid) = SaturationTable.PhasesAndFluid(pressure);
-            Assert.Equal(SaturationTable.Phases(pressure), phases);
-            Assert.Equal(SaturationTable.Fluid(pressure), fluid);
+            SaturationTable.PhasesAndFluid(pressure, out Eight both);
+            Assert.Equal(SaturationTable.Phases(pressure), new(new(both.A, both.B, both.C, both.D)));
+            Assert.Equal(SaturationTable.Fluid(pressure), new(new(both.E, both.F, both.G, both.H)));
         }
     }
 

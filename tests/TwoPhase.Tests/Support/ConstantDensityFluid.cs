@@ -20,18 +20,10 @@ internal readonly struct ConstantDensityFluid : IPassFluid
 
     public double HighestPressure => 22e6;
 
-    public SaturatedPair Saturated(double pressure) => new()
-    {
-        Pressure = pressure,
-        Temperature = Boiling,
-        LiquidEnthalpy = SaturatedEnthalpy,
-        VapourEnthalpy = SaturatedEnthalpy + Latent,
-        LiquidVolume = 1 / LiquidDensity,
-        VapourVolume = 1 / VapourDensity,
-        LiquidViscosity = Mu,
-        VapourViscosity = Mu / 4,
-        SurfaceTension = Sigma,
-    };
+    public SaturatedPair Saturated(double pressure) =>
+        new(pressure, new(1 / LiquidDensity, 1 / VapourDensity, SaturatedEnthalpy, SaturatedEnthalpy + Latent, Boiling, Sigma, Mu, Mu / 4));
+
+    public void Saturated(double pressure, out SaturatedPair pair) => pair = Saturated(pressure);
 
     public FluidPoint At(double pressure, double enthalpy, in SaturatedPair saturated, double near = 0)
     {
