@@ -45,7 +45,7 @@ internal sealed class ShadowPass
     public double Quality { get; private set; }
 
     /// <summary>ṁout [kg/s].</summary>
-    public double OutletFlow => _channel.Outlet.Outflow;
+    public double OutletFlow => _channel.MeteredFlow;
 
     /// <summary>M [kg].</summary>
     public double Holdup => _channel.Mass;
@@ -134,7 +134,7 @@ internal sealed class ShadowPass
     private void Look()
     {
         SaturatedPair steam = _fluid.Saturated(_channel.OutletPressure);
-        double enthalpy = _channel.Outlet.OutEnthalpy;
+        double enthalpy = _channel.MeteredEnthalpy;
         Quality = steam.Quality(enthalpy);
         QualityByHeat = (enthalpy - _channel.FeedEnthalpy) / steam.LatentHeat;
         Differential = _meter.DifferentialOrNaN(OutletFlow, _channel.OutletPressure, Quality);

@@ -35,8 +35,8 @@ internal struct Cell
     /// <summary>Film resistance between metal and water [K/W], 0 where the metal follows the water; and the share of a departure from rest that the metal loses in a step.</summary>
     public double FilmResistance, Decay;
 
-    /// <summary>What the phase that it holds alone, or in part, carries heat with, and the enthalpy at which that was found [J/kg].</summary>
-    public PhaseTransport Phase;
+    /// <summary>What the phase that it holds alone, or in part, carries heat with a little below and a little above its enthalpy, and the lower of both [J/kg].</summary>
+    public PhaseTransport Phase, NextPhase;
 
     public double PhaseEnthalpy;
 
@@ -55,13 +55,19 @@ internal struct Cell
     /// <summary>Mass that it lets go per pressure [kg/Pa], and what comes out of it for each kilogram that comes in.</summary>
     public double Store, Swelling;
 
+    /// <summary>Mass that each joule drives out of it [kg/J], and what its metal lets go per pressure over the share that reaches the water within a step [kg/Pa].</summary>
+    public double Thrust, MetalStore;
+
+    /// <summary>By how much its water warms with pressure where it boils, mean over the cell [K/Pa].</summary>
+    public double WarmsBy;
+
     /// <summary>How its outflow will follow: change [kg/s] at head zero, and less for each pascal of head, both over a common divisor.</summary>
     public double Follow, FollowHead, FollowOver;
 
     /// <summary>Both phases at its pressure.</summary>
     public SaturatedPair Steam;
 
-    /// <summary>One over the mass that it held at the start of the step [1/kg].</summary>
+    /// <summary>One over the mass held [1/kg].</summary>
     public double PerMass;
 
     /// <summary>Specific enthalpy of what it holds, and of what flows, at its middle [J/kg].</summary>
@@ -92,6 +98,9 @@ internal struct Cell
 
     /// <summary>a [m³/kg] and b [m³/J] of V = a M + b H, where no boundary stands; of the water where steam runs into it.</summary>
     public double VolumeByMass, VolumeByEnthalpy;
+
+    /// <summary>Enthalpy that leaves where nothing comes in [J/kg], and by how much less for each kilogram a second that does [J·s/kg²].</summary>
+    public double Still, Lead;
 
     /// <summary>Mass flow over the outlet face [kg/s] and the enthalpy that it carries [J/kg].</summary>
     public double Outflow, OutEnthalpy;

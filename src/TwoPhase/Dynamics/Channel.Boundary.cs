@@ -1,3 +1,4 @@
+using System.Runtime.CompilerServices;
 using TwoPhase.Flow;
 using TwoPhase.Passes;
 
@@ -14,6 +15,7 @@ internal sealed partial class Channel<TFluid>
         return cell.Boundary is Boundary.None or Boundary.Collapse ? wanted : cell.Spread + (Math.Min(1, step * cell.Outflow * cell.PerMass) * (wanted - cell.Spread));
     }
 
+    [MethodImpl(MethodImplOptions.AggressiveInlining)]
     private void FindBoundary(ref Cell cell)
     {
         cell.Boundary = Boundary.None;
@@ -23,11 +25,13 @@ internal sealed partial class Channel<TFluid>
         else if (dew < spread / 2 && dew > -2 * spread) Place(ref cell, Boundary.Dew, new() { Spread = spread, Below = HeldByFlow(cell, Boundary.Dew, spread), Above = 1 }, dew);
     }
 
-    private static void Place(ref Cell cell, Boundary boundary, BentProfile profile, double held)
+    private void Place(ref Cell cell, Boundary boundary, BentProfile profile, double held)
     {
         if (!profile.Holds(held)) return;
         cell.Boundary = boundary;
         cell.Profile = profile;
+        cell.FlowEnthalpy = cell.BoundaryEnthalpy + profile.Flow(held);
+        MeetBoundary(ref cell);
     }
 
     // ∂h held / ∂h flowing beside a boundary: the chord to the middle of the wet part as the last step left it.
@@ -55,8 +59,8 @@ internal sealed partial class Channel<TFluid>
         double heating = (point.Temperature - steam.Temperature) / (sign * single);
         cell.SinglePhaseExpansion = chord ? (point.SpecificVolume - (boils ? steam.LiquidVolume : steam.VapourVolume)) / (sign * single) : point.VolumeByEnthalpy;
         double held = cell.HeldEnthalpy - saturated, over = cell.Profile.Over(held, out _);
-        cell.Temperature = steam.Temperature + (heating * (boils ? held - over : over));
         double quality = steam.Quality(cell.FlowEnthalpy), share = ShareThatBoils(cell);
+        cell.Temperature = steam.Temperature + (heating * (boils ? held - over : over));
         cell.FlowQuality = Math.Min(1, Math.Max(0, quality));
         cell.QualityByVoid = 0;
         cell.WaveFactor = 1 / ((1 - share) + (share * (boils ? cell.Profile.Above : cell.Profile.Below)));

@@ -8,14 +8,15 @@ namespace TwoPhase.Dynamics;
 // it is all but full, then swell at once: the slug would leave in blows, each of which raises the pressure behind it.
 internal sealed partial class Channel<TFluid>
 {
-    private bool FindCollapse(int i)
+    // "Over" says how far what the cell before holds is above saturation.
+    private bool FindCollapse(int i, double over)
     {
         ref Cell cell = ref _cells[i];
         double saturated = cell.Steam.LiquidEnthalpy;
         if (cell.Boundary != Boundary.Collapse)
         {
-            if (i == 0 || cell.HeldEnthalpy >= saturated || OverSaturation(_cells[i - 1]) <= 0 || _cells[i - 1].Boundary == Boundary.Collapse) return false;
-            (cell.MixtureMass, cell.Behind) = (0, saturated + OverSaturation(_cells[i - 1]));
+            if (_cells[i - 1].Boundary == Boundary.Collapse) return false;
+            (cell.MixtureMass, cell.Behind) = (0, saturated + over);
         }
 
         double water = cell.Mass - cell.MixtureMass;

@@ -12,41 +12,37 @@ internal sealed partial class Channel<TFluid>
 
     private void Decompose(double step)
     {
-        double perStep = 1 / step;
-        for (int i = 0; i < _cells.Length; i++)
+        double over = 0;
+        Span<Cell> cells = _cells;
+        for (int i = 0; i < cells.Length; i++)
         {
-            ref Cell cell = ref _cells[i];
+            ref Cell cell = ref cells[i];
             cell.Spread = SpreadOf(cell, step);
-            if (!FindCollapse(i)) Decompose(ref cell);
-            Warm(ref cell, perStep);
+            bool mayCollapse = cell.Boundary == Boundary.Collapse || (over > 0 && cell.HeldEnthalpy < cell.Steam.LiquidEnthalpy);
+            if (!mayCollapse || !FindCollapse(i, over)) FindBoundary(ref cell);
+            over = OverSaturation(cell);
+        }
+
+        DecomposeAlike();
+    }
+
+    // The cells in which no boundary stands, by themselves: surface and slip model are long chains, and only cells that follow closely are worked on together.
+    [MethodImpl(MethodImplOptions.NoInlining)]
+    private void DecomposeAlike()
+    {
+        foreach (ref Cell cell in _cells.AsSpan())
+        {
+            if (cell.Boundary != Boundary.None) continue;
+            if (cell.HeldEnthalpy > cell.Steam.LiquidEnthalpy && cell.HeldEnthalpy < cell.Steam.VapourEnthalpy) Part(ref cell);
+            else BeSinglePhase(ref cell);
         }
     }
 
     [MethodImpl(MethodImplOptions.AggressiveInlining)]
-    private void Decompose(ref Cell cell)
-    {
-        FindBoundary(ref cell);
-        if (cell.Boundary != Boundary.None)
-        {
-            double saturated = cell.BoundaryEnthalpy;
-            cell.FlowEnthalpy = saturated + cell.Profile.Flow(cell.HeldEnthalpy - saturated);
-            MeetBoundary(ref cell);
-        }
-        else if (cell.HeldEnthalpy > cell.Steam.LiquidEnthalpy && cell.HeldEnthalpy < cell.Steam.VapourEnthalpy)
-        {
-            cell.Temperature = cell.Steam.Temperature;
-            Part(ref cell);
-        }
-        else
-        {
-            cell.FlowEnthalpy = cell.HeldEnthalpy;
-            BeSinglePhase(ref cell);
-        }
-    }
-
     private void BeSinglePhase(ref Cell cell)
     {
         FluidPoint point = _fluid.At(cell.Steam.Pressure, cell.HeldEnthalpy, cell.Steam);
+        cell.FlowEnthalpy = cell.HeldEnthalpy;
         cell.Temperature = point.Temperature;
         (cell.VolumeByMass, cell.VolumeByEnthalpy) = (point.SpecificVolume - (point.VolumeByEnthalpy * cell.HeldEnthalpy), point.VolumeByEnthalpy);
         cell.FlowQuality = cell.HeldEnthalpy <= cell.Steam.LiquidEnthalpy ? 0 : 1;
@@ -58,13 +54,12 @@ internal sealed partial class Channel<TFluid>
     private FlowState FlowOf(in Cell cell, double quality)
     {
         ref readonly Duct duct = ref _ducts[cell.Duct];
-        double perVolumes = 1 / (cell.Steam.LiquidVolume * cell.Steam.VapourVolume);
         return new()
         {
             Pressure = cell.Steam.Pressure,
             SaturationTemperature = cell.Steam.Temperature,
-            LiquidDensity = cell.Steam.VapourVolume * perVolumes,
-            VapourDensity = cell.Steam.LiquidVolume * perVolumes,
+            LiquidDensity = 1 / cell.Steam.LiquidVolume,
+            VapourDensity = 1 / cell.Steam.VapourVolume,
             LiquidViscosity = cell.Steam.LiquidViscosity,
             VapourViscosity = cell.Steam.VapourViscosity,
             LatentHeat = cell.Steam.LatentHeat,

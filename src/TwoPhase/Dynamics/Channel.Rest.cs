@@ -49,7 +49,9 @@ internal sealed partial class Channel<TFluid>
 
         CourantRate = rate;
         _beyond = face;
-        (Time, _feedFlow, _heat, Stagnant) = (0, feedFlow, Heat, -1);
+        (Time, _feedFlow, _heat, _lastHeat, _lastStep, Stagnant) = (0, feedFlow, Heat, Heat, 0, -1);
+        (_outletRate, _lastJump) = (0, -TimesFiner);
+        (MeteredFlow, MeteredEnthalpy) = (feedFlow, _cells[MeteredCell].OutEnthalpy);
         OpenBooks();
         return settled;
     }
@@ -87,6 +89,7 @@ internal sealed partial class Channel<TFluid>
         }
 
         cell.Mass = cell.Volume / VolumeOf(cell);
+        cell.PerMass = 1 / cell.Mass;
         cell.Energy = (cell.Mass * cell.HeldEnthalpy) - (pressure * cell.Volume);
     }
 }

@@ -24,23 +24,31 @@ internal sealed partial class Channel<TFluid>
         double sum = (steam.LiquidVolume * latent) + (above * excess), perBoth = 1 / (sum * latent), perSum = perBoth * latent, alpha = above * steam.VapourVolume * perSum;
         bool known = cell.QualityByVoid > 0;
         double x = known ? Inside(cell.FlowQuality, cell.FlowQuality + ((alpha - cell.VoidFraction) * cell.QualityByVoid)) : above / latent;
-        for (int i = 0; i < GreatestTries; i++)
-        {
-            FlowState flow = FlowOf(cell, x);
-            double found = _models.Slip.VoidFractionCore(flow), rarer = Fast.Min(x, 1 - x);
-            bool keep = known && i == 0 && Math.Abs(x - cell.SlopeQuality) < Kept * rarer;
-            if (!keep) (cell.QualityByVoid, cell.SlopeQuality) = (QualityByVoidAt(flow, x, found), x);
-            double next = Inside(x, x + ((alpha - found) * cell.QualityByVoid)), change = Math.Abs(next - x);
-            x = next;
-            if (change < (keep ? SmallChange * rarer : 1e-9)) break;
-        }
-
+        double found = _models.Slip.VoidFractionCore(FlowOf(cell, x)), rarer = Fast.Min(x, 1 - x), next = x + ((alpha - found) * cell.QualityByVoid);
+        bool near = known && Math.Abs(x - cell.SlopeQuality) < Kept * rarer && Math.Abs(next - x) < SmallChange * rarer;
+        x = near ? next : Search(ref cell, alpha, x);
+        cell.Temperature = steam.Temperature;
         cell.FlowQuality = x;
         cell.VoidFraction = alpha;
         cell.FlowEnthalpy = steam.LiquidEnthalpy + (x * latent);
         cell.WaveFactor = WaveFactorOf(steam, latent * perSum, cell.QualityByVoid);
         cell.VolumeByEnthalpy = excess * sum * perBoth;
         cell.VolumeByMass = steam.LiquidVolume - (cell.VolumeByEnthalpy * steam.LiquidEnthalpy);
+    }
+
+    private double Search(ref Cell cell, double alpha, double x)
+    {
+        for (int i = 0; i < GreatestTries; i++)
+        {
+            FlowState flow = FlowOf(cell, x);
+            double found = _models.Slip.VoidFractionCore(flow);
+            (cell.QualityByVoid, cell.SlopeQuality) = (QualityByVoidAt(flow, x, found), x);
+            double next = Inside(x, x + ((alpha - found) * cell.QualityByVoid)), change = Math.Abs(next - x);
+            x = next;
+            if (change < 1e-9) break;
+        }
+
+        return x;
     }
 
     // Half way to the end that a step would overshoot.

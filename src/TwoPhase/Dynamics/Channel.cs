@@ -28,6 +28,7 @@ internal sealed partial class Channel<TFluid>
         _ducts = ducts;
         _models = models;
         _cells = Mesh.Cut(ducts, cells);
+        MeteredCell = _cells.Length - 1;
     }
 
     /// <summary>The cells from inlet to outlet.</summary>
@@ -61,6 +62,7 @@ internal sealed partial class Channel<TFluid>
         ForeseeFlow(step, feedFlow, (endPressure - EndPressure) / step);
         MovePressure(step, endPressure);
         Decompose(step);
+        WarmMetal(step);
         March(step, feedFlow);
         (_lastFeed, EndPressure) = (feedFlow, endPressure);
     }

@@ -58,10 +58,11 @@ public sealed class LinearResponse
     /// <summary>Gain, function and its error, invariant culture.</summary>
     public override string ToString() => string.Format(
         CultureInfo.InvariantCulture,
-        "{0} by {1}: {2:G4} per {3}, {4}, fit within {5:P1}",
+        "{0} by {1}: {2:G4}{3} per {4}, {5}, fit within {6:P1}",
         Output,
         Input,
         Gain,
+        Output switch { LinearOutput.Holdup => " kg", LinearOutput.OutletFlow => " kg/s", _ => "" },
         Input == LinearInput.FeedTemperature ? "K" : "%",
         Fit,
         FitError);

@@ -73,12 +73,9 @@ public sealed partial class PassSimulator
     // Flow, enthalpy and pressure where the meter stands: at the end of the outlet line, or of the last tube.
     private (double Flow, double Enthalpy, double Pressure) AtMeter()
     {
-        bool atTubeEnd = Pass.OutletLine is { IsMeterAtTubeEnd: true };
-        ReadOnlySpan<Cell> cells = _channel.Cells;
-        int i = cells.Length - 1;
-        while (atTubeEnd && cells[i].Duct == Pass.Sections.Count) i--;
-        double head = atTubeEnd ? cells[i].Head - cells[i].HalfLoss : 0;
-        return (cells[i].Outflow, cells[i].OutEnthalpy, _channel.EndPressure + head);
+        ref readonly Cell cell = ref _channel.Cells[_channel.MeteredCell];
+        double head = Pass.OutletLine is { IsMeterAtTubeEnd: true } ? cell.Head - cell.HalfLoss : 0;
+        return (_channel.MeteredFlow, _channel.MeteredEnthalpy, _channel.EndPressure + head);
     }
 
     private double HottestMetal()

@@ -39,6 +39,7 @@ public sealed partial class PassSimulator
         if (pass.Interchanger is not null) throw new ArgumentException($"Pass '{pass.Name}' has a feed interchanger, which the simulator does not model.", nameof(pass));
         Check(initial, nameof(initial));
         _channel = new(_fluid, pass.Ducts, Options.Models, Options.Cells) { MetalStores = Options.MetalStoresHeat, HeadLag = Options.RawPressureLag, HeatLags = Options.HeatLags, HasNonReturnValve = pass.OutletLine is { HasNonReturnValve: true } };
+        while (pass.OutletLine is { IsMeterAtTubeEnd: true } && _channel.Cells[_channel.MeteredCell].Duct == pass.Sections.Count) _channel.MeteredCell--;
         _meter = new(Options.Meter ?? pass.Meter, Options.Lags);
         Conditions = initial;
         Rest(initial);
@@ -142,5 +143,6 @@ public sealed partial class PassSimulator
         End = lost ? SimulationEnd.OutsideFormulation : SimulationEnd.FlowStagnated;
         string what = lost ? "the water left the range of the steam formulation" : "the flow stagnated or reversed";
         EndReason = FormattableString.Invariant($"In section '{Pass.Ducts[cell.Duct].Name}' {cell.Start:F0} m from the inlet {what}, within {_channel.Time - _time:G3} s after {_time:G6} s.");
+        if (!lost) EndReason += " The model follows no flow backwards, and leaves out the inertia that may carry it past such a moment: a real pass may go on, and how is not known. More cells show whether the end hangs on the grid.";
     }
 }

@@ -23,6 +23,9 @@ internal sealed class TwoPathFit
         _step = step;
         double end = (step.Values.Length - 1) * step.Sampling;
         _times = Generate.LinearSpaced(Samples, 0, end);
+
+        // What jumps has no dead time: only the sample right behind the step tells.
+        _times[1] = step.Sampling;
         _values = Array.ConvertAll(_times, time => step.Values[(int)Math.Round(time / step.Sampling)]);
         for (int i = 0; i < Samples; i++) _times[i] = Math.Round(_times[i] / step.Sampling) * step.Sampling;
         _scale = end;

@@ -1,5 +1,7 @@
 using TwoPhase.Dynamics;
+using TwoPhase.Numerics;
 using TwoPhase.Passes;
+using TwoPhase.Steam;
 using TwoPhase.Tests.Support;
 using UnitsNet;
 using static TwoPhase.Tests.Dynamics.Simulations;
@@ -65,6 +67,32 @@ public class CollapseTests
         Assert.True(simulator.Now.TrueQuality.DecimalFractions < -0.2);
         PassConditions conditions = simulator.Conditions;
         Assert.Equal(0, AllocationProbe.Bytes(() => simulator.Advance(conditions, Seconds(1))));
+    }
+
+    // A run that is taken up again goes on as if nothing had been, while steam runs into cold water and while a fire that has gone out lets cold water in.
+    [Theory]
+    [InlineData(true), InlineData(false)]
+    public void Load_InTheMidstOfALargeMove_GoesOnToTheBit(bool lightOff)
+    {
+        const double pressure = 2e6, flow = 4.8, hot = 850e3, cold = 90e3;
+        Channel<SurfaceFluid> Make() => new(new(SteamSurface.Default), MeteredPass.Ducts, PassModels.Default, 40);
+        Channel<SurfaceFluid> first = Make(), second = Make();
+        (first.FeedEnthalpy, first.Heat) = lightOff ? (cold, 0) : (hot, 8e6);
+        Assert.True(first.Rest(flow, pressure));
+        (first.FeedEnthalpy, first.Heat) = lightOff ? (hot, 4e6) : (cold, 0);
+        for (int t = 0; lightOff ? first.Cells.ToArray().All(cell => cell.Boundary != Boundary.Collapse) : t < 60; t++) Assert.True(first.Advance(1, flow, pressure) && t < 1000);
+
+        var saved = new StateWriter();
+        first.Save(saved);
+        second.Load(new(saved.ToArray()));
+        for (int t = 0; t < 30; t++)
+        {
+            Assert.True(first.Advance(1, flow, pressure));
+            Assert.True(second.Advance(1, flow, pressure));
+            Assert.Equal(first.MeteredFlow, second.MeteredFlow);
+            Assert.Equal(first.Cells.ToArray().Select(cell => cell.Energy), second.Cells.ToArray().Select(cell => cell.Energy));
+            Assert.Equal(first.Cells.ToArray().Select(cell => cell.Wall), second.Cells.ToArray().Select(cell => cell.Wall));
+        }
     }
 
     private static LightOff ColdPass()

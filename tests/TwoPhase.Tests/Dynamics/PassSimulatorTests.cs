@@ -2,6 +2,7 @@ using TwoPhase.Dynamics;
 using TwoPhase.Holdup;
 using TwoPhase.Passes;
 using TwoPhase.Slip;
+using TwoPhase.Steam;
 using TwoPhase.Tests.Passes;
 using TwoPhase.Tests.Support;
 using UnitsNet;
@@ -48,12 +49,82 @@ public class PassSimulatorTests
     [Fact]
     public void Run_HeaderPressureDown_FluxThatRisesToTheOnset_PushesOutWhatAnotherModelDoes()
     {
-        PassConditions start = SteadyState.FindHeat(FittedPass, Start, MassFraction.FromPercent(78)).Conditions;
-        TransientFigures figures = Run(new OperatingSchedule(start).RampOutletPressure(Seconds(10), Seconds(60), start.OutletPressure - Pressure.FromMegapascals(0.3)), 1000, pass: FittedPass).Figures(MassFraction.FromPercent(1));
+        TransientFigures figures = HeaderDown(FittedPass).History.Figures(MassFraction.FromPercent(1));
         Assert.InRange(figures.PeakError!.Value.DecimalFractions, 0.05, 0.08);
         Assert.InRange(figures.WaterPushedOut.Kilograms, 9, 13);
         Approx.Absolute(0.78, figures.TrueQuality.Lowest.DecimalFractions, 0.0105);
         Approx.Absolute(0.78, figures.TrueQuality.Highest.DecimalFractions, 0.010);
+    }
+
+    // How far the true quality dips, by hand and from the steady solver alone. What leaves the pass for good, 12 kg with the fitted flux and 15 kg with the
+    // even one, leaves with the enthalpy of the outlet, 29.7 and 36.0 MJ. Water and steam hold 21.0 and 24.7 MJ less at the lower pressure, the metal, which
+    // follows saturation, 4.7 MJ less: 4.0 and 6.5 MJ are wanting, and come out of the quality of what flows meanwhile: from the start of the ramp until
+    // what boiled at its end is out. Rising and falling evenly the dip is twice its mean, 0.010 and 0.015.
+    [Theory]
+    [InlineData(true, 0.010), InlineData(false, 0.015)]
+    public void Run_HeaderPressureDown_QualityDipsByWhatTheStoresLack(bool fitted, double byHand)
+    {
+        (PassHistory history, PassProfile before, PassProfile after) = HeaderDown(fitted ? FittedPass : MeteredPass);
+        (double mass, double energy) = Less(before, after);
+        double outlet = before.Outlet.Enthalpy.JoulesPerKilogram, wanting = (mass * outlet) - energy, lacked = 0;
+        for (int t = 1; t < history.Count; t++) lacked += (Lacking(history[t - 1]) + Lacking(history[t])) / 2;
+        Approx.Relative(wanting, lacked, 0.04, "energy that the outflow lacks, but for what the films change of the metal's");
+
+        double seconds = 60 + (WaterHoldup.Of(before).DownstreamOfOnset.Kilograms / before.Conditions.FeedFlow.KilogramsPerSecond);
+        double latent = Saturation.FromPressure(before.Conditions.OutletPressure).LatentHeat.JoulesPerKilogram, flow = before.Conditions.FeedFlow.KilogramsPerSecond + (mass / seconds);
+        double dip = 2 * wanting / (seconds * flow * latent);
+        Approx.Absolute(byHand, dip, 0.0005, "by hand");
+        Assert.InRange((0.78 - history.Min(row => row.TrueQuality.DecimalFractions)) / dip, 1, 1.2);
+
+        // Against what the feed brings then: its temperature is kept, and its enthalpy falls a little with the pressure.
+        double Lacking(PassInstant row)
+        {
+            Saturation steam = Saturation.FromPressure(row.OutletPressure);
+            double enthalpy = steam.Liquid.SpecificEnthalpy.JoulesPerKilogram + (row.TrueQuality.DecimalFractions * steam.LatentHeat.JoulesPerKilogram);
+            double feed = before.Inlet.Enthalpy.JoulesPerKilogram - SteamState.FromPressureTemperature(row.InletPressure, before.Conditions.FeedTemperature!.Value).SpecificEnthalpy.JoulesPerKilogram;
+            return (row.OutletFlow.KilogramsPerSecond * (outlet - enthalpy)) - (row.FeedFlow.KilogramsPerSecond * feed);
+        }
+    }
+
+    private static (PassHistory History, PassProfile Before, PassProfile After) HeaderDown(Pass pass)
+    {
+        PassConditions start = SteadyState.FindHeat(pass, Start, MassFraction.FromPercent(78)).Conditions;
+        Pressure to = start.OutletPressure - Pressure.FromMegapascals(0.3);
+        return (Run(new OperatingSchedule(start).RampOutletPressure(Seconds(10), Seconds(60), to), 1000, pass: pass), SteadyState.Solve(pass, start), SteadyState.Solve(pass, start.WithOutletPressure(to)));
+    }
+
+    // By how much less the pass holds: mass [kg], and internal energy of water, steam and metal [J].
+    private static (double Mass, double Energy) Less(PassProfile before, PassProfile after)
+    {
+        (double massBefore, double energyBefore) = Store(before);
+        (double massAfter, double energyAfter) = Store(after);
+        return (massBefore - massAfter, energyBefore - energyAfter);
+    }
+
+    private static (double Mass, double Energy) Store(PassProfile profile)
+    {
+        // Steel of 88.9 by 77.9 mm: 7850 kg/m³ and 0.56 kJ/(kg·K) at 300 °C, from memory; its film keeps its temperature over that of the water.
+        double metal = Math.PI / 4 * ((0.0889 * 0.0889) - (0.0779 * 0.0779)) * 7850 * 560, mass = 0, energy = 0;
+        for (int i = 1; i < profile.Count; i++)
+        {
+            (double density, double content) = Held(profile[i]);
+            (double densityBefore, double contentBefore) = Held(profile[i - 1]);
+            double volume = (profile[i].WaterVolume - profile[i - 1].WaterVolume).CubicMeters, length = (profile[i].Position - profile[i - 1].Position).Meters;
+            mass += volume * (density + densityBefore) / 2;
+            energy += (volume * (content + contentBefore) / 2) + (metal * length * (profile[i].Temperature.Kelvins + profile[i - 1].Temperature.Kelvins) / 2);
+        }
+
+        return (mass, energy);
+
+        // ρ u = Σ αρh − p.
+        static (double Density, double Content) Held(ProfilePoint point)
+        {
+            Saturation steam = Saturation.FromPressure(point.Pressure);
+            bool wet = point.EquilibriumQuality.DecimalFractions > 0;
+            double alpha = wet ? point.VoidFraction.DecimalFractions : 0;
+            double liquid = (1 - alpha) * (wet ? steam.Liquid.Density : point.Density).KilogramsPerCubicMeter, vapour = alpha * steam.Vapour.Density.KilogramsPerCubicMeter;
+            return (liquid + vapour, (liquid * (wet ? steam.Liquid.SpecificEnthalpy : point.Enthalpy).JoulesPerKilogram) + (vapour * steam.Vapour.SpecificEnthalpy.JoulesPerKilogram) - point.Pressure.Pascals);
+        }
     }
 
     [Fact]
@@ -100,29 +171,52 @@ public class PassSimulatorTests
     public void Run_Twice_GivesTheSameBits() =>
         Assert.Equal(Run(Still.StepFiring(Seconds(5), Ratio.FromPercent(104)), 60).ToList(), Run(Still.StepFiring(Seconds(5), Ratio.FromPercent(104)), 60).ToList());
 
-    // Halving the cells changes outlet flow and quality by half a per cent of their change on the mean, and nowhere by more than two and a half, from
-    // two seconds after the change on and until its front comes out.
+    // Halving the cells changes outlet flow and quality at every second by less than half a per cent of what the change does, but for when a front
+    // passes: to within 3 % of the time since the change. A header ramp changes the quality itself by 0.017 only; for four seconds about the passing of
+    // what began to boil with it, a cell's way there being five seconds long, that is missed by 0.0003.
     [Theory]
-    [InlineData("flow down"), InlineData("flow up"), InlineData("ramp"), InlineData("firing"), InlineData("pressure")]
-    public void Run_TwiceTheCells_ChangesLittle(string what)
+    [InlineData("flow down", 0.005, 0.005), InlineData("flow up", 0.005, 0.005), InlineData("ramp", 0.005, 0.005), InlineData("firing up", 0.005, 0.005)]
+    [InlineData("firing down", 0.005, 0.005), InlineData("feed", 0.005, 0.005), InlineData("pressure", 0.007, 0.02)]
+    public void Run_TwiceTheCells_ChangesLittle(string what, double ofFlow, double ofQuality)
     {
+        const int change = 10;
         OperatingSchedule schedule = what switch
         {
-            "flow down" => Still.StepFeedFlow(Seconds(10), Start.FeedFlow * 0.9),
-            "flow up" => Still.StepFeedFlow(Seconds(10), Start.FeedFlow * 1.2),
-            "ramp" => Still.RampFeedFlow(Seconds(10), Seconds(30), Start.FeedFlow * 0.9),
-            "firing" => Still.StepFiring(Seconds(10), Ratio.FromPercent(106)),
-            _ => Still.RampOutletPressure(Seconds(10), Seconds(60), Pressure.FromMegapascals(9.3)),
+            "flow down" => Still.StepFeedFlow(Seconds(change), Start.FeedFlow * 0.9),
+            "flow up" => Still.StepFeedFlow(Seconds(change), Start.FeedFlow * 1.2),
+            "ramp" => Still.RampFeedFlow(Seconds(change), Seconds(30), Start.FeedFlow * 0.9),
+            "firing up" => Still.StepFiring(Seconds(change), Ratio.FromPercent(106)),
+            "firing down" => Still.StepFiring(Seconds(change), Ratio.FromPercent(94)),
+            "feed" => Still.RampFeedTemperature(Seconds(change), Seconds(60), Temperature.FromDegreesCelsius(181.85)),
+            _ => Still.RampOutletPressure(Seconds(change), Seconds(60), Pressure.FromMegapascals(9.3)),
         };
-        PassHistory coarse = Run(schedule, 320), fine = Run(schedule, 320, SimulatorOptions.Default.WithCells(160));
-        Compare(static row => row.OutletFlow.KilogramsPerSecond);
-        Compare(static row => row.TrueQuality.DecimalFractions);
+        PassHistory coarse = Run(schedule, 600), fine = Run(schedule, 600, SimulatorOptions.Default.WithCells(160));
+        Compare(static row => row.OutletFlow.KilogramsPerSecond, ofFlow);
+        Compare(static row => row.TrueQuality.DecimalFractions, ofQuality);
 
-        void Compare(Func<PassInstant, double> of)
+        void Compare(Func<PassInstant, double> of, double tolerance)
         {
-            double effect = fine.Max(row => Math.Abs(of(row) - of(fine[0])));
-            double[] off = [.. coarse.Zip(fine).Skip(12).Select(pair => Math.Abs(of(pair.First) - of(pair.Second)) / effect)];
-            Assert.True(off.Average() < 0.005 && off.Max() < 0.025, $"{what}: {off.Average():P2} mean, {off.Max():P2} worst at {12 + Array.IndexOf(off, off.Max())} s");
+            double[] values = [.. fine.Select(of)];
+            double effect = values.Max(value => Math.Abs(value - values[0]));
+            for (int t = change + 1; t < values.Length; t++)
+            {
+                (double low, double high) = About(values, t, 0.03 * (t - change));
+                Assert.True(of(coarse[t]) >= low - (tolerance * effect) && of(coarse[t]) <= high + (tolerance * effect), $"{what}: {of(coarse[t])} at {t} s, {low} to {high} with twice the cells, effect {effect}");
+            }
+        }
+    }
+
+    // The least and the greatest within some seconds of one.
+    private static (double Low, double High) About(double[] values, int second, double within)
+    {
+        double from = second - within, to = Math.Min(values.Length - 1, second + within);
+        double[] all = [At(from), At(to), .. Enumerable.Range((int)Math.Ceiling(from), (int)(Math.Floor(to) - Math.Ceiling(from)) + 1).Select(whole => values[whole])];
+        return (all.Min(), all.Max());
+
+        double At(double time)
+        {
+            int whole = Math.Min((int)time, values.Length - 2);
+            return values[whole] + ((time - whole) * (values[whole + 1] - values[whole]));
         }
     }
 
