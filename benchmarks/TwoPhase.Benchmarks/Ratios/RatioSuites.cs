@@ -24,6 +24,6 @@ internal static class RatioSuites
     public static IEnumerable<IRatioSuite> Named(string[] names) => names.Length == 0 ? All : [.. names.Select(Named)];
 
     public static IRatioSuite Named(string name) =>
-        All.FirstOrDefault(suite => suite.Name == name)
+        All.FirstOrDefault(suite => string.Equals(suite.Name, name, StringComparison.OrdinalIgnoreCase))
         ?? throw new ArgumentException($"No suite '{name}'; there are: {string.Join(", ", All.Select(suite => suite.Name))}.", nameof(name));
 }
