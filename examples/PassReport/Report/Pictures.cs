@@ -6,7 +6,6 @@ namespace PassReport.Report;
 /// <summary>The pictures, each as SVG and PNG. Colours are those of Okabe and Ito (2008), safe for colour-blind eyes; no meaning hangs on colour alone.</summary>
 internal sealed class Pictures
 {
-    private static readonly Color Ink = Color.FromHex("#222222"), Line = Color.FromHex("#0072B2"), Shade = Color.FromHex("#E69F00").WithAlpha(0.30), Estimated = Color.FromHex("#D55E00");
     private static readonly Color[] Several = [Color.FromHex("#0072B2"), Color.FromHex("#D55E00"), Color.FromHex("#009E73"), Color.FromHex("#CC79A7"), Color.FromHex("#56B4E9"), Color.FromHex("#000000")];
     private static readonly MarkerShape[] Shapes = [MarkerShape.FilledCircle, MarkerShape.FilledSquare, MarkerShape.FilledDiamond, MarkerShape.FilledTriangleUp, MarkerShape.OpenCircle, MarkerShape.OpenSquare, MarkerShape.OpenDiamond, MarkerShape.OpenTriangleUp, MarkerShape.Cross, MarkerShape.Asterisk];
 
@@ -38,7 +37,7 @@ internal sealed class Pictures
             double offset = ((passes.Length - 1 - i) * height) - low;
             Band(plot, passes[i], offset, low, high);
             foreach (double tick in Steps(low, high)) ticks.AddMajor(tick + offset, tick.ToString("0.00", System.Globalization.CultureInfo.InvariantCulture));
-            if (i > 0) plot.Add.HorizontalLine(offset + high + (height - (high - low)) / 2, 1, Ink.WithAlpha(0.4));
+            if (i > 0) plot.Add.HorizontalLine(offset + high + (height - (high - low)) / 2, 1, Panels.Ink.WithAlpha(0.4));
         }
 
         plot.Axes.Left.TickGenerator = ticks;
@@ -54,28 +53,28 @@ internal sealed class Pictures
         foreach (Move move in pass.Moves)
         {
             ScottPlot.Plottables.Rectangle span = plot.Add.Rectangle(At(move.Start), At(move.End), low + offset, high + offset);
-            span.FillColor = Shade;
+            span.FillColor = Panels.Shade;
             span.LineWidth = 0;
         }
 
         double[] xs = [.. pass.Series.Times.Select(At)], ys = [.. pass.Series.Quality.Select(quality => quality >= low && quality <= high ? quality + offset : double.NaN)];
-        ScottPlot.Plottables.Scatter line = plot.Add.ScatterLine(xs, ys, Line);
+        ScottPlot.Plottables.Scatter line = plot.Add.ScatterLine(xs, ys, Panels.Main);
         line.LineWidth = 1;
-        if (pass.Series.Estimate is { } estimate) plot.Add.ScatterLine(xs, [.. estimate.Quality.ToArray().Select(quality => quality >= low && quality <= high ? quality + offset : double.NaN)], Estimated).LineWidth = 2;
+        if (pass.Series.Estimate is { } estimate) plot.Add.ScatterLine(xs, [.. estimate.Quality.ToArray().Select(quality => quality >= low && quality <= high ? quality + offset : double.NaN)], Panels.Accent).LineWidth = 2;
         ScottPlot.Plottables.Text name = plot.Add.Text(pass.Name, At(pass.Series.Times[0]), high + offset);
         name.LabelAlignment = Alignment.UpperLeft;
         name.LabelFontSize = 14;
         name.LabelBold = true;
-        name.LabelFontColor = Ink;
+        name.LabelFontColor = Panels.Ink;
         name.LabelBackgroundColor = Colors.White.WithAlpha(0.8);
         name.OffsetX = 6;
     }
 
     private static void Legend(Plot plot, bool isEstimated)
     {
-        plot.Legend.ManualItems.Add(new LegendItem { LabelText = "quality as the meter reads it", LineColor = Line, LineWidth = 2 });
-        if (isEstimated) plot.Legend.ManualItems.Add(new LegendItem { LabelText = "quality that left the pass, as estimated", LineColor = Estimated, LineWidth = 3 });
-        plot.Legend.ManualItems.Add(new LegendItem { LabelText = "inputs moving or settling: not to be believed", FillColor = Shade, LineWidth = 0 });
+        plot.Legend.ManualItems.Add(new LegendItem { LabelText = "quality as the meter reads it", LineColor = Panels.Main, LineWidth = 2 });
+        if (isEstimated) plot.Legend.ManualItems.Add(new LegendItem { LabelText = "quality that left the pass, as estimated", LineColor = Panels.Accent, LineWidth = 3 });
+        plot.Legend.ManualItems.Add(new LegendItem { LabelText = "inputs moving or settling: not to be believed", FillColor = Panels.Shade, LineWidth = 0 });
         plot.ShowLegend(Edge.Bottom).Legend.Orientation = Orientation.Horizontal;
     }
 
@@ -119,7 +118,7 @@ internal sealed class Pictures
         for (int i = 0; i < attention.Count; i++)
         {
             int row = attention.Count - 1 - i;
-            if (attention[i].Models.Count > 0) plot.Add.Line(attention[i].LowestModel, row, attention[i].HighestModel, row).Color = Ink.WithAlpha(0.35);
+            if (attention[i].Models.Count > 0) plot.Add.Line(attention[i].LowestModel, row, attention[i].HighestModel, row).Color = Panels.Ink.WithAlpha(0.35);
         }
 
         for (int m = 0; m < models.Length; m++)
@@ -144,8 +143,8 @@ internal sealed class Pictures
         var plot = new Plot();
         plot.Font.Set(Fonts.Sans);
         plot.Title(title, 20);
-        plot.Axes.Color(Ink);
-        plot.Grid.MajorLineColor = Ink.WithAlpha(0.12);
+        plot.Axes.Color(Panels.Ink);
+        plot.Grid.MajorLineColor = Panels.Ink.WithAlpha(0.12);
         plot.Axes.Left.Label.FontSize = plot.Axes.Bottom.Label.FontSize = 15;
         plot.Axes.Left.TickLabelStyle.FontSize = plot.Axes.Bottom.TickLabelStyle.FontSize = 13;
         plot.Legend.FontSize = 13;

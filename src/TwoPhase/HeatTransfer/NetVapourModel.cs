@@ -36,7 +36,7 @@ public abstract partial class NetVapourModel
     /// <para>Range: xe from subcooled to low quality; a profile fitted so that x and its slope start at zero.</para>
     /// <para>Accuracy: none stated; that of xd.</para>
     /// <para>Source: Levy, Int. J. Heat Mass Transfer 10(7), 951-965 (1967); Collier and Thome, Convective Boiling and Condensation,
-    /// 3rd ed. (1994), section 6.4; the same form in public lecture notes on two-phase heat transfer. Some codes divide it by
+    /// 3rd ed. (1994), section 6.4; the same form in open course notes on two-phase heat transfer. Some codes divide it by
     /// 1 − xd exp(xe/xd − 1), which takes at most −xd of x itself (1 % of x where xd = −0.01).</para>
     /// </remarks>
     /// <param name="flow">The flow; of it saturated properties, mass flux and bore are used.</param>
